@@ -1,0 +1,104 @@
+package twofold.design;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+
+/**
+ * The one place where numbers change units: decimal text in a file's or a person's unit against SI doubles.
+ *
+ * <p>Reading multiplies the decimal <em>text</em> exactly and rounds once. Writing gives the shortest decimal that reads
+ * back to the same double, so that load and save is stable by construction.
+ */
+public enum Unit {
+    /** A pure number. */
+    ONE("", "1"),
+    /** Millimetres for m. */
+    MM("mm", "1e-3"),
+    /** Micrometres for m. */
+    UM("µm", "1e-6"),
+    /** Nanometres for m. */
+    NM("nm", "1e-9"),
+    /** Degrees for rad. */
+    DEG("°", Unit.PI_OVER_180),
+    /** Inverse metres, SI already. */
+    PER_M("1/m", "1"),
+    /** Megahertz for Hz. */
+    MHZ("MHz", "1e6"),
+    /** Hundredths for a pure number. */
+    PERCENT("%", "1e-2");
+
+    /** π/180 to 40 digits. */
+    private static final String PI_OVER_180 = "0.01745329251994329576923690768488612713443";
+
+    private static final MathContext EXACT_ENOUGH = new MathContext(40);
+
+    private final String symbol;
+    private final BigDecimal factor;
+
+    Unit(String symbol, String factor) {
+        this.symbol = symbol;
+        this.factor = new BigDecimal(factor);
+    }
+
+    /** The unit as printed behind a number; empty for a pure number. */
+    public String symbol() {
+        return symbol;
+    }
+
+    /**
+     * The SI double nearest to a decimal in this unit.
+     *
+     * @param decimal in this unit
+     */
+    public double toSi(BigDecimal decimal) {
+        return decimal.multiply(factor).doubleValue();
+    }
+
+    /**
+     * The SI double nearest to a number in this unit, which is taken as its shortest decimal.
+     *
+     * @param number finite, in this unit
+     */
+    public double toSi(double number) {
+        return toSi(BigDecimal.valueOf(number));
+    }
+
+    /**
+     * An SI value in this unit, for showing; rounded once.
+     *
+     * @param si any double; infinities and NaN pass through
+     */
+    public double fromSi(double si) {
+        return Double.isFinite(si)
+                ? new BigDecimal(si).divide(factor, EXACT_ENOUGH).doubleValue()
+                : si;
+    }
+
+    /**
+     * The shortest decimal in this unit that {@link #toSi(BigDecimal)} reads back to the same double, as JSON writes
+     * numbers.
+     *
+     * @param si finite, in SI
+     */
+    public String text(double si) {
+        if (si == 0) {
+            return "0";
+        }
+        BigDecimal exact = new BigDecimal(si).divide(factor, EXACT_ENOUGH);
+        // A decimal of up to 15 digits survives a double, so the shortest one shows at 15 digits with zeros cut.
+        for (int digits = 15; digits < 18; digits++) {
+            BigDecimal shorter = exact.round(new MathContext(digits, RoundingMode.HALF_EVEN));
+            if (toSi(shorter) == si) {
+                return plain(shorter);
+            }
+        }
+        return plain(exact.round(new MathContext(20)));
+    }
+
+    private static String plain(BigDecimal decimal) {
+        BigDecimal short_ = decimal.stripTrailingZeros();
+        int leading = short_.precision() - short_.scale();
+        return leading > 16 || leading < -6 ? short_.toString().replace("E+", "E") : short_.toPlainString();
+    }
+}
