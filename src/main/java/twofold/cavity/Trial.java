@@ -18,9 +18,6 @@ import twofold.optics.Walk;
 public final class Trial {
     private static final double COS_GRAZING = Math.cos(Field.Limits.GRAZING);
 
-    /** Half a unit in the last place of 1. */
-    private static final double UNIT_ROUNDING = 0x1p-53;
-
     private final Chain chain;
     private final double[] v;
     private final boolean[] inMiddle;
@@ -416,93 +413,76 @@ public final class Trial {
         return new RayMatrix(a + b * p, b, c + p * (d - a) - p * p * b, d - p * b);
     }
 
-    /**
-     * Whether a plane is stable. It is on the edge when 1 − |half trace| does not exceed what rounding can make of it:
-     * the same walk over the magnitudes of all numbers gives matrices G that bound how errors grow, each element of the
-     * chain is then good to N u G with N the number of shears and u = 2⁻⁵³, and 1 − h² is good to what its formula makes
-     * of that. Allocates; not for sweeps.
-     */
+    /** Whether a plane is stable, see {@link Rounding}. Allocates; not for sweeps. */
     public State state(Plane plane) {
         double margin = margin(plane);
-        if (!(Math.abs(margin) > rounding(plane))) {
+        if (!(Math.abs(margin) > Rounding.ofMargin(this, plane))) {
             return State.EDGE;
         }
         return margin > 0 ? State.STABLE : State.UNSTABLE;
     }
 
-    /** The bound on the rounding of 1 − |half trace| that {@link #state} uses. */
-    double rounding(Plane plane) {
-        Trial magnitudes = new Trial(chain, v.clone());
-        System.arraycopy(path, 0, magnitudes.path, 0, path.length);
-        System.arraycopy(cos, 0, magnitudes.cos, 0, cos.length);
-        int shears = magnitudes.takeMagnitudes();
-        magnitudes.walk();
-        int at = offset(plane);
-        double u = shears * UNIT_ROUNDING;
-        double[] g = magnitudes.closed;
-        if (chain.ring) {
-            double da = u * Math.abs(g[at]);
-            double db = u * Math.abs(g[at + 1]);
-            double dc = u * Math.abs(g[at + 2]);
-            double dd = u * Math.abs(g[at + 3]);
-            double square = Math.abs(closed[at + 1]) * dc
-                    + Math.abs(closed[at + 2]) * db
-                    + db * dc
-                    + (Math.abs(closed[at] - closed[at + 3]) + da + dd) * (da + dd) / 2;
-            return square / (1 + Math.abs(halfTrace(plane)));
-        }
-        double[] way = way(plane);
-        double[] bound = magnitudes.way(plane);
-        double ad = product(way[0], way[3], u * bound[0], u * bound[3]);
-        double bc = product(way[1], way[2], u * bound[1], u * bound[2]);
-        // 1 − |h| is −2bc near +1 and 2ad near −1.
-        return 2 * (halfTrace(plane) > 0 ? bc : ad);
-    }
-
-    private static double product(double x, double y, double dx, double dy) {
-        return Math.abs(x) * dy + Math.abs(y) * dx + dx * dy;
+    /** A closed chain's number, by its place in {@link Mode}. */
+    double closed(Plane plane, int number) {
+        return closed[offset(plane) + number];
     }
 
     /** The one-way matrix between the middles of a standing wave's end mirrors. */
-    private double[] way(Plane plane) {
-        int last = 4 * chain.station[chain.mirror[chain.mirror.length - 1]];
+    double[] way(Plane plane) {
+        int end = chain.mirror[chain.mirror.length - 1];
+        int last = 4 * chain.station[end];
         double[] prefix = Arrays.copyOfRange(prefixes(plane), last, last + 4);
-        double half = v[chain.mirror[chain.mirror.length - 1] * Chain.STRIDE + Chain.POWER] / 2;
+        double half = v[end * Chain.STRIDE + Chain.POWER] / 2;
         prefix[2] += half * prefix[0];
         prefix[3] += half * prefix[1];
         return prefix;
     }
 
-    /** Replaces every number by what makes all shears add up in magnitude; returns how many shears there are. */
-    private int takeMagnitudes() {
-        int shears = 1;
+    boolean isRing() {
+        return chain.ring;
+    }
+
+    /** This trial after {@link #run}, walked again over the magnitudes of its numbers so that nothing cancels. */
+    Trial magnitudes() {
+        Trial copy = new Trial(chain, v.clone());
+        System.arraycopy(path, 0, copy.path, 0, path.length);
+        System.arraycopy(cos, 0, copy.cos, 0, cos.length);
         for (int part = 0; part < chain.kind.length; part++) {
             int b = part * Chain.STRIDE;
             switch (chain.kind[part]) {
-                case MIRROR -> {
-                    v[b + Chain.POWER] = -Math.abs(v[b + Chain.POWER]);
-                    shears += 2;
-                }
-                case LENS -> {
-                    v[b + Chain.PT] = -Math.abs(v[b + Chain.PT]);
-                    v[b + Chain.PS] = -Math.abs(v[b + Chain.PS]);
-                    shears += 2;
-                }
-                case PLATE, CRYSTAL -> {
-                    v[b + Chain.PT] = -Math.abs(v[b + Chain.PT]);
-                    v[b + Chain.PS] = -Math.abs(v[b + Chain.PS]);
-                    shears += 4;
+                case MIRROR -> copy.diverge(b + Chain.POWER);
+                case LENS, PLATE, CRYSTAL -> {
+                    copy.diverge(b + Chain.PT);
+                    copy.diverge(b + Chain.PS);
                 }
                 case MATRIX -> {
                     for (int i = 0; i < 4; i++) {
-                        v[b + Chain.MATRIX_T + i] = Math.abs(v[b + Chain.MATRIX_T + i]);
-                        v[b + Chain.MATRIX_S + i] = Math.abs(v[b + Chain.MATRIX_S + i]);
+                        copy.v[b + Chain.MATRIX_T + i] = Math.abs(v[b + Chain.MATRIX_T + i]);
+                        copy.v[b + Chain.MATRIX_S + i] = Math.abs(v[b + Chain.MATRIX_S + i]);
                     }
-                    shears += 3;
                 }
-                case APERTURE -> shears++;
+                case APERTURE -> {}
             }
         }
-        return shears;
+        copy.walk();
+        return copy;
+    }
+
+    private void diverge(int power) {
+        v[power] = -Math.abs(v[power]);
+    }
+
+    /** How many elementary steps one walk takes. */
+    int steps() {
+        int steps = 1;
+        for (Kind kind : chain.kind) {
+            steps += switch (kind) {
+                case MIRROR, LENS -> 2;
+                case PLATE, CRYSTAL -> 4;
+                case MATRIX -> 3;
+                case APERTURE -> 1;
+            };
+        }
+        return steps;
     }
 }
