@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.PriorityQueue;
+import twofold.design.Part;
 import twofold.design.Point;
 
 /**
@@ -24,7 +25,17 @@ public final class Clearance {
      * @param other index of the part whose mount it is to
      * @param gap m, negative where they overlap
      */
-    public record Gap(int part, Optional<Integer> beam, Optional<Integer> other, double gap) {}
+    public record Gap(int part, Optional<Integer> beam, Optional<Integer> other, double gap) {
+        /** What the gap is to, in words: "beam End A/Fold 1", or the name of a part. */
+        public String to(Laid laid) {
+            List<Part> parts = laid.design().parts();
+            return beam.map(laid.legs()::get)
+                    .map(leg -> "beam " + parts.get(leg.from()).name() + "/"
+                            + parts.get(leg.to()).name())
+                    .or(() -> other.map(parts::get).map(Part::name))
+                    .orElseThrow();
+        }
+    }
 
     private Clearance(Laid laid, List<Strip> strips) {
         this.laid = laid;
