@@ -11,6 +11,16 @@ import twofold.design.Shape;
 
 class RandomDesignsTest {
     @Test
+    void stableOnesAreStable() {
+        for (long seed = 0; seed < 50; seed++) {
+            Design design = RandomDesigns.stable(seed);
+            double[][] rays = ExactRays.of(design).derivative();
+            assertThat(ExactRays.halfTrace(rays, 0)).as(design.title()).isBetween(-0.98, 0.98);
+            assertThat(ExactRays.halfTrace(rays, 1)).as(design.title()).isBetween(-0.98, 0.98);
+        }
+    }
+
+    @Test
     void areOfAllKindsAndRepeat() {
         Set<Kind> kinds = EnumSet.noneOf(Kind.class);
         Set<Shape> shapes = EnumSet.noneOf(Shape.class);

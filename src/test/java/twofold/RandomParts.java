@@ -23,14 +23,16 @@ import twofold.design.Slab;
 import twofold.design.TiltPlane;
 import twofold.design.TwoPowers;
 import twofold.design.Unit;
+import twofold.material.Materials;
 
 /**
  * Random parts, not yet in their places. Focal lengths and radii are multiplied by {@code weakness}, powers divided.
  *
  * @param dice where chance comes from
+ * @param wave vacuum wavelength, m
  * @param weakness 1 for the strongest optics
  */
-record RandomParts(Dice dice, double weakness) {
+record RandomParts(Dice dice, double wave, double weakness) {
     private static final List<String> WORDS =
             List.of("Fold", "Rod", "Linse", "Flat", "Plättchen", "鏡", "Étalon", "Stop", "M", "Box", "λ plate", "Ø");
 
@@ -119,7 +121,25 @@ record RandomParts(Dice dice, double weakness) {
     }
 
     private Glass glass() {
-        return new Glass(OptionalDouble.of(dice.number(1.3, 2.4, Unit.ONE, 2)), Optional.empty());
+        double kind = dice.any(0, 1);
+        return new Glass(
+                kind < 0.8 ? OptionalDouble.of(dice.number(1.3, 2.4, Unit.ONE, 2)) : OptionalDouble.empty(),
+                kind < 0.7 ? Optional.empty() : Optional.of(dice.of(materials())));
+    }
+
+    private List<String> materials() {
+        Materials all = Materials.standard();
+        return all.names().stream()
+                .filter(n -> all.find(n).orElseThrow().covers(wave))
+                .toList();
+    }
+
+    private double index(Glass glass) {
+        return glass.index()
+                .orElseGet(() -> Materials.standard()
+                        .find(glass.material().orElseThrow())
+                        .orElseThrow()
+                        .index(wave));
     }
 
     private double loss() {
@@ -164,7 +184,7 @@ record RandomParts(Dice dice, double weakness) {
                 loss(),
                 dice.chance(0.5) ? Optional.of(mount()) : Optional.empty());
         double outside = incidence(slab);
-        double inside = Math.asin(Math.sin(outside) / slab.glass().index().getAsDouble());
+        double inside = Math.asin(Math.sin(outside) / index(slab.glass()));
         double thickness = dice.length(0.5e-3, 12e-3);
         double path = plate ? thickness / Math.cos(inside) : dice.length(1e-3, 30e-3);
         Part part = plate ? new Plate(name, thickness, slab) : new Crystal(name, path, powers(), slab);
@@ -174,9 +194,9 @@ record RandomParts(Dice dice, double weakness) {
         return new Draft(part, path, path * Math.cos(turn), lifts ? 0 : aside, lifts ? aside : 0);
     }
 
-    private static double incidence(Slab slab) {
+    private double incidence(Slab slab) {
         return slab.faces().atBrewster()
-                ? Math.atan(slab.glass().index().getAsDouble())
+                ? Math.atan(index(slab.glass()))
                 : slab.faces().incidence();
     }
 
@@ -202,8 +222,7 @@ record RandomParts(Dice dice, double weakness) {
                 clear(),
                 loss(),
                 Optional.empty());
-        double inside =
-                Math.asin(Math.sin(incidence(down)) / down.glass().index().getAsDouble());
+        double inside = Math.asin(Math.sin(incidence(down)) / index(down.glass()));
         // Half of the time the way down is a plate, whose thickness follows from the crystal's path.
         Part part = dice.chance(0.5)
                 ? new Plate(second, crystal.length() * Math.cos(inside), down)
