@@ -45,7 +45,6 @@ final class ExactRays {
                 }
             }
         }
-        // Of a standing wave the way back ends with the first mirror, which "forward" leaves out.
         return new ExactRays(forward, ring, start, new Frame(start.at(), along, carried, Vector.UP));
     }
 

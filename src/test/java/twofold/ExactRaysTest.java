@@ -12,6 +12,7 @@ import twofold.design.Part;
 import twofold.design.Point;
 import twofold.design.Shape;
 import twofold.design.Side;
+import twofold.design.TiltPlane;
 import twofold.design.TwoPowers;
 
 /** The tracer of real rays against closed forms, before it judges anything. */
@@ -69,7 +70,7 @@ class ExactRaysTest {
         double path = 0.005 / Math.cos(inner);
         double turn = theta - inner;
         for (Side side : Side.values()) {
-            boolean flat = side.sign() != 0 && side.of() == twofold.design.TiltPlane.TANGENTIAL;
+            boolean flat = side.of() == TiltPlane.TANGENTIAL;
             Part plate = KnownCavities.plate(0.005, KnownCavities.slab(Along.MIDDLE, 1.5, faces, side));
             Design design = KnownCavities.flat(
                     plate, path, path * Math.cos(turn), flat ? side.sign() * path * Math.sin(turn) : 0);
