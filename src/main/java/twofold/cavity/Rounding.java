@@ -6,9 +6,10 @@ import twofold.optics.Plane;
  * What rounding can make of 1 − |half trace|.
  *
  * <p>The walk over the magnitudes of all numbers gives matrices G that bound how errors grow along the chain. Each element
- * of the true chain is then good to N u G, with N the number of elementary steps and u = 2⁻⁵³; 1 − |half trace| is good to
+ * of the true chain is then good to √N u G, with N the number of elementary steps and u = 2⁻⁵³; 1 − |half trace| is good to
  * what its formula in {@link twofold.optics.Mode} makes of that. This is the running error analysis of Wilkinson, Rounding
- * Errors in Algebraic Processes (1963) (from memory), with N for its small constants.
+ * Errors in Algebraic Processes (1963), with √N for N because rounding errors are as good as independent (Higham &amp; Mary,
+ * SIAM J. Sci. Comput. 41, A2815 (2019)); both from memory.
  */
 final class Rounding {
     /** Half a unit in the last place of 1. */
@@ -18,7 +19,7 @@ final class Rounding {
 
     /** The bound on the error of {@link Trial#margin} after a run. */
     static double ofMargin(Trial trial, Plane plane) {
-        double u = trial.steps() * UNIT;
+        double u = Math.sqrt(trial.steps()) * UNIT;
         Trial grown = trial.magnitudes();
         if (trial.isRing()) {
             double da = u * Math.abs(grown.closed(plane, 0));
