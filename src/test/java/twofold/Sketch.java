@@ -2,6 +2,7 @@ package twofold;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import twofold.design.Along;
 import twofold.design.Crystal;
@@ -10,9 +11,14 @@ import twofold.design.FaceAngle;
 import twofold.design.Field;
 import twofold.design.Glass;
 import twofold.design.Kind;
+import twofold.design.Mirror;
 import twofold.design.Part;
 import twofold.design.Point;
 import twofold.design.Shape;
+import twofold.design.Side;
+import twofold.design.Slab;
+import twofold.design.TiltPlane;
+import twofold.design.TwoPowers;
 import twofold.design.Values;
 
 /**
@@ -109,7 +115,7 @@ public final class Sketch {
 
     /** How far the walk is from where it started, m. */
     public double gap() {
-        return ((twofold.design.Mirror) parts.get(0)).at().distance(new Point(x, y));
+        return ((Mirror) parts.get(0)).at().distance(new Point(x, y));
     }
 
     /** What was drawn, as a standing wave. */
@@ -126,16 +132,16 @@ public final class Sketch {
         parts.add(new Crystal(
                 name,
                 length,
-                twofold.design.TwoPowers.NONE,
-                new twofold.design.Slab(
+                TwoPowers.NONE,
+                new Slab(
                         Along.at(path + length / 2),
-                        new Glass(OptionalDouble.of(index), java.util.Optional.empty()),
+                        new Glass(OptionalDouble.of(index), Optional.empty()),
                         faces,
-                        twofold.design.TiltPlane.TANGENTIAL,
-                        twofold.design.Side.LEFT,
+                        TiltPlane.TANGENTIAL,
+                        Side.LEFT,
                         OptionalDouble.empty(),
                         0,
-                        java.util.Optional.empty())));
+                        Optional.empty())));
     }
 
     private void step(double length, double aside) {

@@ -12,6 +12,7 @@ import twofold.Checks;
 import twofold.Checks.Check;
 import twofold.Sketch;
 import twofold.Solved;
+import twofold.design.Design;
 import twofold.design.Point;
 import twofold.optics.Plane;
 
@@ -246,8 +247,7 @@ class TwoMirrorReferenceTest {
         return Solved.of(twoMirrors(check.in("lambda_m"), check.in("L_m"), radius1, radius2, 0));
     }
 
-    private static twofold.design.Design twoMirrors(
-            double wavelength, double length, double radius1, double radius2, double heading) {
+    private static Design twoMirrors(double wavelength, double length, double radius1, double radius2, double heading) {
         return new Sketch(new Point(0, 0), heading)
                 .mirror("M1", radius1)
                 .go(length)
