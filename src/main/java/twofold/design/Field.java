@@ -318,9 +318,9 @@ public enum Field {
     /** Angles that limit fields, rad. */
     public static final class Limits {
         /** From here on an incidence is refused: 89°. */
-        public static final double GRAZING = 89 * Math.PI / 180;
+        public static final double GRAZING = Unit.DEG.toSi(89);
 
-        static final double FULL_TURN = 2 * Math.PI;
+        static final double FULL_TURN = Unit.DEG.toSi(360);
 
         private Limits() {}
     }
@@ -411,19 +411,19 @@ public enum Field {
     /** What a number in this field may be, in the file's unit: "a number above 0, up to 1000". */
     public String accepted() {
         String low = unit.text(least);
-        String high = most == Limits.GRAZING ? "89" : most == Limits.FULL_TURN ? "360" : unit.text(most);
-        String from = least == -Limits.FULL_TURN ? "-360" : low;
+        String high = unit.text(most);
         return switch (form) {
             case POSITIVE -> "a number above 0, up to " + high;
             case MOUNT -> "two numbers, each above 0, up to " + high;
             case SIGNED -> "a number from " + low + " to " + high + ", or the same negative";
-            case NUMBER ->
-                most == Limits.GRAZING ? "a number from 0 to below 89" : "a number from " + from + " to " + high;
-            case FACE_ANGLE -> "a number from 0 to below 89, or \"brewster\"";
+            case NUMBER -> "a number from " + low + " to " + (most == Limits.GRAZING ? "below " : "") + high;
+            case FACE_ANGLE -> "a number from " + low + " to below " + high + ", or \"brewster\"";
             case ALONG -> "a number from " + low + " to " + high + ", or \"middle\"";
             case POINT -> "two numbers, each from " + low + " to " + high;
             case POWERS -> "a number from " + low + " to " + high + ", or two of them";
-            case MATRIX -> "four numbers, [A, B, C, D]";
+            case MATRIX ->
+                "four numbers, [A, B, C, D], A and D up to " + Unit.ONE.text(most) + ", B up to " + Unit.MM.text(most)
+                        + " mm, C up to " + Unit.PER_MM.text(most) + " per mm";
             case TILT_PLANE -> "\"tangential\" or \"sagittal\"";
             case SIDE -> "\"left\" or \"right\", for a sagittal tilt \"up\" or \"down\"";
             case TURN -> "\"left\" or \"right\"";

@@ -4,11 +4,14 @@ import java.util.Collection;
 import java.util.Comparator;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.apache.commons.text.similarity.LevenshteinDistance;
 
 /** Names of parts and levers: which are allowed, and the known one nearest to a misspelling. */
 public final class Names {
     private static final int LONGEST = 60;
+    private static final int LONGEST_SHOWN = 80;
+    private static final int MOST_LISTED = 30;
     private static final String NOT_INSIDE = "/@:\"";
     private static final String NOT_FIRST = "=+-";
 
@@ -28,6 +31,36 @@ public final class Names {
                 && NOT_FIRST.indexOf(name.charAt(0)) < 0
                 && !isSpace(name.codePointAt(0))
                 && !isSpace(name.codePointBefore(name.length()));
+    }
+
+    /** A text as messages quote it: its first characters, with what cannot be printed escaped. */
+    public static String shown(String text) {
+        int cut = text.codePointCount(0, Math.min(text.length(), 2 * LONGEST_SHOWN + 2)) > LONGEST_SHOWN
+                ? text.offsetByCodePoints(0, LONGEST_SHOWN)
+                : text.length();
+        return escaped(text.substring(0, cut)) + (cut < text.length() ? "…" : "");
+    }
+
+    /** A text with what cannot be printed, line breaks among it, escaped as in JSON. */
+    public static String escaped(String text) {
+        StringBuilder printable = new StringBuilder(text.length());
+        text.codePoints().forEach(c -> {
+            if (isPrintable(c)) {
+                printable.appendCodePoint(c);
+            } else {
+                for (char unit : Character.toChars(c)) {
+                    String hex = Integer.toHexString(unit);
+                    printable.append("\\u").append("0".repeat(4 - hex.length())).append(hex);
+                }
+            }
+        });
+        return printable.toString();
+    }
+
+    /** Names as messages list them: the first few, with commas between. */
+    public static String listed(Collection<String> names) {
+        return names.stream().limit(MOST_LISTED).map(Names::shown).collect(Collectors.joining(", "))
+                + (names.size() > MOST_LISTED ? ", …" : "");
     }
 
     private static boolean isPrintable(int c) {
@@ -62,6 +95,8 @@ public final class Names {
 
     /** "; nearest is \"x\"" or nothing. */
     public static String hint(String misspelled, Collection<String> known) {
-        return nearest(misspelled, known).map(n -> "; nearest is \"" + n + "\"").orElse("");
+        return nearest(misspelled, known)
+                .map(n -> "; nearest is \"" + shown(n) + "\"")
+                .orElse("");
     }
 }

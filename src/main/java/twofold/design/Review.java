@@ -17,6 +17,9 @@ final class Review {
     /** How far reflectance and transmittance may add up beyond 1: the rounding of their sum. */
     private static final double SUM = 1e-12;
 
+    /** After so many problems, unknown names come without the nearest known one, whose search takes long. */
+    private static final int HINTED = 200;
+
     private final Design design;
     private final List<Part> parts;
     private final Map<String, Part> byName = new HashMap<>();
@@ -103,19 +106,11 @@ final class Review {
             String name = names.get(i);
             Subject where = list.at(i).at("name");
             if (!Names.accepts(name)) {
-                add(where, "found \"" + shown(name) + "\"", Names.ACCEPTED);
+                add(where, "found \"" + Names.shown(name) + "\"", Names.ACCEPTED);
             } else if (!seen.add(name)) {
                 add(where, "found \"" + name + "\" a second time", "a name that nothing else in the list has");
             }
         }
-    }
-
-    private static String shown(String text) {
-        StringBuilder shown = new StringBuilder();
-        text.codePoints()
-                .limit(80)
-                .forEach(c -> shown.append(Character.isISOControl(c) ? "\\u%04x".formatted(c) : Character.toString(c)));
-        return shown.toString();
     }
 
     private void part(Subject where, Part part) {
@@ -219,16 +214,20 @@ final class Review {
                 number(where, field, p.sagittal());
             }
         } else if (value instanceof FourNumbers m) {
-            number(where.at(0), field, m.a());
-            number(where.at(1), field, m.b());
-            number(where.at(2), field, m.c());
-            number(where.at(3), field, m.d());
+            number(where.at(0), field, Unit.ONE, m.a());
+            number(where.at(1), field, Unit.MM, m.b());
+            number(where.at(2), field, Unit.PER_MM, m.c());
+            number(where.at(3), field, Unit.ONE, m.d());
         }
     }
 
     private void number(Subject where, Field field, double si) {
+        number(where, field, field.unit(), si);
+    }
+
+    private void number(Subject where, Field field, Unit unit, double si) {
         if (!field.accepts(si)) {
-            add(where, "found " + (Double.isFinite(si) ? field.unit().text(si) : si), field.accepted());
+            add(where, "found " + (Double.isFinite(si) ? unit.text(si) : si), field.accepted());
         }
     }
 
@@ -247,7 +246,7 @@ final class Review {
     private void mirror(Subject where, String name) {
         Part part = known(where, name, mirrors);
         if (part != null && part.kind() != Kind.MIRROR) {
-            add(where, "found \"" + name + "\", a " + part.kind().word(), "the name of a mirror");
+            add(where, "found \"" + Names.shown(name) + "\", a " + part.kind().word(), "the name of a mirror");
         }
     }
 
@@ -260,12 +259,17 @@ final class Review {
         }
     }
 
+    /** The nearest known name; searched for only as long as a person would read on. */
+    private String hint(String name, List<String> near) {
+        return found.size() < HINTED ? Names.hint(name, near) : "";
+    }
+
     private @org.jspecify.annotations.Nullable Part known(Subject where, String name, List<String> near) {
         Part part = byName.get(name);
         if (part == null) {
             add(
                     where,
-                    "found \"" + shown(name) + "\", which no part is called" + Names.hint(name, near),
+                    "found \"" + Names.shown(name) + "\", which no part is called" + hint(name, near),
                     "the name of a part");
         }
         return part;
@@ -273,7 +277,7 @@ final class Review {
 
     private void leg(Subject where, Place leg) {
         if (leg.second().isEmpty()) {
-            add(where, "found \"" + leg + "\"", "two neighbouring mirrors");
+            add(where, "found \"" + Names.shown(leg.toString()) + "\"", "two neighbouring mirrors");
             return;
         }
         String a = leg.first();
@@ -283,7 +287,10 @@ final class Review {
         int i = mirrors.indexOf(a);
         int j = mirrors.indexOf(b);
         if (i >= 0 && j >= 0 && !neighbours(i, j, mirrors.size())) {
-            add(where, "found \"" + a + "\" and \"" + b + "\", which no leg joins", "two neighbouring mirrors");
+            add(
+                    where,
+                    "found \"" + Names.shown(a) + "\" and \"" + Names.shown(b) + "\", which no leg joins",
+                    "two neighbouring mirrors");
         }
     }
 
@@ -295,7 +302,7 @@ final class Review {
         if (Field.settableUnit(set).isEmpty()) {
             add(
                     where.at("set"),
-                    "found \"" + shown(set) + "\"" + Names.hint(set, Field.settableNames()),
+                    "found \"" + Names.shown(set) + "\"" + Names.hint(set, Field.settableNames()),
                     String.join(", ", Field.settableNames()));
             return;
         }
@@ -307,7 +314,7 @@ final class Review {
             Subject here = where.at("of").at(i);
             Place place = of.get(i);
             if (!seen.add(place)) {
-                add(here, "found \"" + place + "\" a second time", "each once");
+                add(here, "found \"" + Names.shown(place.toString()) + "\" a second time", "each once");
             } else if (set.equals("leg_mm")) {
                 leg(here, place);
             } else if (place.second().isPresent()) {
@@ -332,8 +339,8 @@ final class Review {
         if (part.kind().field(set).filter(Field::isSettable).isEmpty()) {
             add(
                     where,
-                    "found \"" + name + "\", a " + part.kind().word() + ", which has no " + set,
-                    fitting.isEmpty() ? "a part that has it" : "one of " + String.join(", ", fitting));
+                    "found \"" + Names.shown(name) + "\", a " + part.kind().word() + ", which has no " + set,
+                    fitting.isEmpty() ? "a part that has it" : "one of " + Names.listed(fitting));
         } else if (part.kind() == Kind.MIRROR && set.equals("incidence_deg")) {
             folding(where, name);
         }
@@ -410,8 +417,8 @@ final class Review {
             if (!levers.contains(name)) {
                 add(
                         where.at("over"),
-                        "found \"" + shown(name) + "\", which no lever is called" + Names.hint(name, levers),
-                        levers.isEmpty() ? "the name of a lever" : String.join(", ", levers));
+                        "found \"" + Names.shown(name) + "\", which no lever is called" + Names.hint(name, levers),
+                        levers.isEmpty() ? "the name of a lever" : Names.listed(levers));
             }
         });
     }
@@ -438,7 +445,11 @@ final class Review {
             case LEG -> pair;
         };
         if (!fits) {
-            add(here, "found \"" + place + "\" for " + r.what().json(), rule.words());
+            add(
+                    here,
+                    "found \"" + Names.shown(place.toString()) + "\" for "
+                            + r.what().json(),
+                    rule.words());
         } else if (rule == Quantity.Where.LEG) {
             leg(here, place);
         } else if (pair) {
@@ -469,7 +480,7 @@ final class Review {
         if (!mirrorsOfOneLeg && !neighbouringParts) {
             add(
                     where,
-                    "found \"" + a + "\" and \"" + b + "\", which do not follow each other",
+                    "found \"" + Names.shown(a) + "\" and \"" + Names.shown(b) + "\", which do not follow each other",
                     "a leg, or two neighbouring parts");
         }
     }

@@ -23,6 +23,8 @@ public enum Unit {
     DEG("°", Unit.PI_OVER_180),
     /** Inverse metres, SI already. */
     PER_M("1/m", "1"),
+    /** Inverse millimetres for 1/m. */
+    PER_MM("1/mm", "1e3"),
     /** Megahertz for Hz. */
     MHZ("MHz", "1e6"),
     /** Hundredths for a pure number. */
@@ -52,7 +54,8 @@ public enum Unit {
      * @param decimal in this unit
      */
     public double toSi(BigDecimal decimal) {
-        return decimal.multiply(factor).doubleValue();
+        // Zero has no sign here: -1e-400 is 0.
+        return decimal.multiply(factor).doubleValue() + 0.0;
     }
 
     /**

@@ -1,0 +1,121 @@
+package twofold.file;
+
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.stream.Stream;
+import twofold.design.Design;
+import twofold.design.Hold;
+import twofold.design.Part;
+import twofold.design.Place;
+import twofold.design.Problem;
+import twofold.design.Subject;
+
+/**
+ * Tells the problems of a draft that are the file's own from those which only come from what stands in for unreadable
+ * values: those at a stand-in, and those that rest on one.
+ */
+final class Sieve {
+    /** Checks of one field that look at another: of a mirror's transmittance, say, at its reflectance. */
+    private static final Map<String, List<String>> LOOKS_AT = Map.of(
+            "transmittance", List.of("reflectance"),
+            "side", List.of("tilt_plane"),
+            "incidence_deg", List.of("index", "material"),
+            "to", List.of("from"));
+
+    /** Fields whose checks look at no part. */
+    private static final Set<String> ALONE =
+            Set.of("name", "set", "between", "within", "plus_minus", "plus_minus_percent", "plane", "edge");
+
+    private final Design design;
+    private final Faults faults;
+    private final boolean partsAreKnown;
+    private final boolean leversAreKnown;
+    private final Set<String> names = new HashSet<>();
+    private final Set<String> ofUnknownKind = new HashSet<>();
+    private final boolean someAreNameless;
+
+    Sieve(DocumentReader.Draft draft, Faults faults) {
+        this.design = draft.design();
+        this.faults = faults;
+        boolean nameless = false;
+        for (int i = 0; i < design.parts().size(); i++) {
+            Part part = design.parts().get(i);
+            names.add(part.name());
+            nameless |= isBroken("parts", i, "name");
+            if (isBroken("parts", i, "kind")) {
+                ofUnknownKind.add(part.name());
+            }
+        }
+        someAreNameless = nameless;
+        partsAreKnown = draft.isWhole("parts") && !faults.isBroken(Subject.DOCUMENT.at("parts"));
+        boolean levers = draft.isWhole("levers") && !faults.isBroken(Subject.DOCUMENT.at("levers"));
+        for (int i = 0; i < design.levers().size(); i++) {
+            levers &= !isBroken("levers", i, "name");
+        }
+        leversAreKnown = levers;
+    }
+
+    private boolean isBroken(String list, int index, String field) {
+        return faults.isBroken(Subject.DOCUMENT.at(list).at(index).at(field));
+    }
+
+    /** Whether every part's kind is known, and that there are no more parts: else nothing can be said about the plan. */
+    boolean knowsAllKinds() {
+        return partsAreKnown && ofUnknownKind.isEmpty();
+    }
+
+    /** Whether a problem of the draft is one of the file. */
+    boolean keeps(Problem problem) {
+        List<String> steps = problem.where().steps();
+        if (faults.isBroken(problem.where()) || problem.line().contains(PartReader.NAMELESS)) {
+            return false;
+        }
+        String list = steps.get(0);
+        if (steps.size() == 1) {
+            return !list.equals("parts") || (knowsAllKinds() && !faults.isBroken(Subject.DOCUMENT.at("shape")));
+        }
+        int index = Integer.parseInt(steps.get(1).substring(1, steps.get(1).length() - 1));
+        String field = steps.size() > 2 ? steps.get(2) : "";
+        if (LOOKS_AT.getOrDefault(field, List.of()).stream().anyMatch(f -> isBroken(list, index, f))) {
+            return false;
+        }
+        return switch (list) {
+            case "parts" -> !field.equals("kind") || partsAreKnown;
+            case "requirements" -> field.equals("over") ? leversAreKnown : keeps(field, names(list, index));
+            default -> keeps(field, names(list, index));
+        };
+    }
+
+    private boolean keeps(String field, Stream<String> used) {
+        return field.isEmpty()
+                || ALONE.contains(field)
+                || (partsAreKnown
+                        && used.noneMatch(n -> ofUnknownKind.contains(n) || (someAreNameless && !names.contains(n))));
+    }
+
+    /** The names of parts that an element of a list uses. */
+    private Stream<String> names(String list, int index) {
+        return switch (list) {
+            case "holds" -> hold(design.holds().get(index));
+            case "levers" -> design.levers().get(index).of().stream().flatMap(Sieve::names);
+            case "tolerances" -> design.tolerances().get(index).of().stream().flatMap(Sieve::names);
+            default -> design.requirements().get(index).at().stream().flatMap(Sieve::names);
+        };
+    }
+
+    private static Stream<String> hold(Hold hold) {
+        return hold instanceof Hold.Leg h
+                ? names(h.leg())
+                : hold instanceof Hold.Direction h
+                        ? names(h.leg())
+                        : hold instanceof Hold.Incidence h
+                                ? Stream.of(h.mirror())
+                                : hold instanceof Hold.Position h ? Stream.of(h.mirror()) : Stream.of();
+    }
+
+    private static Stream<String> names(Place place) {
+        return Stream.concat(Stream.of(place.first()), place.second().stream());
+    }
+}
