@@ -118,7 +118,9 @@ final class Review {
         part.match(new Part.Cases<Void>() {
             @Override
             public Void mirror(Mirror m) {
-                if (m.reflectance() + m.transmittance() > 1 + SUM) {
+                boolean each =
+                        Field.REFLECTANCE.accepts(m.reflectance()) && Field.TRANSMITTANCE.accepts(m.transmittance());
+                if (each && m.reflectance() + m.transmittance() > 1 + SUM) {
                     add(
                             where.at("transmittance"),
                             "found " + Unit.ONE.text(m.transmittance()) + " beside a reflectance of "
@@ -130,6 +132,9 @@ final class Review {
 
             @Override
             public Void lens(Lens l) {
+                if (l.tilt() != 0 && l.glass().index().orElse(0) == 1) {
+                    add(where.at("index"), "found 1 for a tilted lens", "an index above 1");
+                }
                 if (l.tilt() != 0 && l.glass().isNone()) {
                     add(
                             where.at("incidence_deg"),
