@@ -43,7 +43,11 @@ public final class Commands implements Callable<Integer> {
 
     private final Streams streams;
 
-    @Parameters(paramLabel = "FILE.json", arity = "0..*", description = "A design file to open.")
+    @Parameters(
+            paramLabel = "FILE.json",
+            arity = "0..*",
+            hideParamSyntax = true,
+            description = "A design file to open.")
     private List<String> files = List.of();
 
     @Spec

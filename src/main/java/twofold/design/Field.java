@@ -431,6 +431,20 @@ public enum Field {
         };
     }
 
+    /** What an absent field comes to, in words, in the file's unit. */
+    public String absent() {
+        if (fallback instanceof Double d) {
+            return Double.isInfinite(d) ? "flat" : unit.text(d);
+        }
+        if (fallback instanceof twofold.design.Mount m) {
+            return "[" + unit.text(m.width()) + ", " + unit.text(m.depth()) + "]";
+        }
+        if (fallback instanceof FaceAngle || fallback instanceof TwoPowers) {
+            return "0";
+        }
+        return fallback instanceof twofold.design.TiltPlane t ? t.word() : "none";
+    }
+
     /** Whether a lever or tolerance can set this field: it is one number. */
     public boolean isSettable() {
         return this != HEADING

@@ -1,0 +1,136 @@
+package twofold.command;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.regex.Pattern;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
+import twofold.design.Field;
+import twofold.design.Kind;
+import twofold.file.DesignReader;
+
+/** What README and the pages in docs show is true: every command of theirs runs, every design reads, tables match. */
+class DocsTest {
+    private static final String JAR = "java -jar target/twofold.jar ";
+
+    @TempDir
+    @SuppressWarnings("NullAway.Init") // set by JUnit
+    Path folder;
+
+    private static List<Path> pages() throws IOException {
+        try (Stream<Path> docs = Files.list(Path.of("docs"))) {
+            return Stream.concat(
+                            Stream.of(Path.of("README.md")),
+                            docs.filter(p -> p.toString().endsWith(".md")))
+                    .sorted()
+                    .toList();
+        }
+    }
+
+    /** The lines of all fenced blocks in a language. */
+    private static List<String> blocks(Path page, String language) throws IOException {
+        List<String> blocks = new ArrayList<>();
+        StringBuilder block = new StringBuilder();
+        boolean inside = false;
+        for (String line : Files.readAllLines(page)) {
+            if (inside && line.startsWith("```")) {
+                blocks.add(block.toString());
+                block.setLength(0);
+                inside = false;
+            } else if (inside) {
+                block.append(line).append('\n');
+            } else {
+                inside = line.equals("```" + language);
+            }
+        }
+        return blocks;
+    }
+
+    static Stream<String> commands() throws IOException {
+        List<String> commands = new ArrayList<>();
+        for (Path page : pages()) {
+            for (String block : blocks(page, "sh")) {
+                for (String line : block.lines().toList()) {
+                    Pattern.compile(" && ")
+                            .splitAsStream(line)
+                            .map(c -> c.startsWith(JAR) ? "twofold " + c.substring(JAR.length()) : c)
+                            .filter(c -> c.startsWith("twofold "))
+                            .forEach(commands::add);
+                }
+            }
+        }
+        return commands.stream().distinct();
+    }
+
+    @ParameterizedTest
+    @MethodSource("commands")
+    void everyCommandShownRuns(String command) {
+        List<String> arguments =
+                new ArrayList<>(Pattern.compile(" ").splitAsStream(command).toList());
+        arguments.remove(0);
+        for (String option : List.of("--write", "--to")) {
+            int at = arguments.indexOf(option) + 1;
+            if (at > 0) {
+                Path name = Path.of(arguments.get(at)).getFileName();
+                arguments.set(at, folder.resolve(name.toString()).toString());
+            }
+        }
+        Run run = Run.of(arguments.toArray(String[]::new));
+        assertThat(run.status()).as(run.err()).isZero();
+        assertThat(run.out()).isNotEmpty();
+    }
+
+    @Test
+    void theseTestsSeeTheCommands() throws IOException {
+        assertThat(commands()).hasSizeGreaterThan(4).anyMatch(c -> c.contains("--json"));
+    }
+
+    @Test
+    void everyDesignShownReads() throws IOException {
+        int seen = 0;
+        for (Path page : pages()) {
+            for (String block : blocks(page, "json")) {
+                if (block.contains("\"format\"")) {
+                    seen++;
+                    assertThat(DesignReader.read(block.getBytes(java.nio.charset.StandardCharsets.UTF_8))
+                                    .problems())
+                            .as("%s", page)
+                            .isEmpty();
+                }
+            }
+        }
+        assertThat(seen).isPositive();
+    }
+
+    @Test
+    void theTableOfFieldsIsTheVocabulary() throws IOException {
+        String table = Stream.concat(
+                        Stream.of("| field | of | what it is | accepted | when absent |", "|---|---|---|---|---|"),
+                        Arrays.stream(Field.values()).map(DocsTest::row))
+                .collect(Collectors.joining("\n"));
+        assertThat(Files.readString(Path.of("docs/file-format.md")))
+                .as("docs/file-format.md between <!-- fields … --> and <!-- /fields --> must read:\n%s", table)
+                .contains("checked by a test -->\n" + table + "\n<!-- /fields -->");
+    }
+
+    private static String row(Field field) {
+        String kinds = field.kinds().stream().sorted().map(Kind::word).collect(Collectors.joining(", "));
+        String absent = switch (field.need()) {
+            case REQUIRED -> "refused";
+            case OTHER_FORM -> "another form is used";
+            case OPTIONAL -> field.absent();
+        };
+        return "| `" + field.json() + "` | " + kinds + " | " + field.doc() + " | " + field.accepted() + " | " + absent
+                + " |";
+    }
+}
