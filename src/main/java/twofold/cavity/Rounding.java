@@ -5,7 +5,7 @@ import twofold.optics.Plane;
 /**
  * What rounding can make of 1 − |half trace|.
  *
- * <p>The walk over the magnitudes of all numbers gives matrices G that bound how errors grow along the chain. Each element
+ * <p>The walk over the magnitudes of all numbers, each leg lengthened by the coordinates that it is the difference of, gives matrices G that bound how errors grow along the chain. Each element
  * of the true chain is then good to √N u G, with N the number of elementary steps and u = 2⁻⁵³; 1 − |half trace| is good to
  * what its formula in {@link twofold.optics.Mode} makes of that. This is the running error analysis of Wilkinson, Rounding
  * Errors in Algebraic Processes (1963), with √N for N because rounding errors are as good as independent (Higham &amp; Mary,
@@ -37,6 +37,14 @@ final class Rounding {
         return trial.halfTrace(plane) > 0
                 ? 2 * product(way[1], way[2], u * growth[1], u * growth[2])
                 : 2 * product(way[0], way[3], u * growth[0], u * growth[3]);
+    }
+
+    /**
+     * By how much to lengthen a leg so that the bound covers the rounding of the coordinates that it is the difference of:
+     * twice their root sum of squares, given once and not at every step.
+     */
+    static double ofCoordinates(int steps, double coordinates) {
+        return 2 * coordinates / Math.sqrt(steps);
     }
 
     /** The error of x y for errors dx and dy. */

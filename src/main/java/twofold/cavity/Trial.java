@@ -445,8 +445,10 @@ public final class Trial {
     /** This trial after {@link #run}, walked again over the magnitudes of its numbers so that nothing cancels. */
     Trial magnitudes() {
         Trial copy = new Trial(chain, v.clone());
-        System.arraycopy(path, 0, copy.path, 0, path.length);
         System.arraycopy(cos, 0, copy.cos, 0, cos.length);
+        for (int leg = 0; leg < path.length; leg++) {
+            copy.path[leg] = path[leg] + Rounding.ofCoordinates(steps(), coordinates(leg));
+        }
         for (int part = 0; part < chain.kind.length; part++) {
             int b = part * Chain.STRIDE;
             switch (chain.kind[part]) {
@@ -466,6 +468,14 @@ public final class Trial {
         }
         copy.walk();
         return copy;
+    }
+
+    /** The root of the sum of squares of the coordinates at a leg's ends, m. */
+    private double coordinates(int leg) {
+        int from = chain.mirror[leg] * Chain.STRIDE;
+        int to = chain.mirror[leg + 1] * Chain.STRIDE;
+        return Math.hypot(
+                Math.hypot(v[from + Chain.X], v[from + Chain.Y]), Math.hypot(v[to + Chain.X], v[to + Chain.Y]));
     }
 
     private void diverge(int power) {
