@@ -3,7 +3,9 @@ package twofold;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.nio.file.Path;
 import java.util.stream.LongStream;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
@@ -41,6 +43,16 @@ class ExactRaysPropertyTest {
         agrees(KnownCavities.xFold());
         agrees(KnownCavities.bowTie());
         agrees(KnownCavities.fold(0.1, Math.toRadians(30), 0.3, 0.2));
+    }
+
+    static Stream<Path> samples() {
+        return Samples.files().stream();
+    }
+
+    @ParameterizedTest
+    @MethodSource("samples")
+    void everySampleAgrees(Path sample) {
+        agrees(Samples.design(sample));
     }
 
     private static void agrees(Design design) {
