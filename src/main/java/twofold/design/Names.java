@@ -80,17 +80,22 @@ public final class Names {
         return Character.isWhitespace(c) || Character.isSpaceChar(c);
     }
 
-    /** The known name nearest to a misspelled one, if it is near enough to be meant. */
+    /**
+     * The known name nearest to a misspelled one, if it is near enough to be meant: few letters apart, or else the
+     * shortest that begins so, as "along_mm" does with "along".
+     */
     public static Optional<String> nearest(String misspelled, Collection<String> known) {
         String wanted = misspelled.toLowerCase(Locale.ROOT);
-        int reach = Math.max(2, wanted.length() / 3);
         if (wanted.length() > 4 * LONGEST) {
             return Optional.empty();
         }
-        LevenshteinDistance distance = new LevenshteinDistance(reach);
-        return known.stream()
+        LevenshteinDistance distance = new LevenshteinDistance(Math.max(2, wanted.length() / 3));
+        Optional<String> near = known.stream()
                 .filter(k -> distance.apply(wanted, k.toLowerCase(Locale.ROOT)) >= 0)
                 .min(Comparator.comparingInt(k -> distance.apply(wanted, k.toLowerCase(Locale.ROOT))));
+        return near.or(() -> known.stream()
+                .filter(k -> wanted.length() > 1 && k.toLowerCase(Locale.ROOT).startsWith(wanted))
+                .min(Comparator.comparingInt(String::length)));
     }
 
     /** "; nearest is \"x\"" or nothing. */

@@ -38,7 +38,7 @@ final class Review {
         if (!(wave >= Design.SHORTEST_WAVE && wave <= Design.LONGEST_WAVE)) {
             add(
                     Subject.DOCUMENT.at("wavelength_nm"),
-                    "found " + Unit.NM.text(wave),
+                    "found " + text(Unit.NM, wave),
                     "a number from " + Unit.NM.text(Design.SHORTEST_WAVE) + " to " + Unit.NM.text(Design.LONGEST_WAVE));
         }
         counts();
@@ -187,7 +187,10 @@ final class Review {
             private void determinant(String plane, FourNumbers m) {
                 double scale = Math.max(1, Math.abs(m.a() * m.d()));
                 if (!(Math.abs(m.determinant() - 1) <= DETERMINANT * scale)) {
-                    add(where.at(plane), "found the determinant " + m.determinant(), "a determinant A D − B C of 1");
+                    add(
+                            where.at(plane),
+                            "found the determinant " + text(Unit.ONE, m.determinant()),
+                            "a determinant A D − B C of 1");
                 }
             }
 
@@ -232,8 +235,12 @@ final class Review {
 
     private void number(Subject where, Field field, Unit unit, double si) {
         if (!field.accepts(si)) {
-            add(where, "found " + (Double.isFinite(si) ? unit.text(si) : si), field.accepted());
+            add(where, "found " + text(unit, si), field.accepted());
         }
+    }
+
+    private static String text(Unit unit, double si) {
+        return Double.isFinite(si) ? unit.text(si) : Double.toString(si);
     }
 
     private void hold(Subject where, Hold hold) {
@@ -390,9 +397,12 @@ final class Review {
     private void tolerance(Subject where, Tolerance tolerance) {
         settings(where, tolerance.set(), tolerance.of());
         if (!(tolerance.plusMinus() >= 0)) {
+            Unit unit = tolerance.relative()
+                    ? Unit.PERCENT
+                    : Field.settableUnit(tolerance.set()).orElse(Unit.ONE);
             add(
                     where.at(tolerance.relative() ? "plus_minus_percent" : "plus_minus"),
-                    "found a negative number",
+                    "found " + text(unit, tolerance.plusMinus()),
                     "0 or a positive number");
         }
     }
@@ -413,9 +423,13 @@ final class Review {
             add(where.at("edge"), "found an edge for " + r.what().json() + ", which has none", "no edge");
         }
         if (r.bound() instanceof Bound.Between b && !(b.low() < b.high())) {
-            add(where.at("between"), "found bounds that are not in order", "two numbers, the smaller first");
+            Unit unit = r.what().unit();
+            add(
+                    where.at("between"),
+                    "found " + text(unit, b.low()) + " before " + text(unit, b.high()),
+                    "two numbers, the smaller first");
         } else if (r.bound() instanceof Bound.Equal e && !(e.within() > 0)) {
-            add(where.at("within"), "found " + r.what().unit().text(e.within()), "a number above 0");
+            add(where.at("within"), "found " + text(r.what().unit(), e.within()), "a number above 0");
         }
         r.over().ifPresent(name -> {
             List<String> levers = design.levers().stream().map(Lever::name).toList();

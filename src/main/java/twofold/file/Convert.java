@@ -60,7 +60,12 @@ final class Convert {
             return refused(where, value, accepted);
         }
         double si = unit.toSi(n.decimal());
-        return Double.isFinite(si) ? Optional.of(si) : refused(where, value, accepted);
+        if (Double.isFinite(si)) {
+            return Optional.of(si);
+        }
+        faults.add(where, value.at(), "found " + value.words() + ", which is too large", accepted);
+        faults.markBroken(where);
+        return Optional.empty();
     }
 
     /** As many finite numbers as units. */

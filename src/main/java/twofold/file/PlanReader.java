@@ -22,8 +22,8 @@ import twofold.layout.Typed;
 
 /** Lays a draft out, typed mirrors first, and finds what is wrong with its plan wherever the plan can be trusted. */
 final class PlanReader {
-    /** What decides where the beam runs; all other fields may be wrong without any doubt about the plan. */
-    private static final Set<Field> GEOMETRY = Set.of(
+    /** What decides where the beam runs at a part; all other fields may be wrong without any doubt about the plan. */
+    private static final Set<Field> COURSE = Set.of(
             Field.AT,
             Field.ALONG,
             Field.ACROSS,
@@ -31,14 +31,9 @@ final class PlanReader {
             Field.BOX,
             Field.INDEX,
             Field.MATERIAL,
-            Field.TILT,
             Field.FACES,
             Field.TILT_PLANE,
-            Field.SIDE,
-            Field.LEG,
-            Field.INCIDENCE,
-            Field.TURN,
-            Field.HEADING);
+            Field.SIDE);
 
     /** A leg that stands in for one that is too short: longer than anything on it. */
     private static final double LONG = 1e5;
@@ -93,7 +88,7 @@ final class PlanReader {
         boolean needsWavelength =
                 part.values().states(Field.MATERIAL) && !part.values().states(Field.INDEX);
         return faults.isBroken(Subject.part(index))
-                || part.kind().fields().stream().anyMatch(f -> GEOMETRY.contains(f) && isBroken(index, f))
+                || part.kind().fields().stream().anyMatch(f -> COURSE.contains(f) && isBroken(index, f))
                 || (needsWavelength && faults.isBroken(Subject.DOCUMENT.at("wavelength_nm")));
     }
 
@@ -145,24 +140,47 @@ final class PlanReader {
                     problems.addAll(placed.problems());
                     return false;
                 }
-                if (!distrusted.contains(part)) {
-                    problems.add(problem);
-                }
-                distrusted.add(part);
+                problems.add(problem);
+                faults.markBroken(problem.where());
                 typed.put(part, new Typed(OptionalDouble.of(LONG), t.incidence(), t.turn(), t.heading()));
             }
             placed = Layout.typed(design, typed);
         }
         design = placed.value().get();
-        // Every typed mirror behind something doubtful stands at a doubtful place.
-        boolean doubt = false;
-        for (int i = 0; i < design.parts().size(); i++) {
-            doubt |= distrusted.contains(i);
-            if (doubt && design.parts().get(i) instanceof Mirror && typed.containsKey(i)) {
-                distrusted.add(i);
-            }
-        }
+        doubt();
         return true;
+    }
+
+    /**
+     * Distrusts what rests on typed values that are broken. Behind such a value every typed mirror stands at a doubtful
+     * place, but in the right way to the mirrors typed before and after it; so in doubt are only the parts on a broken
+     * leg, and the last typed mirror before one with a position.
+     */
+    private void doubt() {
+        boolean doubt = false;
+        int before = -1;
+        List<Integer> between = new ArrayList<>();
+        for (int i = 0; i < design.parts().size(); i++) {
+            if (!(design.parts().get(i) instanceof Mirror)) {
+                between.add(i);
+                doubt |= distrusted.contains(i);
+                continue;
+            }
+            Typed t = typed.get(i);
+            boolean byLeg = t != null && t.leg().isPresent();
+            if (byLeg && isBroken(i, Field.LEG)) {
+                distrusted.addAll(between);
+                doubt = true;
+            } else if (!byLeg) {
+                if (doubt && before >= 0) {
+                    distrusted.add(before);
+                }
+                doubt = distrusted.contains(i);
+            }
+            doubt |= isBroken(i, Field.INCIDENCE) || isBroken(i, Field.TURN) || isBroken(i, Field.HEADING);
+            before = byLeg ? i : -1;
+            between.clear();
+        }
     }
 
     /** The index of the part that a problem is about; −1 for none. */

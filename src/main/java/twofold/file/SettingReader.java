@@ -144,6 +144,8 @@ final class SettingReader {
         }
         if (!span) {
             members.lacking("found neither from and to nor among", "one of them");
+            faults.markBroken(where.at("from"));
+            faults.markBroken(where.at("to"));
             return Optional.empty();
         }
         Optional<Double> from =

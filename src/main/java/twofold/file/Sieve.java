@@ -1,11 +1,13 @@
 package twofold.file;
 
+import java.util.Arrays;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.stream.Stream;
 import twofold.design.Design;
+import twofold.design.Field;
 import twofold.design.Hold;
 import twofold.design.Part;
 import twofold.design.Place;
@@ -21,8 +23,7 @@ final class Sieve {
     private static final Map<String, List<String>> LOOKS_AT = Map.of(
             "transmittance", List.of("reflectance"),
             "side", List.of("tilt_plane"),
-            "incidence_deg", List.of("index", "material"),
-            "to", List.of("from"));
+            "incidence_deg", List.of("index", "material"));
 
     /** Fields whose checks look at no part. */
     private static final Set<String> ALONE =
@@ -78,7 +79,9 @@ final class Sieve {
         }
         int index = Integer.parseInt(steps.get(1).substring(1, steps.get(1).length() - 1));
         String field = steps.size() > 2 ? steps.get(2) : "";
-        if (LOOKS_AT.getOrDefault(field, List.of()).stream().anyMatch(f -> isBroken(list, index, f))) {
+        boolean restsOnStandIn =
+                LOOKS_AT.getOrDefault(field, List.of()).stream().anyMatch(f -> isBroken(list, index, f));
+        if (restsOnStandIn && !isOutOfRange(field, problem)) {
             return false;
         }
         return switch (list) {
@@ -86,6 +89,12 @@ final class Sieve {
             case "requirements" -> field.equals("over") ? leversAreKnown : keeps(field, names(list, index));
             default -> keeps(field, names(list, index));
         };
+    }
+
+    /** Whether a problem is a field's own. */
+    private static boolean isOutOfRange(String name, Problem problem) {
+        return Arrays.stream(Field.values())
+                .anyMatch(f -> f.json().equals(name) && f.accepted().equals(problem.accepted()));
     }
 
     private boolean keeps(String field, Stream<String> used) {

@@ -49,8 +49,8 @@ record SyntaxFault(long offset, String found, String accepted) {
         long offset = location == null ? parser.currentLocation().getCharOffset() : location.getCharOffset();
         JsonStreamContext context = parser.getParsingContext();
         String said = fault.getOriginalMessage();
-        if (said.contains("white space")) {
-            // Of this fault alone the parser gives the place behind.
+        if (said.contains("white space") || said.contains("plus sign")) {
+            // Of these faults the parser gives the place behind.
             offset--;
         }
         if (said.contains("end-of-input") || offset >= text.length()) {

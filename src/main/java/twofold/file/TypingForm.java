@@ -96,17 +96,23 @@ final class TypingForm {
         position(k, members);
         heading(k, members);
         angles(k, members);
-        if (FIELDS.stream().map(Field::json).anyMatch(members::has)) {
-            int index = mirrors.get(k);
-            typed.put(
-                    index,
-                    new Typed(
-                            k > 0 && !members.has(AT) ? number(index, Field.LEG) : OptionalDouble.empty(),
-                            number(index, Field.INCIDENCE),
-                            Optional.ofNullable(
-                                    (Turn) drafts.get(index).otherForms().get(Field.TURN)),
-                            number(index, Field.HEADING)));
+        int index = mirrors.get(k);
+        OptionalDouble leg = k > 0 && !members.has(AT) ? number(index, Field.LEG) : OptionalDouble.empty();
+        OptionalDouble incidence = number(index, Field.INCIDENCE);
+        if (incidence.isEmpty() && laysOutNext(k)) {
+            incidence = OptionalDouble.of((Double) Field.INCIDENCE.standIn());
         }
+        Optional<Turn> turn =
+                Optional.ofNullable((Turn) drafts.get(index).otherForms().get(Field.TURN));
+        OptionalDouble heading = number(index, Field.HEADING);
+        if (leg.isPresent() || incidence.isPresent() || turn.isPresent() || heading.isPresent()) {
+            typed.put(index, new Typed(leg, incidence, turn, heading));
+        }
+    }
+
+    /** Whether a mirror's angles lay out the next leg. */
+    private boolean laysOutNext(int k) {
+        return k > 0 && gives(k + 1, Field.LEG);
     }
 
     private OptionalDouble number(int index, Field field) {
@@ -155,7 +161,7 @@ final class TypingForm {
         if (!neighboursAreKnown) {
             return;
         }
-        if (k > 0 && gives(k + 1, Field.LEG)) {
+        if (laysOutNext(k)) {
             if (!members.has(incidence)) {
                 members.missing(incidence, Field.INCIDENCE.accepted() + ", since the next mirror gives leg_mm");
             }
