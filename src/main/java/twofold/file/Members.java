@@ -94,10 +94,11 @@ final class Members {
                     member.keyAt(),
                     "found \"" + Names.shown(key) + "\", which " + what + " does not have" + Names.hint(key, known),
                     String.join(", ", known));
-            // What was probably meant is not absent, so that nothing may be concluded from its absence.
-            Names.nearest(key, known)
-                    .filter(meant -> !has(meant))
-                    .ifPresent(meant -> faults.markBroken(where.at(meant)));
+            // What was meant is not absent, so that nothing may be concluded from its absence.
+            Optional<String> nearest = Names.nearest(key, known);
+            known.stream()
+                    .filter(k -> !has(k) && (nearest.isEmpty() || nearest.get().equals(k)))
+                    .forEach(k -> faults.markBroken(where.at(k)));
         });
     }
 

@@ -1,5 +1,6 @@
 package twofold.file;
 
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
@@ -21,6 +22,10 @@ final class PartReader {
     private static final List<String> KIND_WORDS =
             KINDS.stream().map(Kind::word).toList();
     private static final List<String> HEAD = List.of("name", "kind");
+
+    /** Every key that some part has. */
+    private static final List<String> KEYS =
+            Members.keys(HEAD, Arrays.stream(Field.values()).map(Field::json).distinct());
 
     private final Faults faults;
     private final Convert convert;
@@ -67,7 +72,11 @@ final class PartReader {
         Optional<Json> word = members.need("kind", Convert.quoted(KIND_WORDS));
         Optional<Kind> kind = word.flatMap(v -> convert.word(where.at("kind"), v, Kind.values(), Kind::word))
                 .or(() -> word.flatMap(PartReader::guess));
-        return kind.map(k -> fields(index, name, k, members)).orElseGet(() -> standIn(name));
+        if (kind.isEmpty()) {
+            members.refuseUnknown("a part", KEYS);
+            return standIn(name);
+        }
+        return fields(index, name, kind.get(), members);
     }
 
     /** The kind that a misspelt word probably means. */

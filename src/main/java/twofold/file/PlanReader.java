@@ -35,8 +35,11 @@ final class PlanReader {
             Field.TILT_PLANE,
             Field.SIDE);
 
-    /** A leg that stands in for one that is too short: longer than anything on it. */
+    /** A leg that stands in for one that is too short, m: longer than anything on it. */
     private static final double LONG = 1e5;
+
+    /** A length that stands in for an unreadable one, m. */
+    private static final double SHORT = 1e-12;
 
     private final Faults faults;
     private final Map<Integer, Typed> typed;
@@ -103,7 +106,7 @@ final class PlanReader {
                     values = values.with(field, PartReader.far(i));
                 } else if (values.states(field) && isBroken(i, field)) {
                     values = field.need() == Field.Need.REQUIRED
-                            ? values.with(field, field.standIn())
+                            ? values.with(field, standIn(field))
                             : values.without(field);
                 }
             }
@@ -116,6 +119,11 @@ final class PlanReader {
         }
         boolean wave = faults.isBroken(Subject.DOCUMENT.at("wavelength_nm"));
         return Design.of("", wave ? 1e-6 : design.wavelength(), design.shape(), parts);
+    }
+
+    /** A legal value; a length so short that it leaves room on any leg. */
+    private static Object standIn(Field field) {
+        return field.form() == Field.Form.POSITIVE ? (Object) SHORT : field.standIn();
     }
 
     /** Puts typed mirrors at their places; false where that cannot be done. */

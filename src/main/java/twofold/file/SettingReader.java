@@ -91,12 +91,16 @@ final class SettingReader {
                 .orElse(PartReader.NAMELESS + index);
         String set = set(members);
         List<Place> of = of(members);
-        Lever.Range range = range(members, unit(set)).orElse(still);
+        Optional<Lever.Range> range = range(members, unit(set));
+        if (range.isEmpty()) {
+            faults.markBroken(where.at("from"));
+            faults.markBroken(where.at("to"));
+        }
         boolean adjuster = members.find("adjuster")
                 .flatMap(v -> convert.flag(where.at("adjuster"), v))
                 .orElse(false);
         members.refuseUnknown("a lever", LEVER);
-        return new Lever(name, set, of, range, adjuster);
+        return new Lever(name, set, of, range.orElse(still), adjuster);
     }
 
     private String set(Members members) {
@@ -144,8 +148,6 @@ final class SettingReader {
         }
         if (!span) {
             members.lacking("found neither from and to nor among", "one of them");
-            faults.markBroken(where.at("from"));
-            faults.markBroken(where.at("to"));
             return Optional.empty();
         }
         Optional<Double> from =

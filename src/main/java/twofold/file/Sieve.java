@@ -1,18 +1,22 @@
 package twofold.file;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.stream.Stream;
+import twofold.design.Along;
 import twofold.design.Design;
 import twofold.design.Field;
 import twofold.design.Hold;
+import twofold.design.Kind;
 import twofold.design.Part;
 import twofold.design.Place;
 import twofold.design.Problem;
 import twofold.design.Subject;
+import twofold.design.Values;
 
 /**
  * Tells the problems of a draft that are the file's own from those which only come from what stands in for unreadable
@@ -36,6 +40,8 @@ final class Sieve {
     private final Set<String> names = new HashSet<>();
     private final Set<String> ofUnknownKind = new HashSet<>();
     private final boolean someAreNameless;
+    private final List<Problem> ifAllAreMirrors;
+    private final List<Problem> ifNoneAreMirrors;
 
     Sieve(DocumentReader.Draft draft, Faults faults) {
         this.design = draft.design();
@@ -56,6 +62,31 @@ final class Sieve {
             levers &= !isBroken("levers", i, "name");
         }
         leversAreKnown = levers;
+        ifAllAreMirrors = problemsIf(Kind.MIRROR);
+        ifNoneAreMirrors = problemsIf(Kind.APERTURE);
+    }
+
+    /** What would be wrong if all parts of unknown kind were of a given one; which mirrors a leg joins hangs on it. */
+    private List<Problem> problemsIf(Kind kind) {
+        if (ofUnknownKind.isEmpty()) {
+            return List.of();
+        }
+        List<Part> parts = new ArrayList<>(design.parts());
+        for (int i = 0; i < parts.size(); i++) {
+            if (isBroken("parts", i, "kind")) {
+                Values values = Values.NONE.with(Field.AT, PartReader.far(i)).with(Field.ALONG, Along.MIDDLE);
+                parts.set(i, kind.part(parts.get(i).name(), values));
+            }
+        }
+        return design.withParts(parts).problems();
+    }
+
+    private boolean isThereWhateverTheKinds(Problem problem) {
+        return ofUnknownKind.isEmpty()
+                || Stream.of(ifAllAreMirrors, ifNoneAreMirrors)
+                        .allMatch(all -> all.stream()
+                                .anyMatch(p -> p.where().equals(problem.where())
+                                        && p.found().equals(problem.found())));
     }
 
     private boolean isBroken(String list, int index, String field) {
@@ -86,8 +117,8 @@ final class Sieve {
         }
         return switch (list) {
             case "parts" -> !field.equals("kind") || partsAreKnown;
-            case "requirements" -> field.equals("over") ? leversAreKnown : keeps(field, names(list, index));
-            default -> keeps(field, names(list, index));
+            case "requirements" -> field.equals("over") ? leversAreKnown : keeps(field, names(list, index), problem);
+            default -> keeps(field, names(list, index), problem);
         };
     }
 
@@ -97,11 +128,12 @@ final class Sieve {
                 .anyMatch(f -> f.json().equals(name) && f.accepted().equals(problem.accepted()));
     }
 
-    private boolean keeps(String field, Stream<String> used) {
+    private boolean keeps(String field, Stream<String> used, Problem problem) {
         return field.isEmpty()
                 || ALONE.contains(field)
                 || (partsAreKnown
-                        && used.noneMatch(n -> ofUnknownKind.contains(n) || (someAreNameless && !names.contains(n))));
+                        && used.noneMatch(n -> ofUnknownKind.contains(n) || (someAreNameless && !names.contains(n)))
+                        && isThereWhateverTheKinds(problem));
     }
 
     /** The names of parts that an element of a list uses. */

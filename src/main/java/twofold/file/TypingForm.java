@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 import twofold.design.Field;
 import twofold.design.Mirror;
@@ -76,6 +77,13 @@ final class TypingForm {
         return members != null && members.has(field.json());
     }
 
+    /** Whether a mirror gives a leg, or may have meant to. */
+    private boolean mayGiveLeg(int k) {
+        return k < mirrors.size()
+                && (gives(k, Field.LEG)
+                        || faults.isBroken(Subject.part(mirrors.get(k)).at(Field.LEG.json())));
+    }
+
     private void ring(Members members) {
         for (Field field : FIELDS) {
             if (members.has(field.json())) {
@@ -132,9 +140,7 @@ final class TypingForm {
             faults.markBroken(members.where().at(AT));
         } else if (!leg && !members.has(AT)) {
             int index = mirrors.get(k);
-            boolean othersAreTyped =
-                    mirrors.stream().anyMatch(m -> drafts.get(m).otherForms().containsKey(Field.LEG));
-            if (k == 0 && othersAreTyped) {
+            if (k == 0 && IntStream.range(1, mirrors.size()).anyMatch(this::mayGiveLeg)) {
                 drafts.set(index, drafts.get(index).at(new Point(0, 0)));
             } else {
                 members.missing(AT, Field.AT.accepted() + (k == 0 ? "" : "; or leg_mm instead"));
@@ -149,7 +155,7 @@ final class TypingForm {
         }
         if (k > 0) {
             members.misplaced(key, "found " + key + " away from the first mirror", "it on the first mirror alone");
-        } else if (!gives(1, Field.LEG)) {
+        } else if (!mayGiveLeg(1)) {
             members.misplaced(
                     key, "found " + key + ", but the second mirror gives no leg_mm", "it before a typed leg alone");
         }
@@ -172,6 +178,9 @@ final class TypingForm {
             return;
         }
         boolean isEnd = k == 0 || k == mirrors.size() - 1;
+        if (!isEnd && mayGiveLeg(k + 1)) {
+            return;
+        }
         for (String key : members.among(List.of(incidence, turn))) {
             members.misplaced(
                     key,

@@ -55,7 +55,7 @@ class MutationPropertyTest {
             designs += check(copy) ? 1 : 0;
         }
         // Enough that both outcomes are tried.
-        assertThat(designs).isBetween(COPIES / 20, COPIES * 19 / 20);
+        assertThat(designs).isBetween(COPIES / 10, COPIES * 9 / 10);
     }
 
     private static boolean check(byte[] bytes) {
@@ -83,7 +83,7 @@ class MutationPropertyTest {
     }
 
     private byte[] mutated(byte[] bytes) {
-        int kind = random.nextInt(7);
+        int kind = random.nextInt(10);
         if (kind < 3) {
             return bytewise(bytes, kind);
         }
@@ -95,6 +95,11 @@ class MutationPropertyTest {
         }
         MatchResult one = tokens.get(random.nextInt(tokens.size()));
         MatchResult other = tokens.get(random.nextInt(tokens.size()));
+        if (kind > 6 && Character.isDigit(text.charAt(one.end() - 1))) {
+            // Another last digit: mostly a design still.
+            return (text.substring(0, one.end() - 1) + random.nextInt(10) + text.substring(one.end()))
+                    .getBytes(StandardCharsets.UTF_8);
+        }
         if (kind == 4 || kind == 6) {
             String value = VALUES[random.nextInt(VALUES.length)];
             return (text.substring(0, one.start()) + value + text.substring(one.end()))
