@@ -66,13 +66,13 @@ final class PlanReader {
     }
 
     private Outcome<Design> plan() {
-        if (!faults.isEmpty()) {
-            design = legal();
-        }
         for (int i = 0; i < design.parts().size(); i++) {
             if (isDoubtful(i)) {
                 distrusted.add(i);
             }
+        }
+        if (!faults.isEmpty()) {
+            design = legal();
         }
         if (!typed.isEmpty() && !place()) {
             return new Outcome<>(Optional.empty(), problems);
@@ -111,7 +111,7 @@ final class PlanReader {
                 }
             }
             boolean needsIndex = part.kind().isSlab() || values.states(Field.MATERIAL);
-            if (needsIndex && !values.states(Field.INDEX) && isDoubtful(i)) {
+            if (needsIndex && !values.states(Field.INDEX) && distrusted.contains(i)) {
                 values = values.with(Field.INDEX, Field.INDEX.standIn());
             }
             boolean nameless = faults.isBroken(Subject.part(i).at("name"));

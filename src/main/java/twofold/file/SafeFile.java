@@ -26,6 +26,8 @@ public final class SafeFile {
     /** Links that are followed before they count as a circle. */
     private static final int MOST_LINKS = 40;
 
+    private static final String FOLDER = "it is a folder";
+
     private SafeFile() {}
 
     /**
@@ -35,15 +37,15 @@ public final class SafeFile {
      * @throws IOException with a message for a person
      */
     public static byte[] read(Path file, int most) throws IOException {
-        if (Files.isDirectory(file)) {
-            throw new IOException(file + ": is a folder, not a file");
-        }
-        try (InputStream in = Files.newInputStream(file)) {
-            return in.readNBytes(most);
-        } catch (NoSuchFileException e) {
-            throw new IOException(file + ": there is no such file", e);
+        try {
+            if (Files.isDirectory(file)) {
+                throw refusal(file, FOLDER);
+            }
+            try (InputStream in = Files.newInputStream(file)) {
+                return in.readNBytes(most);
+            }
         } catch (IOException e) {
-            throw new IOException(file + ": cannot be read" + reason(e), e);
+            throw new IOException(file + ": cannot be read: " + reason(e), e);
         }
     }
 
@@ -57,7 +59,7 @@ public final class SafeFile {
         try {
             Path target = followed(file.toAbsolutePath());
             if (Files.isDirectory(target)) {
-                throw new IOException(file + ": is a folder, not a file");
+                throw refusal(target, FOLDER);
             }
             if (Files.exists(target) && !Files.isRegularFile(target)) {
                 // A pipe or a device cannot be replaced, nor does it hold anything that could be lost.
@@ -65,16 +67,20 @@ public final class SafeFile {
                 return;
             }
             if (Files.exists(target) && !Files.isWritable(target)) {
-                throw new IOException(file + ": is write-protected");
+                throw refusal(target, "it is write-protected");
             }
             Path folder = target.getParent();
             if (folder == null || !Files.isDirectory(folder)) {
-                throw new IOException(file + ": there is no folder " + folder);
+                throw refusal(target, "there is no folder " + folder);
             }
             replace(target, folder, bytes);
-        } catch (FileSystemException e) {
-            throw new IOException(file + ": cannot be written" + reason(e), e);
+        } catch (IOException e) {
+            throw new IOException(file + ": cannot be written: " + reason(e), e);
         }
+    }
+
+    private static FileSystemException refusal(Path file, String reason) {
+        return new FileSystemException(file.toString(), null, reason);
     }
 
     private static Path followed(Path file) throws IOException {
@@ -124,18 +130,20 @@ public final class SafeFile {
                 return Files.createFile(beside);
             }
         }
-        throw new FileSystemException(
-                folder.toString(), null, "there are " + MOST_TRIES + " unfinished copies of it in its folder");
+        throw refusal(folder, "there are " + MOST_TRIES + " unfinished copies of it in its folder");
     }
 
     private static String reason(IOException e) {
+        if (e instanceof NoSuchFileException) {
+            return "there is no such file";
+        }
         if (e instanceof AccessDeniedException) {
-            return ": permission denied";
+            return "permission denied";
         }
         if (e instanceof FileSystemLoopException) {
-            return ": its symbolic links go in a circle";
+            return "its symbolic links go in a circle";
         }
-        String reason = e instanceof FileSystemException f ? f.getReason() : e.getMessage();
-        return reason == null ? "" : ": " + reason;
+        String reason = e instanceof FileSystemException f && f.getReason() != null ? f.getReason() : e.getMessage();
+        return reason == null ? e.getClass().getSimpleName() : reason;
     }
 }

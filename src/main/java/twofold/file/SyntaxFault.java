@@ -38,12 +38,15 @@ record SyntaxFault(long offset, String found, String accepted) {
             new Meaning("comment", "a value: JSON has no comments"),
             new Meaning("white space", "spaces, tabs and line breaks between values"));
 
+    /** What numbers are written with. */
+    private static final String NUMBER = "0123456789+-.eE";
+
     private record Meaning(String said, String accepted) {}
 
     /** What a fault comes to. */
     static SyntaxFault of(JsonProcessingException fault, JsonParser parser, String text) {
         if (fault instanceof StreamConstraintsException) {
-            return limit(fault, parser);
+            return limit(fault, parser, text);
         }
         JsonLocation location = fault.getLocation();
         long offset = location == null ? parser.currentLocation().getCharOffset() : location.getCharOffset();
@@ -65,17 +68,19 @@ record SyntaxFault(long offset, String found, String accepted) {
         return new SyntaxFault(offset, found, meaning(said));
     }
 
-    private static SyntaxFault limit(JsonProcessingException fault, JsonParser parser) {
+    private static SyntaxFault limit(JsonProcessingException fault, JsonParser parser, String text) {
+        int offset = (int) Math.min(parser.currentLocation().getCharOffset(), text.length());
         if (fault.getOriginalMessage().contains("nesting")) {
             return new SyntaxFault(
-                    parser.currentLocation().getCharOffset() - 1,
+                    offset - 1L,
                     "found lists and objects nested too deep",
                     "at most " + JsonText.DEEPEST + " inside each other");
         }
+        while (offset > 0 && NUMBER.indexOf(text.charAt(offset - 1)) >= 0) {
+            offset--;
+        }
         return new SyntaxFault(
-                parser.currentTokenLocation().getCharOffset(),
-                "found a number that is too long",
-                "at most " + JsonText.LONGEST_NUMBER + " characters");
+                offset, "found a number that is too long", "at most " + JsonText.LONGEST_NUMBER + " characters");
     }
 
     private static String rest(String said, JsonStreamContext context) {

@@ -2,10 +2,12 @@ package twofold.file;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import com.fasterxml.jackson.core.io.JsonStringEncoder;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
+import twofold.RandomDesigns;
 import twofold.design.Subject;
 
 /** One fault in a file is one problem: what stands in for an unreadable value causes no others. */
@@ -57,7 +59,9 @@ class SingleFaultPropertyTest {
                 }
                 text.append(']');
             } else if (json instanceof Json.Str s) {
-                text.append('"').append(s.text()).append('"');
+                text.append('"')
+                        .append(JsonStringEncoder.getInstance().quoteAsString(s.text()))
+                        .append('"');
             } else {
                 text.append(json.words());
             }
@@ -69,8 +73,12 @@ class SingleFaultPropertyTest {
     }
 
     private static List<Spoiled> all(boolean keys) {
+        List<String> texts = new ArrayList<>(Texts.all());
+        for (long seed = 1; seed <= 8; seed++) {
+            texts.add(DesignWriter.text(RandomDesigns.of(seed)));
+        }
         List<Spoiled> all = new ArrayList<>();
-        for (String text : Texts.all()) {
+        for (String text : texts) {
             Json root = tree(text);
             for (int n = 0; ; n++) {
                 Spoiled spoiled = new Spoiled(root, keys, n);
