@@ -8,6 +8,7 @@ import static twofold.design.Kind.MIRROR;
 import static twofold.design.Kind.PLATE;
 
 import java.util.Arrays;
+import java.util.Collections;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
@@ -21,7 +22,7 @@ import org.jspecify.annotations.Nullable;
  *
  * <p>Two constants share a JSON name where two kinds mean different things by it or differ in default.
  */
-@SuppressWarnings("ImmutableEnumChecker") // the defaults are records, the set of kinds never leaves
+@SuppressWarnings("ImmutableEnumChecker") // the defaults are records, the set of kinds cannot be changed
 public enum Field {
     /** Position of a mirror's vertex. */
     AT("at_mm", Unit.MM, Form.POINT, -1e6, 1e6, Need.REQUIRED, null, "position on the table, [x, y]", MIRROR),
@@ -354,7 +355,7 @@ public enum Field {
         this.need = need;
         this.fallback = fallback;
         this.doc = doc;
-        this.kinds = EnumSet.of(first, more);
+        this.kinds = Collections.unmodifiableSet(EnumSet.of(first, more));
     }
 
     /** The name in a file, with its unit. */
@@ -389,7 +390,7 @@ public enum Field {
 
     /** The kinds of part that have it. */
     public Set<Kind> kinds() {
-        return Set.copyOf(kinds);
+        return kinds;
     }
 
     /**

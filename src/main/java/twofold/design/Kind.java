@@ -2,7 +2,9 @@ package twofold.design;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /** The kinds of part, with their words in a file. */
 public enum Kind {
@@ -32,9 +34,17 @@ public enum Kind {
 
     /** The fields of this kind, in the order in which they are written; the typing form's fields of a mirror last. */
     public List<Field> fields() {
-        return Arrays.stream(Field.values())
-                .filter(f -> f.kinds().contains(this))
-                .toList();
+        return Fields.OF.getOrDefault(this, List.of());
+    }
+
+    /** Made once, when first asked for: the fields know the kinds. */
+    private static final class Fields {
+        static final Map<Kind, List<Field>> OF = Arrays.stream(Kind.values())
+                .collect(Collectors.toUnmodifiableMap(
+                        k -> k,
+                        k -> Arrays.stream(Field.values())
+                                .filter(f -> f.kinds().contains(k))
+                                .toList()));
     }
 
     /** The field of this kind with a JSON name. */

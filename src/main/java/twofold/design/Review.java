@@ -23,13 +23,18 @@ final class Review {
     private final Design design;
     private final List<Part> parts;
     private final Map<String, Part> byName = new HashMap<>();
+    private final List<String> names;
     private final List<String> mirrors;
+    /** The parts that have a settable field, by its name. */
+    private final Map<String, List<String>> having = new HashMap<>();
+
     private final List<Problem> found = new ArrayList<>();
 
     Review(Design design) {
         this.design = design;
         this.parts = design.parts();
         parts.forEach(p -> byName.putIfAbsent(p.name(), p));
+        names = parts.stream().map(Part::name).distinct().toList();
         mirrors = design.mirrors().stream().map(Part::name).toList();
     }
 
@@ -340,11 +345,13 @@ final class Review {
     }
 
     private void settable(Subject where, String set, String name) {
-        List<String> fitting = parts.stream()
-                .filter(p -> p.kind().field(set).filter(Field::isSettable).isPresent())
-                .map(Part::name)
-                .toList();
-        Part part = known(where, name, fitting.isEmpty() ? List.copyOf(byName.keySet()) : fitting);
+        List<String> fitting = having.computeIfAbsent(
+                set,
+                s -> parts.stream()
+                        .filter(p -> p.kind().field(s).filter(Field::isSettable).isPresent())
+                        .map(Part::name)
+                        .toList());
+        Part part = known(where, name, fitting.isEmpty() ? names : fitting);
         if (part == null) {
             return;
         }
@@ -474,7 +481,7 @@ final class Review {
         } else if (pair) {
             stretch(here, place);
         } else {
-            known(here, place.first(), List.copyOf(byName.keySet()));
+            known(here, place.first(), names);
         }
     }
 
@@ -487,8 +494,8 @@ final class Review {
     private void stretch(Subject where, Place place) {
         String a = place.first();
         String b = place.second().orElseThrow();
-        Part first = known(where.at(0), a, List.copyOf(byName.keySet()));
-        Part second = known(where.at(1), b, List.copyOf(byName.keySet()));
+        Part first = known(where.at(0), a, names);
+        Part second = known(where.at(1), b, names);
         if (first == null || second == null) {
             return;
         }

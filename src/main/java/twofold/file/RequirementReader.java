@@ -76,7 +76,7 @@ final class RequirementReader {
         String key = given.get(0);
         given.stream().skip(1).forEach(k -> members.misplaced(k, "found " + k + " beside " + key, ONE_BOUND));
         if (members.has("within") && !given.contains("equals")) {
-            members.misplaced("within", "found within without equals", "within beside equals alone");
+            members.misplaced("within", "found within without equals", "only beside equals");
         }
         Subject where = members.where().at(key);
         Json value = members.find(key).orElseThrow();

@@ -2,10 +2,12 @@ package twofold.file;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import twofold.design.Along;
 import twofold.design.Design;
@@ -40,8 +42,9 @@ final class Sieve {
     private final Set<String> names = new HashSet<>();
     private final Set<String> ofUnknownKind = new HashSet<>();
     private final boolean someAreNameless;
-    private final List<Problem> ifAllAreMirrors;
-    private final List<Problem> ifNoneAreMirrors;
+    private final Set<String> ifAllAreMirrors;
+    private final Set<String> ifNoneAreMirrors;
+    private final Map<Subject, Boolean> doubtful = new HashMap<>();
 
     Sieve(DocumentReader.Draft draft, Faults faults) {
         this.design = draft.design();
@@ -67,9 +70,9 @@ final class Sieve {
     }
 
     /** What would be wrong if all parts of unknown kind were of a given one; which mirrors a leg joins hangs on it. */
-    private List<Problem> problemsIf(Kind kind) {
+    private Set<String> problemsIf(Kind kind) {
         if (ofUnknownKind.isEmpty()) {
-            return List.of();
+            return Set.of();
         }
         List<Part> parts = new ArrayList<>(design.parts());
         for (int i = 0; i < parts.size(); i++) {
@@ -78,15 +81,17 @@ final class Sieve {
                 parts.set(i, kind.part(parts.get(i).name(), values));
             }
         }
-        return design.withParts(parts).problems();
+        return design.withParts(parts).problems().stream().map(Sieve::found).collect(Collectors.toSet());
+    }
+
+    /** What was found where; what would be accepted may differ with the kinds. */
+    private static String found(Problem problem) {
+        return problem.where() + ": " + problem.found();
     }
 
     private boolean isThereWhateverTheKinds(Problem problem) {
         return ofUnknownKind.isEmpty()
-                || Stream.of(ifAllAreMirrors, ifNoneAreMirrors)
-                        .allMatch(all -> all.stream()
-                                .anyMatch(p -> p.where().equals(problem.where())
-                                        && p.found().equals(problem.found())));
+                || (ifAllAreMirrors.contains(found(problem)) && ifNoneAreMirrors.contains(found(problem)));
     }
 
     private boolean isBroken(String list, int index, String field) {
@@ -117,8 +122,8 @@ final class Sieve {
         }
         return switch (list) {
             case "parts" -> !field.equals("kind") || partsAreKnown;
-            case "requirements" -> field.equals("over") ? leversAreKnown : keeps(field, names(list, index), problem);
-            default -> keeps(field, names(list, index), problem);
+            case "requirements" -> field.equals("over") ? leversAreKnown : keepsReference(problem, list, index, field);
+            default -> keepsReference(problem, list, index, field);
         };
     }
 
@@ -128,12 +133,18 @@ final class Sieve {
                 .anyMatch(f -> f.json().equals(name) && f.accepted().equals(problem.accepted()));
     }
 
-    private boolean keeps(String field, Stream<String> used, Problem problem) {
+    private boolean keepsReference(Problem problem, String list, int index, String field) {
         return field.isEmpty()
                 || ALONE.contains(field)
-                || (partsAreKnown
-                        && used.noneMatch(n -> ofUnknownKind.contains(n) || (someAreNameless && !names.contains(n)))
-                        && isThereWhateverTheKinds(problem));
+                || (partsAreKnown && !isDoubtful(list, index) && isThereWhateverTheKinds(problem));
+    }
+
+    /** Whether an element uses a part of unknown kind, or a name that one of the nameless parts may have. */
+    private boolean isDoubtful(String list, int index) {
+        return doubtful.computeIfAbsent(
+                Subject.DOCUMENT.at(list).at(index),
+                here -> names(list, index)
+                        .anyMatch(n -> ofUnknownKind.contains(n) || (someAreNameless && !names.contains(n))));
     }
 
     /** The names of parts that an element of a list uses. */

@@ -154,10 +154,10 @@ final class TypingForm {
             return;
         }
         if (k > 0) {
-            members.misplaced(key, "found " + key + " away from the first mirror", "it on the first mirror alone");
+            members.misplaced(key, "found " + key + " away from the first mirror", "only on the first mirror");
         } else if (!mayGiveLeg(1)) {
             members.misplaced(
-                    key, "found " + key + ", but the second mirror gives no leg_mm", "it before a typed leg alone");
+                    key, "found " + key + ", but the second mirror gives no leg_mm", "only before a typed leg");
         }
     }
 
@@ -185,7 +185,7 @@ final class TypingForm {
             members.misplaced(
                     key,
                     "found " + key + (isEnd ? " at an end mirror" : ", but the next mirror gives no leg_mm"),
-                    isEnd ? "it at inner mirrors alone" : "nothing: it follows from the plan");
+                    isEnd ? "only at inner mirrors" : "nothing: it follows from the plan");
         }
     }
 }
