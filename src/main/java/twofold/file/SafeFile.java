@@ -16,8 +16,8 @@ import java.nio.file.attribute.PosixFileAttributeView;
 
 /**
  * Reading and replacing files so that nothing is lost: a file is written beside the old one, flushed to the disk and
- * moved over it, so that at every moment the old or the new one is there, whole. Messages of exceptions are for a
- * person and name the file.
+ * moved over it, so that at every moment the old or the new one is there, whole. Messages of exceptions say why, for
+ * a person, and leave it to the caller to name the file.
  */
 public final class SafeFile {
     /** Names for the file beside that are tried before giving up. */
@@ -45,7 +45,7 @@ public final class SafeFile {
                 return in.readNBytes(most);
             }
         } catch (IOException e) {
-            throw new IOException(file + ": cannot be read: " + reason(e), e);
+            throw new IOException(reason(e), e);
         }
     }
 
@@ -75,7 +75,7 @@ public final class SafeFile {
             }
             replace(target, folder, bytes);
         } catch (IOException e) {
-            throw new IOException(file + ": cannot be written: " + reason(e), e);
+            throw new IOException(reason(e), e);
         }
     }
 
