@@ -45,7 +45,7 @@ final class Faults {
 
     /** Whether the design's value at a place, or at one that holds it, only stands in for one that cannot be used. */
     boolean isBroken(Subject where) {
-        for (int length = where.steps().size(); length >= 0; length--) {
+        for (int length = broken.isEmpty() ? -1 : where.steps().size(); length >= 0; length--) {
             if (broken.contains(new Subject(where.steps().subList(0, length)))) {
                 return true;
             }
