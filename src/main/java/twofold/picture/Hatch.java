@@ -1,0 +1,54 @@
+package twofold.picture;
+
+import java.util.Arrays;
+
+/** A hatching: parallel lines at 45°, as plain geometry, so that every painter paints the same. */
+public enum Hatch {
+    /** /// for the tangential plane. */
+    TANGENTIAL(1),
+    /** \\\ for the sagittal plane. */
+    SAGITTAL(-1);
+
+    /** From line to line along x, px. */
+    private static final double SPACING = 8;
+
+    private final int sign;
+
+    Hatch(int sign) {
+        this.sign = sign;
+    }
+
+    /** The lines inside a polygon, in pairs of begin and end. Lines lie where x ± y is a multiple of the spacing. */
+    Points lines(Points polygon) {
+        int n = polygon.size();
+        double[] level = new double[n];
+        double low = Double.POSITIVE_INFINITY;
+        double high = Double.NEGATIVE_INFINITY;
+        for (int i = 0; i < n; i++) {
+            level[i] = (polygon.x(i) + sign * polygon.y(i)) / SPACING;
+            low = Math.min(low, level[i]);
+            high = Math.max(high, level[i]);
+        }
+        Points lines = new Points();
+        double[] crossings = new double[n];
+        for (double line = Math.ceil(low); line <= high; line++) {
+            int found = 0;
+            for (int i = 0, j = n - 1; i < n; j = i++) {
+                if (level[i] > line != level[j] > line) {
+                    double share = (line - level[i]) / (level[j] - level[i]);
+                    crossings[found++] = polygon.x(i) + share * (polygon.x(j) - polygon.x(i));
+                }
+            }
+            Arrays.sort(crossings, 0, found);
+            for (int k = 0; k + 1 < found; k += 2) {
+                add(lines, crossings[k], line);
+                add(lines, crossings[k + 1], line);
+            }
+        }
+        return lines;
+    }
+
+    private void add(Points lines, double x, double line) {
+        lines.add(x, sign * (line * SPACING - x));
+    }
+}
