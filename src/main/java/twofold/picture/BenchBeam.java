@@ -14,11 +14,11 @@ import twofold.optics.Plane;
  */
 final class BenchBeam {
     private static final Stroke AXIS = Stroke.of(Ink.AXIS, 1, Dash.DASH_DOT);
-    private static final Stroke EDGE = Stroke.of(Ink.TANGENTIAL, 1.2);
+    private static final Stroke EDGE = new Stroke(Ink.TANGENTIAL, 1, Dash.SOLID, 0.6);
     private static final Stroke OUTLINE = Stroke.of(Ink.SAGITTAL, 1.4, Dash.DASHED);
 
     /** Opacity of the ribbon. */
-    static final double RIBBON = 0.2;
+    static final double RIBBON = 0.24;
 
     /** How far beyond the pane lines run, px. */
     private static final double BEYOND = 12;

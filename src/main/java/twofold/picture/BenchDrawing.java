@@ -138,14 +138,14 @@ public final class BenchDrawing {
 
     private void head(Painter painter, BenchView view, Room room) {
         String note = Table.showsHoles(view) ? "seen from above, 25 mm holes" : "seen from above";
-        Pane.head(painter, "Bench", note, view.width());
-        room.take(0, 0, view.width(), 26, Room.TEXT);
-        double y = 44;
+        Pane.head(painter, points, "Bench", note, view.width());
+        room.take(0, 0, view.width(), Pane.HEAD, Room.TEXT);
+        double y = 46;
         for (Plane plane : Plane.values()) {
             Eigenmode mode = cavity.mode(plane);
             if (!mode.isStable()) {
-                double width = Pane.warning(painter, Pane.noBeam(plane, mode), 14, y);
-                room.take(0, y - 14, width + 28, 20, Room.TEXT);
+                double width = Pane.noBeam(painter, points, plane, mode, 14, y, view.width() - 28);
+                room.take(0, y - 14, width + 28, 22, Room.TEXT);
                 y += 19;
             }
         }

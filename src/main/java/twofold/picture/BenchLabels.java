@@ -30,10 +30,10 @@ final class BenchLabels {
     /** Shares of a leg at which its length may stand. */
     private static final double[] SHARES = {0.5, 0.38, 0.62, 0.28, 0.72, 0.2, 0.8};
 
-    private static final Stroke LEADER = Stroke.of(Ink.QUIET, 1, Dash.DOTTED);
+    /** What a length may cover along its leg before it goes elsewhere. */
+    private static final double ALONG = 60;
 
-    /** Opacity of the paper behind text that stands on a beam. */
-    private static final double VEIL = 0.82;
+    private static final Stroke LEADER = Stroke.of(Ink.QUIET, 1, Dash.DOTTED);
 
     private final Cavity cavity;
     private final List<Stand> stands;
@@ -116,7 +116,7 @@ final class BenchLabels {
         if (bestRing > RINGS[1]) {
             leader(bestX, bestY, width, height, frame.x(), frame.y());
         }
-        veil(bestX, bestY, width, height, best - bestRing);
+        veil(new Frame(bestX, bestY, 1, 0, 1), width / 2 + 2, height / 2);
         Ink ink = part instanceof Crystal ? Ink.CRYSTAL_EDGE : Ink.TEXT;
         double base = bestY - height / 2 + Lettering.capital(Type.STRONG) + (LINE - Lettering.capital(Type.STRONG)) / 2;
         painter.text(part.name(), bestX, base, Type.STRONG, ink, Anchor.MIDDLE);
@@ -145,20 +145,13 @@ final class BenchLabels {
         }
     }
 
-    private void veil(double x, double y, double width, double height, double cost) {
-        if (cost > Room.BEAM) {
-            Frame frame = new Frame(x, y, 1, 0, 1);
-            veil(frame, width / 2 + 2, height / 2);
-        }
-    }
-
     private void veil(Frame frame, double halfLength, double halfHeight) {
         points.clear();
         frame.add(points, -halfLength, -halfHeight);
         frame.add(points, halfLength, -halfHeight);
         frame.add(points, halfLength, halfHeight);
         frame.add(points, -halfLength, halfHeight);
-        painter.polygon(points, Ink.PAPER, VEIL);
+        painter.polygon(points, Ink.PAPER, Pane.VEIL);
     }
 
     /** A leg's length, along it, beside the beam. */
@@ -196,12 +189,11 @@ final class BenchLabels {
             }
         }
         double onScreen = leg.path() * view.viewport().scale();
-        if (best > Room.TEXT || 2 * half > onScreen * 0.95) {
+        if (best > ALONG || 2 * half > onScreen * 0.95) {
+            beside(leg, text, half);
             return;
         }
-        if (best > Room.BEAM) {
-            veil(place, half + 2, LINE / 2 - 1);
-        }
+        veil(place, half + 2, LINE / 2 - 1);
         double down = Lettering.capital(Type.SMALL) / 2;
         painter.text(
                 text,
@@ -212,5 +204,36 @@ final class BenchLabels {
                 Anchor.MIDDLE,
                 Math.toDegrees(Math.atan2(-uy, ux)));
         room.take(place, half + 3, half + 3, LINE / 2 + 1, Room.TEXT);
+    }
+
+    /** A leg's length where there is room for it, tied to the leg's middle. */
+    private void beside(Leg leg, String text, double half) {
+        Point at = leg.at(leg.path() / 2);
+        double toX = view.viewport().x(at.x());
+        double toY = view.viewport().y(at.y());
+        double best = Room.BODY;
+        double bestX = Double.NaN;
+        double bestY = 0;
+        for (int ring = 0; ring < 4; ring++) {
+            for (int turn = 0; turn < 12; turn++) {
+                double angle = Math.PI / 2 + Math.PI / 6 * turn;
+                double x = toX + Math.cos(angle) * (half + 34 + 26 * ring);
+                double y = toY - Math.sin(angle) * (34 + 26 * ring);
+                double cost = room.cost(x - half - 2, y - LINE / 2, 2 * half + 4, LINE) + ring;
+                if (cost < best) {
+                    best = cost;
+                    bestX = x;
+                    bestY = y;
+                }
+            }
+        }
+        if (Double.isNaN(bestX) || toX < 0 || toX > view.width() || toY < 0 || toY > view.height()) {
+            return;
+        }
+        leader(bestX, bestY, 2 * half, LINE, toX, toY);
+        veil(new Frame(bestX, bestY, 1, 0, 1), half + 2, LINE / 2 - 1);
+        double base = bestY + Lettering.capital(Type.SMALL) / 2;
+        painter.text(text, bestX, base, Type.SMALL, Ink.QUIET, Anchor.MIDDLE);
+        room.take(bestX - half - 3, bestY - LINE / 2 - 1, 2 * half + 6, LINE + 2, Room.TEXT);
     }
 }

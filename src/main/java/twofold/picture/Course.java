@@ -2,7 +2,6 @@ package twofold.picture;
 
 import java.util.List;
 import twofold.design.Design;
-import twofold.design.Mirror;
 import twofold.design.Point;
 import twofold.design.Shape;
 import twofold.layout.Laid;
@@ -19,6 +18,8 @@ public final class Course {
     private final double[] starts;
     /** Where each part's middle lies, by part; m. */
     private final double[] middles;
+    /** The path inside each part, m. */
+    private final double[] insides;
     /** The leg that each part stands on or, being a mirror, sends the beam along; the last mirror of a standing wave: the last leg. */
     private final int[] legs;
 
@@ -29,6 +30,7 @@ public final class Course {
         this.starts = new double[all.size() + 1];
         int parts = laid.design().parts().size();
         this.middles = new double[parts];
+        this.insides = new double[parts];
         this.legs = new int[parts];
         for (int i = 0; i < all.size(); i++) {
             Leg leg = all.get(i);
@@ -37,6 +39,7 @@ public final class Course {
             legs[leg.from()] = i;
             for (Standing s : leg.parts()) {
                 middles[s.part()] = starts[i] + s.middle();
+                insides[s.part()] = s.length();
                 legs[s.part()] = i;
             }
         }
@@ -60,6 +63,11 @@ public final class Course {
     /** Where a part's middle lies, m; the first mirror of a ring at 0. */
     public double middle(int part) {
         return middles[part];
+    }
+
+    /** The path inside a part, m; 0 for what is thin. */
+    public double inside(int part) {
+        return insides[part];
     }
 
     /** The leg that a part stands on or, being a mirror, sends the beam along; the last mirror of a standing wave: the last leg. */
@@ -89,9 +97,7 @@ public final class Course {
         double least = Double.POSITIVE_INFINITY;
         for (int i = 0; i < design.parts().size(); i++) {
             double off = Math.abs(path - middles[i]);
-            if (!(design.parts().get(i) instanceof Mirror)) {
-                off = Math.max(0, off - standing(i).length() / 2);
-            }
+            off = Math.max(0, off - insides[i] / 2);
             if (off < least) {
                 least = off;
                 nearest = i;
@@ -99,15 +105,6 @@ public final class Course {
         }
         boolean round = design.shape() == Shape.RING && length() - path < least;
         return round ? 0 : nearest;
-    }
-
-    private Standing standing(int part) {
-        for (Standing s : laid.legs().get(legs[part]).parts()) {
-            if (s.part() == part) {
-                return s;
-            }
-        }
-        throw new IllegalArgumentException("part " + part + " stands on no leg");
     }
 
     /**

@@ -27,6 +27,16 @@ public final class Figures {
         return fixed(Unit.DEG.fromSi(radians), 2) + "°";
     }
 
+    /** "124.00 MHz" for a frequency in Hz. */
+    public static String mhz(double hertz) {
+        return fixed(Unit.MHZ.fromSi(hertz), 2) + " MHz";
+    }
+
+    /** "800 nm" for a wavelength in m, to 0.01 nm. */
+    public static String nm(double metres) {
+        return tick(Unit.NM.fromSi(metres), 2) + " nm";
+    }
+
     /** "−0.239" for a half trace. */
     public static String halfTrace(double value) {
         return fixed(value, 3);
@@ -35,6 +45,12 @@ public final class Figures {
     /** "0.76" for a margin or a ratio. */
     public static String ratio(double value) {
         return fixed(value, 2);
+    }
+
+    /** "2.07 ×" for a ratio, with about three digits. */
+    static String times(double ratio) {
+        double size = Math.abs(ratio);
+        return fixed(ratio, size < 10 ? 2 : size < 100 ? 1 : 0) + " ×";
     }
 
     /** A number with so many decimals at the most, as few as say it: for axis numbers and magnifications. */

@@ -1,5 +1,7 @@
 package twofold.picture;
 
+import twofold.design.Kind;
+
 /**
  * The outlines of parts, in a {@link Frame} fixed to each: the same shapes on the bench, there in metres and true, and in
  * the lane of the beam view, there in px. Bodies and edges are drawn apart, so that a beam can run inside a crystal.
@@ -30,8 +32,8 @@ final class Glyphs {
     void mirror(Frame frame, double diameter, double thickness, double radius) {
         points.clear();
         face(frame, diameter, radius);
-        frame.add(points, -thickness, -diameter / 2);
         frame.add(points, -thickness, diameter / 2);
+        frame.add(points, -thickness, -diameter / 2);
         painter.polygon(points, Ink.OPTIC, 1);
         painter.polyline(points, true, Stroke.of(Ink.OPTIC_EDGE, 1));
         points.clear();
@@ -100,7 +102,7 @@ final class Glyphs {
         painter.polyline(points, true, Stroke.of(Ink.OPTIC_EDGE, 1.2));
     }
 
-    /** Two blades square to the beam, from half the gap out to a reach; with a foot each where they stop the beam. */
+    /** Two blades square to the beam, from half the gap out to a reach; thin where they stop nothing. */
     void aperture(Frame frame, double gap, double reach, boolean stops) {
         points.clear();
         for (int side = -1; side <= 1; side += 2) {
@@ -117,6 +119,16 @@ final class Glyphs {
         frame.add(points, length / 2, -width / 2);
         frame.add(points, length / 2, width / 2);
         frame.add(points, -length / 2, width / 2);
-        painter.polygon(points, Ink.OPTIC_EDGE, 1);
+        painter.polygon(points, Ink.OPTIC, 1);
+        painter.polyline(points, true, Stroke.of(Ink.OPTIC_EDGE, 2));
+    }
+
+    /** What bodies of a kind are filled with. */
+    static Ink body(Kind kind) {
+        return switch (kind) {
+            case CRYSTAL -> Ink.CRYSTAL;
+            case PLATE, LENS -> Ink.GLASS;
+            case MIRROR, APERTURE, MATRIX -> Ink.OPTIC;
+        };
     }
 }

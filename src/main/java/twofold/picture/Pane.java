@@ -9,6 +9,12 @@ final class Pane {
     /** Where the first baseline lies, px below the top. */
     static final double BASE = 20;
 
+    /** How far a head reaches down, px. */
+    static final double HEAD = 29;
+
+    /** Opacity of the paper behind text. */
+    static final double VEIL = 0.86;
+
     private static final double LEFT = 14;
     private static final double SWATCH = 26;
 
@@ -43,9 +49,11 @@ final class Pane {
     }
 
     /** Title, a note behind it as far as there is room, and the key of the two planes at the right. */
-    static void head(Painter painter, String title, String note, double width) {
+    static void head(Painter painter, Points points, String title, String note, double width) {
+        rectangle(points, 0, 0, width, HEAD);
+        painter.polygon(points, Ink.PAPER, VEIL);
         painter.text(title, LEFT, BASE, Type.TITLE, Ink.TEXT, Anchor.START);
-        double key = key(painter, width - LEFT);
+        double key = key(painter, width - LEFT, points);
         double x = LEFT + Lettering.width(title, Type.TITLE) + 10;
         if (x + Lettering.width(note, Type.SMALL) < key - 10) {
             painter.text(note, x, BASE, Type.SMALL, Ink.QUIET, Anchor.START);
@@ -53,9 +61,8 @@ final class Pane {
     }
 
     /** The key of the two planes, ending at x; returns where it begins. */
-    private static double key(Painter painter, double end) {
+    private static double key(Painter painter, double end, Points points) {
         double x = end;
-        Points points = new Points();
         for (Plane plane : new Plane[] {Plane.SAGITTAL, Plane.TANGENTIAL}) {
             x -= Lettering.width(plane.word(), Type.BODY);
             painter.text(plane.word(), x, BASE, Type.BODY, Ink.TEXT, Anchor.START);
@@ -74,22 +81,24 @@ final class Pane {
         painter.line(x, edge, x + SWATCH, edge, line(plane, 2));
     }
 
-    /** "No tangential beam: unstable, half trace 1.204". */
-    static String noBeam(Plane plane, Eigenmode mode) {
-        String why = mode.state() == State.EDGE ? "on the edge of stability" : "unstable";
-        return "No " + plane.word() + " beam: " + why + ", half trace " + Figures.halfTrace(mode.halfTrace());
-    }
-
-    /** A sentence of what is wrong, behind a sign; returns where it ends. */
-    static double warning(Painter painter, String text, double x, double base) {
-        sign(painter, x + 7, base - 4.5);
-        painter.text(text, x + 20, base, Type.STRONG, Ink.BAD, Anchor.START);
-        return x + 20 + Lettering.width(text, Type.STRONG);
+    /** "No tangential beam: unstable, half trace 1.204" or, in less room, without its end; returns how wide it is. */
+    static double noBeam(
+            Painter painter, Points points, Plane plane, Eigenmode mode, double x, double base, double room) {
+        String why = "No " + plane.word() + " beam: " + (mode.state() == State.EDGE ? "on the edge" : "unstable");
+        String whole = why + ", half trace " + Figures.halfTrace(mode.halfTrace());
+        double width = 20 + Lettering.width(whole, Type.STRONG);
+        String said = width <= room ? whole : Lettering.cut(why, Type.STRONG, room - 20);
+        double wide = 20 + Lettering.width(said, Type.STRONG);
+        rectangle(points, x - 3, base - 14, wide + 6, 19);
+        painter.polygon(points, Ink.PAPER, VEIL);
+        sign(painter, points, x + 7, base - 4.5);
+        painter.text(said, x + 20, base, Type.STRONG, Ink.BAD, Anchor.START);
+        return wide;
     }
 
     /** A triangle with an exclamation mark. */
-    private static void sign(Painter painter, double x, double y) {
-        Points points = new Points().add(x, y - 7).add(x + 7.5, y + 6).add(x - 7.5, y + 6);
+    private static void sign(Painter painter, Points points, double x, double y) {
+        points.clear().add(x, y - 7).add(x + 7.5, y + 6).add(x - 7.5, y + 6);
         painter.polyline(points, true, Stroke.of(Ink.BAD, 1.6));
         painter.line(x, y - 2.5, x, y + 1.8, Stroke.of(Ink.BAD, 1.8));
         painter.line(x, y + 2.9, x, y + 4.7, Stroke.of(Ink.BAD, 1.8));
@@ -106,6 +115,20 @@ final class Pane {
         painter.segments(points, stroke);
         circle(points, frame.x(), frame.y(), 5);
         painter.polyline(points, true, stroke);
+    }
+
+    /** Four corners round what is selected. */
+    static void brackets(Painter painter, Points points, double x, double y, double halfWidth, double halfHeight) {
+        double arm = Math.min(6, 0.7 * Math.min(halfWidth, halfHeight));
+        points.clear();
+        for (int sx = -1; sx <= 1; sx += 2) {
+            for (int sy = -1; sy <= 1; sy += 2) {
+                double cx = x + sx * halfWidth;
+                double cy = y + sy * halfHeight;
+                points.add(cx, cy).add(cx - sx * arm, cy).add(cx, cy).add(cx, cy - sy * arm);
+            }
+        }
+        painter.segments(points, Stroke.of(Ink.SELECTED, 2));
     }
 
     /** Sets the points to a circle's. */

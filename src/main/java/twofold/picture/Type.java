@@ -2,6 +2,8 @@ package twofold.picture;
 
 /** The sizes and weights of text; one family, DejaVu Sans. */
 public enum Type {
+    /** Heads a page. */
+    HEADING(17, true),
     /** Heads a pane. */
     TITLE(13, true),
     /** Names of parts. */
