@@ -6,6 +6,7 @@ import twofold.cavity.Eigenmode;
 import twofold.cavity.Waist;
 import twofold.design.Point;
 import twofold.layout.Leg;
+import twofold.layout.Standing;
 import twofold.optics.Plane;
 
 /**
@@ -24,14 +25,16 @@ final class BenchBeam {
     private static final double BEYOND = 12;
 
     private final Cavity cavity;
+    private final List<Stand> stands;
     private final BenchView view;
     private final Points samples = new Points();
     private final Points left = new Points();
     private final Points right = new Points();
     private final double[] range = new double[2];
 
-    BenchBeam(Cavity cavity, BenchView view) {
+    BenchBeam(Cavity cavity, List<Stand> stands, BenchView view) {
         this.cavity = cavity;
+        this.stands = stands;
         this.view = view;
     }
 
@@ -77,12 +80,48 @@ final class BenchBeam {
             return;
         }
         Curve.sample(w, range[0] * w.length(), range[1] * w.length(), scale, samples.clear());
-        for (int i = 0; i < samples.size(); i++) {
-            double share = samples.x(i) / w.length();
-            double half = samples.y(i) * scale / length;
-            left.add(x + share * dx + half * dy, y + share * dy - half * dx);
-            right.add(x + share * dx - half * dy, y + share * dy + half * dx);
+        double px = length / w.length();
+        double begin = range[0] > 0 ? 0 : beginCut(leg, w, dx, dy);
+        double end = range[1] < 1 ? 0 : endCut(leg, w, dx, dy);
+        Frame frame = new Frame(x, y, dx / length, -dy / length, 1);
+        side(left, frame, px, scale, begin, end);
+        side(right, frame, px, -scale, begin, end);
+    }
+
+    /** Adds one edge of a stretch: it begins and ends where it meets the faces there, not square to the axis. */
+    private void side(Points to, Frame frame, double px, double scale, double begin, double end) {
+        int last = samples.size() - 1;
+        double first = samples.y(0) * scale;
+        double stop = samples.y(last) * scale;
+        double from = samples.x(0) * px - first * begin;
+        double until = samples.x(last) * px - stop * end;
+        frame.add(to, from, first);
+        for (int i = 1; i < last; i++) {
+            double along = samples.x(i) * px;
+            if (along > from && along < until) {
+                frame.add(to, along, samples.y(i) * scale);
+            }
         }
+        frame.add(to, until, stop);
+    }
+
+    /** The cut at a stretch's beginning: along the face there; square behind a thermal lens. */
+    private double beginCut(Leg leg, Waist w, double dx, double dy) {
+        boolean whole = !w.isInside() || w.start() <= standing(leg, w.from()).start();
+        return whole ? stands.get(w.from()).cut(dx, -dy) : 0;
+    }
+
+    private double endCut(Leg leg, Waist w, double dx, double dy) {
+        boolean whole = !w.isInside()
+                || w.start() + w.length() * (1 + 1e-9) >= standing(leg, w.to()).end();
+        return whole ? stands.get(w.to()).cut(dx, -dy) : 0;
+    }
+
+    private static Standing standing(Leg leg, int part) {
+        return leg.parts().stream()
+                .filter(s -> s.part() == part)
+                .findFirst()
+                .orElseThrow(() -> new IllegalArgumentException("part " + part + " stands on another leg"));
     }
 
     private void flush(Painter painter, Plane plane) {

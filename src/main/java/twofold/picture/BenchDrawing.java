@@ -112,7 +112,7 @@ public final class BenchDrawing {
 
     /** All that stands on the table. */
     public void content(Painter painter, BenchView view) {
-        BenchBeam beam = new BenchBeam(cavity, view);
+        BenchBeam beam = new BenchBeam(cavity, stands, view);
         BenchParts parts = new BenchParts(cavity.laid().design().parts(), stands, mounts, view, painter);
         Room room = new Room(view.width(), view.height());
         painter.push(0, 0, view.width(), view.height());

@@ -83,7 +83,7 @@ final class BenchParts {
         double back = Math.max(s.back(), 3 / frame.scale()) + rim;
         double front = Math.max(s.front(), 3 / frame.scale()) + rim;
         double half = Math.max(s.half(), 4 / frame.scale()) + rim;
-        double arm = Math.min(7 / frame.scale(), Math.min(half, (back + front) / 2) * 0.7);
+        double arm = Math.min(10 / frame.scale(), Math.min(half, (back + front) / 2) * 0.7);
         points.clear();
         for (int end = -1; end <= 1; end += 2) {
             double ahead = end < 0 ? -back : front;

@@ -14,7 +14,7 @@ public final class Sheet {
     public static final double LEAST_WIDTH = 480;
 
     /** The smallest page that can be read, px. */
-    public static final double LEAST_HEIGHT = 400;
+    public static final double LEAST_HEIGHT = 480;
 
     private static final double GAP = 10;
     private static final double HEAD = 58;
@@ -26,7 +26,7 @@ public final class Sheet {
     /** What the bench takes of the height at the least and at the most. */
     private static final double LEAST_BENCH = 0.36;
 
-    private static final double LARGEST_BENCH = 0.6;
+    private static final double LARGEST_BENCH = 0.57;
 
     /** What heads and labels take of the bench's height, px. */
     private static final double BENCH_RIMS = 150;

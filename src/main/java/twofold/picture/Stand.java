@@ -53,6 +53,9 @@ record Stand(
     private static final double LEAST_ROD = 1.5e-3;
     private static final double LARGEST_ROD = 4e-3;
 
+    /** Steepest cut of a drawn beam. */
+    private static final double STEEPEST = 4;
+
     /** How far a plate's faces reach beyond the beam at least, m. */
     private static final double MARGIN = 2e-3;
 
@@ -91,6 +94,17 @@ record Stand(
     /** The frame fixed to it, in metres. */
     Frame frame(Viewport to) {
         return new Frame(to.x(at.x()), to.y(at.y()), ux, uy, to.scale());
+    }
+
+    /**
+     * The tangent of the angle from a direction to the normal of its faces, left positive: where the beam's left edge, so
+     * far off the axis, meets the face, that much times as far back.
+     */
+    double cut(double dx, double dy) {
+        double nx = ux * Math.cos(normal) - uy * Math.sin(normal);
+        double ny = uy * Math.cos(normal) + ux * Math.sin(normal);
+        double tan = (dx * ny - dy * nx) / (dx * nx + dy * ny);
+        return Math.max(-STEEPEST, Math.min(STEEPEST, tan));
     }
 
     /** How far outside its rectangle a pixel lies, px; 0 within. */
