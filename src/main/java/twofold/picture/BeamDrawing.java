@@ -111,7 +111,7 @@ public final class BeamDrawing {
         }
         BeamLabels labels = new BeamLabels(cavity, course, view, painter);
         if (view.numbers()) {
-            labels.numbers(dots, halves, rows.top(), rows.bottom());
+            labels.numbers(dots, halves, rows.top(), rows.bottom(), points);
         }
         if (view.crosshair().isPresent()) {
             double path = view.crosshair().getAsDouble();

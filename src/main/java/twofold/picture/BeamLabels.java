@@ -16,7 +16,7 @@ final class BeamLabels {
     private static final double LINE = 15;
 
     /** Distances of a number from its dot that are tried, px. */
-    private static final double[] OFFS = {12, 22, 34, 48};
+    private static final double[] OFFS = {12, 22, 34, 48, 62, 76, 90};
 
     private final Cavity cavity;
     private final Course course;
@@ -74,7 +74,7 @@ final class BeamLabels {
     }
 
     /** The radii of waists, on the side away from the axis, as far as they find room. */
-    void numbers(List<Halves.Dot> dots, Halves halves, double top, double bottom) {
+    void numbers(List<Halves.Dot> dots, Halves halves, double top, double bottom, Points points) {
         Room room = new Room(view.width(), view.height());
         room.take(0, 0, view.width(), top - 4, Room.TEXT);
         room.take(0, bottom, view.width(), view.height(), Room.TEXT);
@@ -82,7 +82,10 @@ final class BeamLabels {
         for (Halves.Dot d : dots) {
             room.take(d.x() - 4, d.y() - 4, 8, 8, Room.TEXT);
         }
-        for (Halves.Dot d : dots) {
+        List<Halves.Dot> narrowFirst = dots.stream()
+                .sorted(Comparator.comparingDouble(d -> d.waist().radius()))
+                .toList();
+        for (Halves.Dot d : narrowFirst) {
             String text = Figures.um(d.waist().radius());
             double width = Lettering.width(text, Type.SMALL);
             double away = d.plane() == Plane.TANGENTIAL ? -1 : 1;
@@ -103,6 +106,8 @@ final class BeamLabels {
                 }
             }
             if (!Double.isNaN(bestX)) {
+                Pane.rectangle(points, bestX - 2, bestY - 7, width + 4, 14);
+                painter.polygon(points, Ink.PAPER, Pane.VEIL);
                 painter.text(text, bestX, bestY + 4, Type.SMALL, Pane.ink(d.plane()), Anchor.START);
                 room.take(bestX - 2, bestY - 8, width + 4, 14, Room.TEXT);
             }

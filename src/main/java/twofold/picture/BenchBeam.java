@@ -19,7 +19,7 @@ final class BenchBeam {
     private static final Stroke OUTLINE = Stroke.of(Ink.SAGITTAL, 1.4, Dash.DASHED);
 
     /** Opacity of the ribbon. */
-    static final double RIBBON = 0.24;
+    static final double RIBBON = 0.18;
 
     /** How far beyond the pane lines run, px. */
     private static final double BEYOND = 12;

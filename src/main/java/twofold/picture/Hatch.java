@@ -12,6 +12,9 @@ public enum Hatch {
     /** From line to line along x, px. */
     private static final double SPACING = 8;
 
+    /** Shorter lines, which touch a corner, are left out, px. */
+    private static final double SHORTEST = 0.1;
+
     private final int sign;
 
     Hatch(int sign) {
@@ -41,8 +44,10 @@ public enum Hatch {
             }
             Arrays.sort(crossings, 0, found);
             for (int k = 0; k + 1 < found; k += 2) {
-                add(lines, crossings[k], line);
-                add(lines, crossings[k + 1], line);
+                if (crossings[k + 1] - crossings[k] > SHORTEST) {
+                    add(lines, crossings[k], line);
+                    add(lines, crossings[k + 1], line);
+                }
             }
         }
         return lines;

@@ -26,17 +26,17 @@ public enum Ink {
     /** The tangential plane, always with a solid line or /// too. */
     TANGENTIAL(0x0a766c, 0x4ec4b6),
     /** The sagittal plane, always with a dashed line or \\\ too. */
-    SAGITTAL(0x9c5a00, 0xeeae4c),
+    SAGITTAL(0x955600, 0xeeae4c),
     /** Bodies of mirrors. */
     OPTIC(0xb9c8d3, 0x4a5b68),
     /** Outlines of mirrors, lenses, stops and black boxes. */
     OPTIC_EDGE(0x33475a, 0xa9bccb),
     /** Mounts. */
-    MOUNT(0xe7edf0, 0x273139),
+    MOUNT(0xecf1f3, 0x273139),
     /** Outlines of mounts. */
     MOUNT_EDGE(0x84939d, 0x6f808c),
     /** Bodies of crystals. */
-    CRYSTAL(0xf2bfd2, 0x6b2f49),
+    CRYSTAL(0xf7d0df, 0x6b2f49),
     /** Outlines and names of crystals. */
     CRYSTAL_EDGE(0xa12a5c, 0xf08db4),
     /** Bodies of plates and lenses. */
@@ -54,7 +54,7 @@ public enum Ink {
     /** Behind a control under the pointer. */
     CONTROL_HOVER(0xe6edf0, 0x2e3a42),
     /** Outlines of controls. */
-    CONTROL_EDGE(0x80909a, 0x74858f),
+    CONTROL_EDGE(0x7a8a94, 0x74858f),
     /** The one control that matters most. */
     ACCENT(0x0a766c, 0x4ec4b6),
     /** Text on it. */

@@ -28,7 +28,10 @@ public final class SvgPainter implements Painter {
         attribute("height", height);
         svg.append(" viewBox=\"0 0 ");
         number(width).append(' ');
-        number(height).append("\" font-family=\"").append(Lettering.FAMILY).append("\" stroke-linejoin=\"round\">\n");
+        number(height)
+                .append("\" font-family=\"")
+                .append(Lettering.FAMILY)
+                .append(", sans-serif\" stroke-linejoin=\"round\">\n");
         svg.append("<title>");
         escaped(title).append("</title>\n");
     }

@@ -31,18 +31,12 @@ final class Drawn {
 
     /** The pump-side cavity that the page on files gives as its example. */
     static Design zFold() {
-        return zFold(480);
-    }
-
-    /** The same with another first arm, mm, which must keep the crystal's leg. */
-    static Design zFold(double arm) {
-        double shift = arm - 480;
         List<Part> parts = List.of(
                 mirror("End A", 0, 0),
-                curved("Fold 1", arm, 0, 100),
+                curved("Fold 1", 480, 0, 100),
                 rod(),
-                curved("Fold 2", 378.9482 + shift, 25.9354, 100),
-                mirror("End B", 998.9482 + shift, 25.9354));
+                curved("Fold 2", 378.9482, 25.9354, 100),
+                mirror("End B", 998.9482, 25.9354));
         Design plain = Design.of("Lake-ice profiler, pump-side cavity", 800e-9, Shape.STANDING_WAVE, parts);
         return new Design(
                 plain.title(),
@@ -74,6 +68,12 @@ final class Drawn {
                         curved("Left", 0, 0, 300),
                         curved("Fold", 250, 0, 400),
                         mirror("Right", 250 + 600 * Math.cos(turn), 600 * Math.sin(turn))));
+    }
+
+    /** Two flat mirrors: half trace exactly 1 in both planes. */
+    static Design onEdge() {
+        return Design.of(
+                "Two flats", 1064e-9, Shape.STANDING_WAVE, List.of(mirror("Near", 0, 0), mirror("Far", 300, 0)));
     }
 
     /** A bow-tie with 10 mm of crystal between two curved mirrors. */
