@@ -16,7 +16,7 @@ final class BeamLabels {
     private static final double LINE = 15;
 
     /** Distances of a number from its dot that are tried, px. */
-    private static final double[] OFFS = {12, 22, 34, 48, 62, 76, 90};
+    private static final double[] OFFS = {12, 22, 34, 48, 62, 76, 90, 106, 122};
 
     private final Cavity cavity;
     private final Course course;
