@@ -18,6 +18,7 @@ import twofold.design.Matrix;
 import twofold.design.Mirror;
 import twofold.design.Part;
 import twofold.design.Plate;
+import twofold.design.Unit;
 import twofold.layout.Clearance;
 import twofold.optics.Plane;
 
@@ -82,7 +83,7 @@ final class Notable {
         for (Plane plane : Plane.values()) {
             Eigenmode mode = cavity.mode(plane);
             if (mode.isStable() && mode.margin() < SMALL_MARGIN) {
-                lines.add("The " + plane.word() + " plane is close to its edge: margin " + Shown.pure(mode.margin())
+                lines.add("The " + plane.word() + " plane is close to its edge: margin " + Unit.ONE.shown(mode.margin())
                         + ".");
             }
         }
@@ -97,7 +98,7 @@ final class Notable {
             if (gap.gap() < 0) {
                 lines.add("The mount of " + name(gap.part())
                         + (gap.beam().isPresent() ? " cuts the " : " overlaps that of ") + gap.to(cavity.laid())
-                        + " by " + Shown.millimetres(-gap.gap()) + " mm.");
+                        + " by " + Unit.MM.shown(-gap.gap()) + " mm.");
             }
         }
         if (!cavity.clearance().knowsBeams()) {
@@ -115,7 +116,7 @@ final class Notable {
                 .filter(e -> e.getValue() > STEEP)
                 .sorted(java.util.Map.Entry.comparingByKey())
                 .forEach(e -> lines.add(
-                        "Steep incidence at " + name(e.getKey()) + ": " + Shown.degrees(e.getValue()) + "°."));
+                        "Steep incidence at " + name(e.getKey()) + ": " + Unit.DEG.shown(e.getValue()) + "°."));
     }
 
     private void waists() {
@@ -139,8 +140,8 @@ final class Notable {
             OptionalDouble clear = clearDiameter(design.parts().get(i));
             double radius = widest(i);
             if (clear.isPresent() && radius > 0 && clear.getAsDouble() < BARE_MINIMUM * radius) {
-                lines.add("The clear diameter of " + name(i) + ", " + Shown.millimetres(clear.getAsDouble())
-                        + " mm, is only " + Table.fixed(clear.getAsDouble() / radius, 1) + " beam radii.");
+                lines.add("The clear diameter of " + name(i) + ", " + Unit.MM.shown(clear.getAsDouble())
+                        + " mm, is only " + Unit.fixed(clear.getAsDouble() / radius, 1) + " beam radii.");
             }
         }
     }

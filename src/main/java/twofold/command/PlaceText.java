@@ -1,13 +1,11 @@
 package twofold.command;
 
-import static twofold.command.Shown.degrees;
-import static twofold.command.Shown.millimetres;
-
 import twofold.cavity.Cavity;
 import twofold.design.Design;
 import twofold.design.Kind;
 import twofold.design.Mirror;
 import twofold.design.Point;
+import twofold.design.Unit;
 import twofold.layout.Clearance;
 import twofold.layout.Leg;
 import twofold.layout.Standing;
@@ -33,12 +31,12 @@ final class PlaceText {
                 parts.row(
                         design.parts().get(s.part()).name(),
                         design.parts().get(s.part()).kind().word(),
-                        millimetres(at.x()),
-                        millimetres(at.y()),
-                        millimetres(s.middle()),
+                        Unit.MM.shown(at.x()),
+                        Unit.MM.shown(at.y()),
+                        Unit.MM.shown(s.middle()),
                         design.parts().get(s.part()).kind() == Kind.LENS
                                         || design.parts().get(s.part()).kind().isSlab()
-                                ? degrees(s.incidence()) + "°"
+                                ? Unit.DEG.shown(s.incidence()) + "°"
                                 : "");
             }
         }
@@ -52,14 +50,14 @@ final class PlaceText {
             legs.row(
                     design.parts().get(leg.from()).name() + " to "
                             + design.parts().get(leg.to()).name(),
-                    millimetres(leg.path()),
-                    millimetres(leg.distance()),
-                    degrees(Math.atan2(leg.heading().y(), leg.heading().x())) + "°");
+                    Unit.MM.shown(leg.path()),
+                    Unit.MM.shown(leg.distance()),
+                    Unit.DEG.shown(Math.atan2(leg.heading().y(), leg.heading().x())) + "°");
         }
         text.append(legs.text("")).append('\n');
         Table gaps = new Table().row("clearance", "gap");
         for (Clearance.Gap gap : cavity.clearance().smallest(GAPS)) {
-            gaps.row(design.parts().get(gap.part()).name() + " to " + gap.to(cavity.laid()), millimetres(gap.gap()));
+            gaps.row(design.parts().get(gap.part()).name() + " to " + gap.to(cavity.laid()), Unit.MM.shown(gap.gap()));
         }
         text.append(gaps.text(""));
         text.append("all lengths in mm\n");
@@ -73,9 +71,9 @@ final class PlaceText {
         table.row(
                 mirror.name(),
                 mirror.kind().word(),
-                millimetres(mirror.at().x()),
-                millimetres(mirror.at().y()),
+                Unit.MM.shown(mirror.at().x()),
+                Unit.MM.shown(mirror.at().y()),
                 "",
-                incidence == null ? "" : degrees(incidence) + "°");
+                incidence == null ? "" : Unit.DEG.shown(incidence) + "°");
     }
 }

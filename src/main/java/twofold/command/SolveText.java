@@ -1,10 +1,5 @@
 package twofold.command;
 
-import static twofold.command.Shown.degrees;
-import static twofold.command.Shown.micrometres;
-import static twofold.command.Shown.millimetres;
-import static twofold.command.Shown.pure;
-
 import java.util.List;
 import java.util.Optional;
 import twofold.cavity.Cavity;
@@ -56,11 +51,11 @@ final class SolveText {
                 .append(", ")
                 .append(Unit.NM.text(design.wavelength()))
                 .append(" nm; round trip ")
-                .append(millimetres(cavity.roundTrip()))
+                .append(Unit.MM.shown(cavity.roundTrip()))
                 .append(" mm (optical ")
-                .append(millimetres(cavity.opticalRoundTrip()))
+                .append(Unit.MM.shown(cavity.opticalRoundTrip()))
                 .append(" mm), free spectral range ")
-                .append(Table.fixed(Unit.MHZ.fromSi(cavity.freeSpectralRange()), 2))
+                .append(Unit.fixed(Unit.MHZ.fromSi(cavity.freeSpectralRange()), 2))
                 .append(" MHz\n\n");
     }
 
@@ -71,10 +66,10 @@ final class SolveText {
             table.row(
                     plane.word(),
                     mode.state().word(),
-                    pure(mode.halfTrace()),
-                    pure(mode.margin()),
-                    mode.isStable() ? degrees(mode.gouy()) + "°" : "-",
-                    mode.state() == State.UNSTABLE ? pure(mode.magnification()) : "-");
+                    Unit.ONE.shown(mode.halfTrace()),
+                    Unit.ONE.shown(mode.margin()),
+                    mode.isStable() ? Unit.DEG.shown(mode.gouy()) + "°" : "-",
+                    mode.state() == State.UNSTABLE ? Unit.ONE.shown(mode.magnification()) : "-");
         }
         text.append(table.text("")).append('\n');
     }
@@ -91,7 +86,7 @@ final class SolveText {
                     incidence(s.part(), s.face()),
                     radius(Plane.TANGENTIAL, s),
                     radius(Plane.SAGITTAL, s),
-                    cavity.roundness(s.part(), s.face()).map(Shown::pure).orElse("-"));
+                    cavity.roundness(s.part(), s.face()).map(Unit.ONE::shown).orElse("-"));
         }
         text.append(table.text("")).append('\n');
     }
@@ -103,13 +98,13 @@ final class SolveText {
 
     private String incidence(int part, Face face) {
         Double angle = cavity.laid().incidence().get(part);
-        return angle == null || face != Face.SURFACE ? "" : degrees(angle) + "°";
+        return angle == null || face != Face.SURFACE ? "" : Unit.DEG.shown(angle) + "°";
     }
 
     private String radius(Plane plane, Station at) {
         return cavity.mode(plane)
                 .station(at.part(), at.face())
-                .map(s -> micrometres(s.radius()) + " µm")
+                .map(s -> Unit.UM.shown(s.radius()) + " µm")
                 .orElse("-");
     }
 
@@ -130,11 +125,11 @@ final class SolveText {
             Optional<Waist> ws = s.isStable() ? Optional.of(s.waists().get(i)) : Optional.empty();
             table.row(
                     stretch(some, i),
-                    millimetres(here.length()) + " mm",
-                    wt.map(w -> micrometres(w.radius()) + " µm").orElse("-"),
-                    wt.map(w -> millimetres(w.after()) + " mm").orElse("-"),
-                    ws.map(w -> micrometres(w.radius()) + " µm").orElse("-"),
-                    ws.map(w -> millimetres(w.after()) + " mm").orElse("-"),
+                    Unit.MM.shown(here.length()) + " mm",
+                    wt.map(w -> Unit.UM.shown(w.radius()) + " µm").orElse("-"),
+                    wt.map(w -> Unit.MM.shown(w.after()) + " mm").orElse("-"),
+                    ws.map(w -> Unit.UM.shown(w.radius()) + " µm").orElse("-"),
+                    ws.map(w -> Unit.MM.shown(w.after()) + " mm").orElse("-"),
                     real(wt, ws));
         }
         text.append(table.text("")).append('\n');
@@ -191,10 +186,10 @@ final class SolveText {
     private static void crystal(Table table, String plane, CrystalLine line) {
         table.row(
                 "  " + plane,
-                micrometres(line.radius()) + " µm",
-                millimetres(line.offset()) + " mm",
-                millimetres(line.rayleigh()) + " mm",
-                millimetres(line.shiftToCentre()) + " mm");
+                Unit.UM.shown(line.radius()) + " µm",
+                Unit.MM.shown(line.offset()) + " mm",
+                Unit.MM.shown(line.rayleigh()) + " mm",
+                Unit.MM.shown(line.shiftToCentre()) + " mm");
     }
 
     private void clearance() {
@@ -202,7 +197,7 @@ final class SolveText {
         for (Clearance.Gap gap : cavity.clearance().smallest(GAPS)) {
             table.row(
                     "  " + design.parts().get(gap.part()).name() + " to " + gap.to(cavity.laid()),
-                    millimetres(gap.gap()) + " mm");
+                    Unit.MM.shown(gap.gap()) + " mm");
         }
         if (!table.isEmpty()) {
             text.append("smallest clearances\n").append(table.text("")).append('\n');

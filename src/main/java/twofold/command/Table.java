@@ -2,7 +2,6 @@ package twofold.command;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 
 /** Aligned text: the first column to the left, all others to the right. */
 final class Table {
@@ -43,12 +42,5 @@ final class Table {
 
     private static int length(String cell) {
         return cell.codePointCount(0, cell.length());
-    }
-
-    /** A number with a fixed count of decimals, never "-0". */
-    static String fixed(double value, int decimals) {
-        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
-        boolean zero = text.startsWith("-") && text.chars().noneMatch(c -> c >= '1' && c <= '9');
-        return zero ? text.substring(1) : text;
     }
 }

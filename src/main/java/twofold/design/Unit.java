@@ -3,6 +3,7 @@ package twofold.design;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
+import java.util.Locale;
 
 /**
  * The one place where numbers change units: decimal text in a file's or a person's unit against SI doubles.
@@ -12,23 +13,23 @@ import java.math.RoundingMode;
  */
 public enum Unit {
     /** A pure number. */
-    ONE("", "1"),
+    ONE("", "1", 3),
     /** Millimetres for m. */
-    MM("mm", "1e-3"),
+    MM("mm", "1e-3", 2),
     /** Micrometres for m. */
-    UM("µm", "1e-6"),
+    UM("µm", "1e-6", 1),
     /** Nanometres for m. */
-    NM("nm", "1e-9"),
+    NM("nm", "1e-9", 2),
     /** Degrees for rad. */
-    DEG("°", Unit.PI_OVER_180),
+    DEG("°", Unit.PI_OVER_180, 2),
     /** Inverse metres, SI already. */
-    PER_M("1/m", "1"),
+    PER_M("1/m", "1", 3),
     /** Inverse millimetres for 1/m. */
-    PER_MM("1/mm", "1e3"),
+    PER_MM("1/mm", "1e3", 3),
     /** Megahertz for Hz. */
-    MHZ("MHz", "1e6"),
+    MHZ("MHz", "1e6", 2),
     /** Hundredths for a pure number. */
-    PERCENT("%", "1e-2");
+    PERCENT("%", "1e-2", 2);
 
     /** π/180 to 40 digits. */
     private static final String PI_OVER_180 = "0.01745329251994329576923690768488612713443";
@@ -37,9 +38,11 @@ public enum Unit {
 
     private final String symbol;
     private final BigDecimal factor;
+    private final int decimals;
 
-    Unit(String symbol, String factor) {
+    Unit(String symbol, String factor, int decimals) {
         this.symbol = symbol;
+        this.decimals = decimals;
         this.factor = new BigDecimal(factor);
     }
 
@@ -97,6 +100,23 @@ public enum Unit {
             }
         }
         return plain(exact.round(new MathContext(20)));
+    }
+
+    /**
+     * An SI value in this unit as a person is shown it: lengths to 0.01 mm, angles to 0.01°, radii to 0.1 µm, pure numbers
+     * to 0.001; never "-0".
+     *
+     * @param si any double
+     */
+    public String shown(double si) {
+        return fixed(fromSi(si), decimals);
+    }
+
+    /** A number with a fixed count of decimals, never "-0". */
+    public static String fixed(double value, int decimals) {
+        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
+        boolean zero = text.startsWith("-") && text.chars().noneMatch(c -> c >= '1' && c <= '9');
+        return zero ? text.substring(1) : text;
     }
 
     private static String plain(BigDecimal decimal) {

@@ -1,6 +1,5 @@
 package twofold.picture;
 
-import java.util.Locale;
 import twofold.design.Unit;
 
 /**
@@ -14,22 +13,26 @@ public final class Figures {
 
     /** "−1.14 mm" for a length in m. */
     public static String mm(double metres) {
-        return fixed(Unit.MM.fromSi(metres), 2) + " mm";
+        return shown(Unit.MM, metres) + " mm";
     }
 
     /** "38.7 µm" for a radius in m. */
     public static String um(double metres) {
-        return fixed(Unit.UM.fromSi(metres), 1) + " µm";
+        return shown(Unit.UM, metres) + " µm";
     }
 
     /** "7.90°" for an angle in rad. */
     public static String degrees(double radians) {
-        return fixed(Unit.DEG.fromSi(radians), 2) + "°";
+        return shown(Unit.DEG, radians) + "°";
     }
 
     /** "124.00 MHz" for a frequency in Hz. */
     public static String mhz(double hertz) {
-        return fixed(Unit.MHZ.fromSi(hertz), 2) + " MHz";
+        return shown(Unit.MHZ, hertz) + " MHz";
+    }
+
+    private static String shown(Unit unit, double si) {
+        return unit.shown(si).replace('-', MINUS);
     }
 
     /** "800 nm" for a wavelength in m, to 0.01 nm. */
@@ -68,11 +71,6 @@ public final class Figures {
 
     /** A number with a fixed count of decimals, never "−0". */
     static String fixed(double value, int decimals) {
-        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
-        if (!text.startsWith("-")) {
-            return text;
-        }
-        boolean zero = text.chars().noneMatch(c -> c >= '1' && c <= '9');
-        return zero ? text.substring(1) : MINUS + text.substring(1);
+        return Unit.fixed(value, decimals).replace('-', MINUS);
     }
 }
