@@ -39,7 +39,7 @@ public final class Commands implements Callable<Integer> {
     /** Exit status: a file could not be read, written or accepted. */
     public static final int FILE = 3;
 
-    private static final List<String> NAMES = List.of("solve", "place", "check");
+    private static final List<String> NAMES = List.of("solve", "place", "draw", "check");
 
     private final Streams streams;
 
@@ -72,6 +72,7 @@ public final class Commands implements Callable<Integer> {
         CommandLine line = new CommandLine(new Commands(streams))
                 .addSubcommand(new SolveCommand(streams))
                 .addSubcommand(new PlaceCommand(streams))
+                .addSubcommand(new DrawCommand(streams))
                 .addSubcommand(new CheckCommand(streams))
                 .setExpandAtFiles(false)
                 .setUsageHelpWidth(110)
@@ -113,10 +114,7 @@ public final class Commands implements Callable<Integer> {
             streams.complain("found " + files.size() + " files; accepted: one");
             return USAGE;
         }
-        int status = SolveCommand.text(file, streams);
-        if (status == DONE) {
-            streams.complain("the window is to come; until then this is the answer as text");
-        }
-        return status;
+        // The program opens its window on a lone file; whoever asks the command line alone gets the answer as text.
+        return SolveCommand.text(file, streams);
     }
 }

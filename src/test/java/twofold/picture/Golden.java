@@ -12,13 +12,14 @@ import java.nio.file.Path;
  * Compares pictures with those kept in src/test/resources/twofold/picture. {@code -Dtwofold.golden=update} writes them
  * anew, to be looked at before they are committed.
  */
-final class Golden {
+public final class Golden {
     private static final Path FOLDER = Path.of("src/test/resources/twofold/picture");
     private static final String SWITCH = "twofold.golden";
 
     private Golden() {}
 
-    static void matches(String name, String svg) {
+    /** Fails where a picture differs from the one kept under a name. */
+    public static void matches(String name, String svg) {
         Path file = FOLDER.resolve(name + ".svg");
         try {
             if ("update".equals(System.getProperty(SWITCH))) {
