@@ -1,0 +1,243 @@
+package twofold.window;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.Consumer;
+import javafx.geometry.Orientation;
+import javafx.scene.Node;
+import javafx.scene.control.Label;
+import javafx.scene.control.SplitPane;
+import javafx.scene.input.DragEvent;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
+import javafx.scene.input.TransferMode;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+import twofold.picture.Theme;
+import twofold.session.Runner;
+import twofold.session.Session;
+import twofold.session.Shown;
+import twofold.session.Source;
+import twofold.window.beam.BeamPane;
+import twofold.window.beam.CloseUpPane;
+import twofold.window.bench.BenchPane;
+import twofold.window.panel.PartPane;
+import twofold.window.panel.PartsPane;
+import twofold.window.panel.ProblemsPane;
+import twofold.window.panel.StabilityPane;
+
+/** The editor's panes, wired to one session. A node: the application puts it into a window, a test into a stage. */
+public final class Editor extends BorderPane {
+    private final Session session;
+    private final BenchPane bench;
+    private final BeamPane beam;
+    private final CloseUpPane closeUp = new CloseUpPane();
+    private final StabilityPane stability = new StabilityPane();
+    private final PartPane part = new PartPane();
+    private final PartsPane parts;
+    private final ProblemsPane problems = new ProblemsPane();
+    private final Notice notice;
+    private final Label said = new Label();
+    private final Label facts = new Label();
+    private final SplitPane pictures;
+    private final SplitPane lower;
+    private final SplitPane whole;
+    private Consumer<String> titles = t -> {};
+    private Consumer<Path> opened = p -> {};
+    private Optional<Source> source = Optional.empty();
+    private Theme theme = Theme.LIGHT;
+
+    /** Makes the editor with nothing open. */
+    public Editor(Runner runner) {
+        session = new Session(runner, this::show);
+        bench = new BenchPane(session);
+        beam = new BeamPane(session);
+        parts = new PartsPane(session);
+        notice = new Notice(session::reload);
+        lower = split(Orientation.HORIZONTAL, beam, closeUp);
+        VBox benchAndProblems = new VBox(6, problems, bench);
+        VBox.setVgrow(bench, Priority.ALWAYS);
+        pictures = split(Orientation.VERTICAL, benchAndProblems, lower);
+        VBox side = new VBox(8, stability, part, parts);
+        VBox.setVgrow(part, Priority.ALWAYS);
+        part.setPrefHeight(420);
+        part.setMinHeight(140);
+        parts.setPrefHeight(220);
+        parts.setMinHeight(120);
+        side.setMinWidth(300);
+        side.setPrefWidth(340);
+        side.setMaxWidth(460);
+        bench.setMinSize(420, 200);
+        beam.setMinSize(320, 200);
+        closeUp.setMinSize(230, 200);
+        whole = split(Orientation.HORIZONTAL, pictures, side);
+        SplitPane.setResizableWithParent(side, false);
+        setCenter(whole);
+        setTop(new VBox(notice));
+        setBottom(status());
+        addEventFilter(KeyEvent.KEY_PRESSED, this::paneKey);
+        addEventHandler(DragEvent.DRAG_OVER, this::dragged);
+        addEventHandler(DragEvent.DRAG_DROPPED, this::dropped);
+        setTheme(theme);
+        show(session.shown());
+    }
+
+    private static SplitPane split(Orientation orientation, Node... panes) {
+        SplitPane split = new SplitPane(panes);
+        split.setOrientation(orientation);
+        return split;
+    }
+
+    private HBox status() {
+        Region gap = new Region();
+        HBox.setHgrow(gap, Priority.ALWAYS);
+        said.setId("said");
+        said.setMinWidth(0);
+        facts.setId("facts");
+        facts.getStyleClass().add("quiet");
+        facts.setMinWidth(Region.USE_PREF_SIZE);
+        HBox status = new HBox(said, gap, facts);
+        status.getStyleClass().add("status");
+        return status;
+    }
+
+    /** The document. */
+    public Session session() {
+        return session;
+    }
+
+    /** Puts menus and a toolbar on top. */
+    void setBars(Node menus, Node toolbar) {
+        setTop(new VBox(menus, toolbar, notice));
+    }
+
+    /** Is told what the window's title should be. */
+    void onTitle(Consumer<String> listener) {
+        titles = listener;
+    }
+
+    /** Is told of every file that was opened, good or bad. */
+    void onOpened(Consumer<Path> listener) {
+        opened = listener;
+    }
+
+    /** The theme. */
+    public Theme theme() {
+        return theme;
+    }
+
+    /** Changes the theme. */
+    public void setTheme(Theme next) {
+        theme = next;
+        Look.apply(this, next);
+        bench.setTheme(next);
+        beam.setTheme(next);
+        closeUp.setTheme(next);
+        stability.setTheme(next);
+    }
+
+    /** Positions of the dividers, 0 to 1. */
+    List<Double> dividers() {
+        return List.of(
+                whole.getDividerPositions()[0], pictures.getDividerPositions()[0], lower.getDividerPositions()[0]);
+    }
+
+    /** Moves the dividers. */
+    void setDividers(List<Double> positions) {
+        whole.setDividerPositions(positions.get(0));
+        pictures.setDividerPositions(positions.get(1));
+        lower.setDividerPositions(positions.get(2));
+    }
+
+    /** Shows all of the bench and of the path. */
+    public void showAll() {
+        bench.showAll();
+        beam.showAll();
+    }
+
+    /** Zooms the bench. */
+    void zoom(boolean in) {
+        bench.zoom(in);
+    }
+
+    /** Draws the beam on the bench so many times wider than true, or by itself. */
+    public void magnify(OptionalDouble factor) {
+        bench.magnify(factor);
+    }
+
+    /** Copies the figures of the selected part. */
+    void copyFigures() {
+        part.copy();
+    }
+
+    /** Taken before the controls see it: some use the key for themselves. */
+    private void paneKey(KeyEvent e) {
+        if (e.getCode() == KeyCode.F6 && !e.isShortcutDown() && !e.isAltDown()) {
+            nextPane(e.isShiftDown());
+            e.consume();
+        }
+    }
+
+    /** Moves the keyboard to the next pane, or back. */
+    void nextPane(boolean back) {
+        List<Node> panes = List.of(bench, beam, part.lookup("#figures-scroll"), parts.lookup("#parts"));
+        int at = 0;
+        for (int i = 0; i < panes.size(); i++) {
+            if (holdsFocus(panes.get(i))) {
+                at = back ? i - 1 : i + 1;
+            }
+        }
+        panes.get(Math.floorMod(at, panes.size())).requestFocus();
+    }
+
+    private boolean holdsFocus(Node pane) {
+        for (Node n = getScene().getFocusOwner(); n != null; n = n.getParent()) {
+            if (n.equals(pane)) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private void show(Shown shown) {
+        boolean isOther = !shown.source().equals(source);
+        source = shown.source();
+        bench.show(shown, isOther);
+        beam.show(shown, isOther);
+        closeUp.show(shown);
+        stability.show(shown);
+        part.show(shown);
+        parts.show(shown);
+        problems.show(shown);
+        notice.show(shown);
+        said.setText(StatusWords.said(shown));
+        facts.setText(StatusWords.facts(shown));
+        if (isOther) {
+            shown.source().flatMap(Source::file).ifPresent(opened);
+        }
+        titles.accept(StatusWords.title(shown));
+    }
+
+    private static Optional<Path> dragged(List<java.io.File> files) {
+        return files.stream().map(java.io.File::toPath).findFirst();
+    }
+
+    private void dragged(DragEvent e) {
+        if (e.getDragboard().hasFiles()) {
+            e.acceptTransferModes(TransferMode.COPY);
+            e.consume();
+        }
+    }
+
+    private void dropped(DragEvent e) {
+        Optional<Path> file = dragged(e.getDragboard().getFiles());
+        file.ifPresent(session::open);
+        e.setDropCompleted(file.isPresent());
+        e.consume();
+    }
+}

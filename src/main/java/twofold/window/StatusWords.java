@@ -1,0 +1,50 @@
+package twofold.window;
+
+import java.util.Optional;
+import twofold.cavity.Cavity;
+import twofold.cavity.State;
+import twofold.design.Unit;
+import twofold.session.Shown;
+import twofold.session.Source;
+
+/** What the status line and the window's title say. */
+final class StatusWords {
+    private static final String PROGRAM = "Twofold";
+
+    private StatusWords() {}
+
+    static String title(Shown shown) {
+        return shown.source().map(Source::name).map(n -> n + " – " + PROGRAM).orElse(PROGRAM);
+    }
+
+    static String said(Shown shown) {
+        if (shown.failure().isPresent()) {
+            return "The file cannot be read: " + shown.failure().get();
+        }
+        if (!shown.problems().isEmpty()) {
+            int count = shown.problems().size();
+            return count == 1 ? "The file has a problem." : "The file has " + count + " problems.";
+        }
+        return shown.cavity().map(StatusWords::said).orElse("Nothing is open.");
+    }
+
+    private static String said(Cavity cavity) {
+        State t = cavity.tangential().state();
+        State s = cavity.sagittal().state();
+        if (t == State.STABLE && s == State.STABLE) {
+            return "Both planes are stable.";
+        }
+        if (t == s) {
+            return t == State.EDGE ? "Both planes stand on the edge of stability." : "Neither plane is stable.";
+        }
+        return "Tangential " + t.word() + ", sagittal " + s.word() + ".";
+    }
+
+    static String facts(Shown shown) {
+        Optional<Cavity> cavity = shown.cavity();
+        return cavity.map(c -> "round trip " + Unit.MM.shown(c.roundTrip()) + " mm · free spectral range "
+                        + Unit.MHZ.shown(c.freeSpectralRange()) + " MHz · "
+                        + Unit.NM.text(c.laid().design().wavelength()) + " nm")
+                .orElse("");
+    }
+}
