@@ -1,0 +1,109 @@
+package twofold.window;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import javafx.scene.Node;
+import javafx.scene.Parent;
+import javafx.scene.control.Control;
+import javafx.scene.control.Label;
+import javafx.scene.control.Labeled;
+import javafx.scene.control.MenuBar;
+import javafx.scene.control.ScrollBar;
+import javafx.scene.control.SplitPane;
+import javafx.scene.image.WritableImage;
+import javafx.scene.paint.Color;
+import org.jspecify.annotations.Nullable;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.Tag;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import twofold.picture.Ink;
+import twofold.picture.Theme;
+
+/** Every control has a name, and every screen is drawn in both themes, at every size. */
+@Tag("headless-only")
+class AccessibleWindowTest {
+    @TempDir
+    @SuppressWarnings("NullAway.Init") // set by JUnit
+    Path folder;
+
+    private @Nullable Stagehand stage;
+
+    @AfterEach
+    void close() throws Exception {
+        if (stage != null) {
+            stage.close();
+        }
+    }
+
+    private static void walk(Node node, List<Node> to) {
+        to.add(node);
+        if (node instanceof Parent parent) {
+            parent.getChildrenUnmodifiable().forEach(child -> walk(child, to));
+        }
+    }
+
+    private static boolean isNamed(Node node) {
+        String name = node.getAccessibleText();
+        boolean text = node instanceof Labeled labeled
+                && labeled.getText() != null
+                && !labeled.getText().isBlank();
+        return text || (name != null && !name.isBlank());
+    }
+
+    @Test
+    void everyControlHasAnAccessibleName() throws Exception {
+        Stagehand opened = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
+        stage = opened;
+        opened.openSample("z-fold-rod.json");
+        List<Node> all = new ArrayList<>();
+        Stagehand.fx(() -> {
+            walk(opened.editor(), all);
+            return true;
+        });
+        List<Node> reached = all.stream()
+                .filter(n -> n instanceof Control || n instanceof DrawingPane)
+                .filter(n -> n.isFocusTraversable() || n instanceof DrawingPane || n instanceof MenuBar)
+                .filter(n -> !(n instanceof ScrollBar) && !(n instanceof SplitPane) && !(n instanceof Label))
+                .toList();
+        assertThat(reached).hasSizeGreaterThan(8);
+        assertThat(reached)
+                .allSatisfy(n -> assertThat(isNamed(n)).as("%s has a name", n).isTrue());
+    }
+
+    @ParameterizedTest
+    @CsvSource({
+        "z-fold-rod, 1024, 700", "z-fold-rod, 1280, 800", "z-fold-rod, 1920, 1080",
+        "bow-tie-doubler, 1280, 800", "x-fold, 1920, 1080", "triangle-ring, 1280, 800",
+        "v-fold-pumped, 1280, 800", "gas-tube, 1280, 800", "one-plane, 1920, 1080"
+    })
+    void everyScreenIsDrawnInBothThemes(String sample, int width, int height) throws Exception {
+        Stagehand opened = Stagehand.open(folder.resolve("settings.json"), width, height);
+        stage = opened;
+        opened.openSample(sample + ".json");
+        for (Theme theme : Theme.values()) {
+            Stagehand.fx(() -> {
+                opened.editor().setTheme(theme);
+                return true;
+            });
+            WritableImage image = opened.picture(sample + "-" + width + "-" + theme.word());
+            Color paper = Color.web(theme.css(Ink.PAPER));
+            int onPaper = 0;
+            int inked = 0;
+            for (int x = 40; x < width - 400; x += 3) {
+                for (int y = 120; y < height - 60; y += 3) {
+                    boolean isPaper = image.getPixelReader().getColor(x, y).equals(paper);
+                    onPaper += isPaper ? 1 : 0;
+                    inked += isPaper ? 0 : 1;
+                }
+            }
+            assertThat(onPaper).as("the drawings' paper in the theme %s", theme).isGreaterThan(inked);
+            assertThat(inked).as("something is drawn").isGreaterThan(2000);
+        }
+    }
+}

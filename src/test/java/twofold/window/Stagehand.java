@@ -1,0 +1,184 @@
+package twofold.window;
+
+import static java.util.concurrent.TimeUnit.SECONDS;
+
+import java.io.File;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.concurrent.Callable;
+import java.util.concurrent.FutureTask;
+import javafx.application.Platform;
+import javafx.embed.swing.SwingFXUtils;
+import javafx.geometry.Point2D;
+import javafx.scene.Node;
+import javafx.scene.image.WritableImage;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.MouseButton;
+import javafx.scene.robot.Robot;
+import javafx.stage.Stage;
+import javax.imageio.ImageIO;
+import org.testfx.api.FxToolkit;
+import twofold.session.Runner;
+
+/** An editor in a window for tests: made and driven on the toolkit's thread, reading and solving on the spot. */
+final class Stagehand {
+    private final Stage stage;
+    private final Editor editor;
+    private final Robot robot;
+
+    private Stagehand(Stage stage, Editor editor, Robot robot) {
+        this.stage = stage;
+        this.editor = editor;
+        this.robot = robot;
+    }
+
+    /** A window of a size with nothing open, at the corner of the screen. */
+    static Stagehand open(Path settings, double width, double height) throws Exception {
+        // TestFX must be the one that starts the toolkit: after another start its own robot gets no input.
+        FxToolkit.registerPrimaryStage();
+        Platform.setImplicitExit(false);
+        Recall recall = new Recall(settings);
+        recall.change(s -> s.sized(width, height, false, s.splits()));
+        Stagehand hand = fx(() -> {
+            Stage stage = new Stage();
+            Editor editor = new Editor(Runner.onTheSpot());
+            stage.setX(0);
+            stage.setY(0);
+            App.show(stage, editor, recall);
+            return new Stagehand(stage, editor, new Robot());
+        });
+        settle();
+        return hand;
+    }
+
+    /** Does something on the toolkit's thread. */
+    static <T> T fx(Callable<T> work) throws Exception {
+        FutureTask<T> task = new FutureTask<>(work);
+        Platform.runLater(task);
+        return task.get(20, SECONDS);
+    }
+
+    /** Waits until what the last turns posted has run and was drawn. */
+    static void settle() throws Exception {
+        for (int i = 0; i < 3; i++) {
+            fx(() -> true);
+        }
+    }
+
+    Editor editor() {
+        return editor;
+    }
+
+    Stage stage() {
+        return stage;
+    }
+
+    /** A node by its id. */
+    <T extends Node> T node(String id, Class<T> type) {
+        return type.cast(editor.lookup("#" + id));
+    }
+
+    void openSample(String name) throws Exception {
+        fx(() -> {
+            editor.session().openSample(name);
+            return true;
+        });
+        settle();
+    }
+
+    void open(Path file) throws Exception {
+        fx(() -> {
+            editor.session().open(file);
+            return true;
+        });
+        settle();
+    }
+
+    /** Moves the mouse to a point of a node. */
+    void move(Node on, double x, double y) throws Exception {
+        fx(() -> {
+            Point2D at = on.localToScreen(x, y);
+            robot.mouseMove(at);
+            return true;
+        });
+        settle();
+    }
+
+    void click(Node on, double x, double y) throws Exception {
+        move(on, x, y);
+        fx(() -> {
+            robot.mousePress(MouseButton.PRIMARY);
+            return true;
+        });
+        settle();
+        fx(() -> {
+            robot.mouseRelease(MouseButton.PRIMARY);
+            return true;
+        });
+        settle();
+    }
+
+    void drag(Node on, MouseButton button, double x, double y, double dx, double dy) throws Exception {
+        move(on, x, y);
+        fx(() -> {
+            robot.mousePress(button);
+            return true;
+        });
+        settle();
+        for (int i = 1; i <= 4; i++) {
+            move(on, x + dx * i / 4, y + dy * i / 4);
+        }
+        fx(() -> {
+            robot.mouseRelease(button);
+            return true;
+        });
+        settle();
+    }
+
+    void wheel(int steps) throws Exception {
+        fx(() -> {
+            robot.mouseWheel(steps);
+            return true;
+        });
+        settle();
+    }
+
+    void press(KeyCode... keys) throws Exception {
+        fx(() -> {
+            for (KeyCode key : keys) {
+                robot.keyPress(key);
+            }
+            return true;
+        });
+        settle();
+        fx(() -> {
+            for (int i = keys.length - 1; i >= 0; i--) {
+                robot.keyRelease(keys[i]);
+            }
+            return true;
+        });
+        settle();
+    }
+
+    /** A picture of the whole window, kept under target for looking at. */
+    WritableImage picture(String name) throws Exception {
+        settle();
+        WritableImage image = fx(() -> editor.getScene().snapshot(null));
+        File file = Path.of("target", "window", name + ".png").toFile();
+        Files.createDirectories(file.toPath().getParent());
+        if (!ImageIO.write(SwingFXUtils.fromFXImage(image, null), "png", file)) {
+            throw new IOException("no PNG was written: " + file);
+        }
+        return image;
+    }
+
+    /** Closes the window. */
+    void close() throws Exception {
+        fx(() -> {
+            stage.hide();
+            return true;
+        });
+        settle();
+    }
+}
