@@ -12,12 +12,17 @@ import java.util.OptionalInt;
 import java.util.stream.Stream;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import twofold.Samples;
 import twofold.cavity.Cavity;
 import twofold.design.Design;
 
 /** What makes a drawing readable, whatever is drawn: text within its pane, large enough, never on other text. */
 class ReadableTest {
     static Stream<Design> designs() {
+        return Stream.concat(Samples.files().stream().map(Samples::design), built());
+    }
+
+    private static Stream<Design> built() {
         return Stream.of(
                 Drawn.zFold(),
                 Drawn.bowTie(),

@@ -5,27 +5,22 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.ByteArrayInputStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 import java.util.Locale;
-import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.stream.Stream;
 import javax.xml.parsers.DocumentBuilderFactory;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.w3c.dom.Document;
+import twofold.Samples;
 import twofold.cavity.Cavity;
 import twofold.design.Design;
 
 /** Whole pages, compared with those that were looked at. */
 class SheetTest {
-    private static final Map<String, Design> DESIGNS = Map.of(
-            "z-fold", Drawn.zFold(),
-            "bow-tie", Drawn.bowTie(),
-            "triangle", Drawn.triangle(),
-            "long-v", Drawn.longV(),
-            "one-plane", Drawn.oneSided(),
-            "no-beam", Drawn.tooLong());
-
     private static String svg(Design design, double width, double height, Theme theme) {
         Cavity cavity = Drawn.solved(design);
         SvgPainter painter = new SvgPainter(width, height, theme, design.title());
@@ -33,28 +28,35 @@ class SheetTest {
         return painter.text();
     }
 
-    private static Design design(String name) {
-        Design design = DESIGNS.get(name);
-        if (design == null) {
-            throw new IllegalArgumentException(name);
-        }
-        return design;
+    static Stream<Path> samples() {
+        return Samples.files().stream();
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"z-fold", "bow-tie", "triangle", "long-v", "one-plane", "no-beam"})
-    void pagesLookAsTheyDid(String name) {
-        Golden.matches("sheet-" + name, svg(design(name), 1280, 800, Theme.LIGHT));
+    @MethodSource("samples")
+    void everySampleLooksAsItDid(Path file) {
+        String name = file.getFileName().toString().replace(".json", "");
+        Golden.matches("sheet-" + name, svg(Samples.design(file), 1280, 800, Theme.LIGHT));
+    }
+
+    @Test
+    void aDesignWithoutABeamLooksAsItDid() {
+        Golden.matches("sheet-no-beam", svg(Drawn.tooLong(), 1280, 800, Theme.LIGHT));
+    }
+
+    @Test
+    void everyKindOfPartLooksAsItDid() {
+        Golden.matches("sheet-every-kind", svg(Drawn.triangle(), 1280, 800, Theme.LIGHT));
     }
 
     @Test
     void aDarkPageLooksAsItDid() {
-        Golden.matches("sheet-z-fold-dark", svg(Drawn.zFold(), 1280, 800, Theme.DARK));
+        Golden.matches("sheet-z-fold-rod-dark", svg(Samples.design("z-fold-rod"), 1280, 800, Theme.DARK));
     }
 
     @Test
     void aSmallPageLooksAsItDid() {
-        Golden.matches("sheet-z-fold-small", svg(Drawn.zFold(), 640, 480, Theme.LIGHT));
+        Golden.matches("sheet-z-fold-rod-small", svg(Samples.design("z-fold-rod"), 640, 480, Theme.LIGHT));
     }
 
     @ParameterizedTest
@@ -71,14 +73,15 @@ class SheetTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"z-fold", "bow-tie", "triangle", "long-v", "one-plane", "no-beam"})
-    void svgIsWellFormedAndNamesItsSubject(String name) throws Exception {
-        byte[] bytes = svg(design(name), 1280, 800, Theme.DARK).getBytes(StandardCharsets.UTF_8);
+    @MethodSource("samples")
+    void svgIsWellFormedAndNamesItsSubject(Path file) throws Exception {
+        Design design = Samples.design(file);
+        byte[] bytes = svg(design, 1280, 800, Theme.DARK).getBytes(StandardCharsets.UTF_8);
         Document document =
                 DocumentBuilderFactory.newInstance().newDocumentBuilder().parse(new ByteArrayInputStream(bytes));
         assertThat(document.getDocumentElement().getTagName()).isEqualTo("svg");
         assertThat(document.getElementsByTagName("title").item(0).getTextContent())
-                .isEqualTo(design(name).title());
+                .isEqualTo(design.title());
     }
 
     @Test
