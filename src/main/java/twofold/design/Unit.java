@@ -3,7 +3,6 @@ package twofold.design;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
-import java.util.Locale;
 
 /**
  * The one place where numbers change units: decimal text in a file's or a person's unit against SI doubles.
@@ -114,9 +113,12 @@ public enum Unit {
 
     /** A number with a fixed count of decimals, never "-0". */
     public static String fixed(double value, int decimals) {
-        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
-        boolean zero = text.startsWith("-") && text.chars().noneMatch(c -> c >= '1' && c <= '9');
-        return zero ? text.substring(1) : text;
+        // Rounds the shortest decimal of the double, half up, as java.util.Formatter does, without its cost at every frame.
+        return Double.isFinite(value)
+                ? BigDecimal.valueOf(value)
+                        .setScale(decimals, RoundingMode.HALF_UP)
+                        .toPlainString()
+                : String.valueOf(value);
     }
 
     private static String plain(BigDecimal decimal) {

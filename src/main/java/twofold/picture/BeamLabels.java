@@ -18,6 +18,11 @@ final class BeamLabels {
     /** Distances of a number from its dot that are tried, px. */
     private static final double[] OFFS = {12, 22, 34, 48, 62, 76, 90, 106, 122};
 
+    /** From this distance on a number is tied to its dot, px. */
+    private static final double FAR = 30;
+
+    private static final Stroke TIE = Stroke.of(Ink.QUIET, 1, Dash.DOTTED);
+
     private final Cavity cavity;
     private final Course course;
     private final BeamView view;
@@ -93,7 +98,10 @@ final class BeamLabels {
             double bestX = Double.NaN;
             double bestY = 0;
             for (double off : OFFS) {
-                for (double x : new double[] {d.x() + 8, d.x() - 8 - width, d.x() - width / 2}) {
+                double[] places = off > FAR
+                        ? new double[] {d.x() - width / 2}
+                        : new double[] {d.x() + 8, d.x() - 8 - width, d.x() - width / 2};
+                for (double x : places) {
                     double y = d.y() + away * off;
                     double cost = room.cost(x - 1, y - 7, width + 2, 13) + off / 10;
                     boolean inside = x > view.stretch().left()
@@ -106,6 +114,9 @@ final class BeamLabels {
                 }
             }
             if (!Double.isNaN(bestX)) {
+                if (Math.abs(bestY - d.y()) > FAR) {
+                    painter.line(d.x(), d.y() + away * 6, d.x(), bestY - away * 8, TIE);
+                }
                 Pane.rectangle(points, bestX - 2, bestY - 7, width + 4, 14);
                 painter.polygon(points, Ink.PAPER, Pane.VEIL);
                 painter.text(text, bestX, bestY + 4, Type.SMALL, Pane.ink(d.plane()), Anchor.START);

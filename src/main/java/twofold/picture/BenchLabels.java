@@ -30,6 +30,9 @@ final class BenchLabels {
     /** Shares of a leg at which its length may stand. */
     private static final double[] SHARES = {0.5, 0.38, 0.62, 0.28, 0.72, 0.2, 0.8};
 
+    /** What it costs to stand nearer to another part, or behind other text. */
+    private static final double ASTRAY = 20;
+
     /** What a length may cover along its leg before it goes elsewhere. */
     private static final double ALONG = 60;
 
@@ -102,6 +105,10 @@ final class BenchLabels {
                 double x = frame.x() + ex * away;
                 double y = frame.y() + ey * away;
                 double cost = room.cost(x - width / 2 - 2, y - height / 2 - 1, width + 4, height + 2) + ring + i;
+                if (cost < best
+                        && (isNearerToAnother(s, frame, x, y) || room.crossesText(x, y, frame.x(), frame.y()))) {
+                    cost += ASTRAY;
+                }
                 if (cost < best) {
                     best = cost;
                     bestX = x;
@@ -126,6 +133,18 @@ final class BenchLabels {
         room.take(bestX - width / 2 - 3, bestY - height / 2 - 2, width + 6, height + 4, Room.TEXT);
     }
 
+    /** Whether a label would stand nearer to another part than to its own. */
+    private boolean isNearerToAnother(Stand own, Frame frame, double x, double y) {
+        double mine = Math.hypot(frame.x() - x, frame.y() - y);
+        for (Stand s : stands) {
+            Frame other = s.frame(view.viewport());
+            if (s.part() != own.part() && Math.hypot(other.x() - x, other.y() - y) < mine) {
+                return true;
+            }
+        }
+        return false;
+    }
+
     /** How far a part and its mount reach in a direction on the pane, px. */
     private static double reach(Part part, Stand s, Frame frame, double ex, double ey) {
         double ahead = ex * frame.ux() - ey * frame.uy();
@@ -142,6 +161,7 @@ final class BenchLabels {
                 (width / 2 + 3) / Math.max(1e-9, Math.abs(dx)), (height / 2 + 2) / Math.max(1e-9, Math.abs(dy)));
         if (share < 1) {
             painter.line(x + share * dx, y + share * dy, toX, toY, LEADER);
+            room.take(x + share * dx, y + share * dy, toX, toY, 0, 0, Room.TEXT);
         }
     }
 
@@ -220,6 +240,9 @@ final class BenchLabels {
                 double x = toX + Math.cos(angle) * (half + 34 + 26 * ring);
                 double y = toY - Math.sin(angle) * (34 + 26 * ring);
                 double cost = room.cost(x - half - 2, y - LINE / 2, 2 * half + 4, LINE) + ring;
+                if (cost < best && room.crossesText(x, y, toX, toY)) {
+                    cost += ASTRAY;
+                }
                 if (cost < best) {
                     best = cost;
                     bestX = x;

@@ -18,6 +18,9 @@ import twofold.optics.Plane;
  * that it is centred, and how the Rayleigh length compares with the part's length.
  */
 public final class CloseUpDrawing {
+    /** The least height at which curves and words do not touch, px. */
+    public static final double LEAST_HEIGHT = 160;
+
     private static final double RIM = 14;
     private static final double LINE = 15;
     private static final double TOP = 64;

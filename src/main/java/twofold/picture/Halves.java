@@ -143,8 +143,11 @@ final class Halves {
         for (Plane plane : Plane.values()) {
             Eigenmode mode = cavity.mode(plane);
             for (Waist w : mode.waists()) {
-                double path = course.start(w.leg()) + w.start() + w.after();
-                if (w.isReal() && w.length() > 0 && path >= stretch.from() && path <= stretch.to()) {
+                // A waist on an end mirror may lie off its stretch by rounding.
+                double after = Math.min(w.length(), Math.max(0, w.after()));
+                double path = course.start(w.leg()) + w.start() + after;
+                double slack = 1e-9 * course.length();
+                if (w.isReal() && w.length() > 0 && path >= stretch.from() - slack && path <= stretch.to() + slack) {
                     dots.add(new Dot(plane, w, path, stretch.x(path), y(plane, w.radius())));
                 }
             }

@@ -4,7 +4,7 @@ import java.util.Locale;
 
 /**
  * The named colours, each with its value in either theme: the one source of colours, for drawings and for the window's
- * style sheet. Which inks may stand on which is listed in Contrast.
+ * style sheet. Which ink may stand on what is listed, and computed, in {@code ContrastTest}.
  */
 public enum Ink {
     /** Behind drawings and lists. */

@@ -3,7 +3,7 @@ package twofold.picture;
 /** Round numbers: 1, 2 or 5 times a power of ten for ticks, some more for magnifications. */
 final class Nice {
     private static final double[] TICKS = {1, 2, 5, 10};
-    private static final double[] FACTORS = {1, 1.5, 2, 3, 5, 7, 10};
+    private static final double[] FACTORS = {1, 1.5, 2, 3, 5, 10};
     private static final double[] TOPS = {
         1, 1.1, 1.2, 1.3, 1.4, 1.5, 1.6, 1.8, 2, 2.2, 2.5, 2.8, 3, 3.3, 3.6, 4, 4.5, 5, 5.5, 6, 6.5, 7, 7.5, 8, 9, 10
     };

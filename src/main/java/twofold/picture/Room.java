@@ -1,7 +1,5 @@
 package twofold.picture;
 
-import java.util.Arrays;
-
 /**
  * What is taken on a pane, in square cells: lets labels find a free place by looking, cheaply enough for every mouse move.
  * Each cell holds the dearest thing that covers it.
@@ -122,8 +120,17 @@ final class Room {
         return sum;
     }
 
-    /** Forgets everything. */
-    void clear() {
-        Arrays.fill(taken, (byte) 0);
+    /** Whether a straight line runs across text. */
+    boolean crossesText(double x1, double y1, double x2, double y2) {
+        int along = steps(Math.hypot(x2 - x1, y2 - y1) / CELL);
+        for (int i = 0; i <= along; i++) {
+            double share = (double) i / along;
+            int column = (int) Math.floor((x1 + share * (x2 - x1)) / CELL);
+            int row = (int) Math.floor((y1 + share * (y2 - y1)) / CELL);
+            if (column >= 0 && column < columns && row >= 0 && row < rows && taken[row * columns + column] == TEXT) {
+                return true;
+            }
+        }
+        return false;
     }
 }

@@ -50,8 +50,6 @@ public final class Sheet {
         Points points = new Points();
         Pane.rectangle(points, 0, 0, width, height);
         painter.polygon(points, Ink.DESK, 1);
-        boolean wide = width >= WIDE;
-        head(cavity, painter, width, wide);
         double inner = width - 2 * GAP;
         double free = height - HEAD - 2 * GAP;
         BenchDrawing bench = new BenchDrawing(cavity);
@@ -61,6 +59,8 @@ public final class Sheet {
         double low = HEAD + benchHeight + GAP;
         double lowHeight = height - GAP - low;
 
+        boolean wide = width >= WIDE && lowHeight >= StabilityDrawing.HEIGHT + GAP + CloseUpDrawing.LEAST_HEIGHT;
+        head(cavity, painter, width, wide);
         BenchView whole = bench.all(inner, benchHeight);
         BenchView view = magnify.isPresent() ? whole.magnified(magnify.getAsDouble()) : whole;
         pane(painter, points, GAP, HEAD, inner, benchHeight, () -> bench.draw(painter, view));

@@ -1,11 +1,11 @@
 /**
  * The bench, the beam and what belongs to them as pictures, described once to a narrow {@link twofold.picture.Painter}.
  *
- * <p>A drawing is a class that draws a {@link twofold.cavity.Cavity} onto a painter: BenchDrawing,
- * BeamDrawing, CloseUpDrawing, {@link twofold.picture.StabilityDrawing};
- * Sheet puts bench and beam on one page. Painters: SvgPainter and
- * ImagePainter here, the window's canvas there. No toolkit is needed; java.awt is used only to
- * measure text and to paint PNG.
+ * <p>A drawing is a class that draws a {@link twofold.cavity.Cavity} onto a painter: {@link twofold.picture.BenchDrawing},
+ * {@link twofold.picture.BeamDrawing}, {@link twofold.picture.CloseUpDrawing}, {@link twofold.picture.StabilityDrawing};
+ * {@link twofold.picture.Sheet} puts bench and beam on one page. Painters: {@link twofold.picture.SvgPainter} and
+ * {@link twofold.picture.ImagePainter} here, the window's canvas there. No toolkit is needed; java.awt is used to paint PNG
+ * and for nothing else.
  *
  * <p>Guarantees: the same description gives the same picture on every painter, and the same SVG bytes on every run and in
  * every locale. Colours are {@link twofold.picture.Ink} tokens with one table of values. Tangential and sagittal are

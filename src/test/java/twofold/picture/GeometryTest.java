@@ -3,6 +3,7 @@ package twofold.picture;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.Locale;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
 import twofold.design.Point;
@@ -115,6 +116,18 @@ class GeometryTest {
         assertThat(Figures.nm(632.8e-9)).isEqualTo("632.8 nm");
         assertThat(Figures.mhz(124.0037e6)).isEqualTo("124.00 MHz");
         assertThat(Figures.times(169.75)).isEqualTo("170 ×");
+    }
+
+    @Test
+    void figuresRoundAsTheTextAnswersDo() {
+        for (int i = 0; i < 2000; i++) {
+            // Ties of the decimal among them: 0.5 steps of the last place.
+            double value = i % 2 == 0 ? (random.nextInt(20000) - 10000) / 2000.0 : 100 * random.nextGaussian();
+            int decimals = random.nextInt(4);
+            String other = String.format(Locale.ROOT, "%." + decimals + "f", value);
+            boolean zero = other.startsWith("-") && other.chars().noneMatch(c -> c >= '1' && c <= '9');
+            assertThat(Figures.fixed(value, decimals)).isEqualTo(zero ? other.substring(1) : other.replace('-', '−'));
+        }
     }
 
     @Test
