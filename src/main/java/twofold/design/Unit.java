@@ -113,7 +113,8 @@ public enum Unit {
 
     /** A number with a fixed count of decimals, never "-0". */
     public static String fixed(double value, int decimals) {
-        // Rounds the shortest decimal of the double, half up, as java.util.Formatter does, without its cost at every frame.
+        // Rounds the shortest decimal of the double, half up, as java.util.Formatter does, without its cost at every
+        // frame.
         return Double.isFinite(value)
                 ? BigDecimal.valueOf(value)
                         .setScale(decimals, RoundingMode.HALF_UP)

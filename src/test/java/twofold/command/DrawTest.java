@@ -39,7 +39,7 @@ class DrawTest {
     @ParameterizedTest
     @MethodSource("samples")
     void everySampleIsDrawnAsItsKeptPicture(Path sample) throws Exception {
-        Golden.matches("sample-" + sample.getFileName().toString().replace(".json", ""), draw(sample.toString()));
+        Golden.matches("sheet-" + sample.getFileName().toString().replace(".json", ""), draw(sample.toString()));
     }
 
     @Test
