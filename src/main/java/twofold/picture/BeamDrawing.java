@@ -56,7 +56,15 @@ public final class BeamDrawing {
         return course;
     }
 
-    /** A waist's dot in the pane. */
+    /**
+     * A waist that lies within its stretch, as a dot in the pane.
+     *
+     * @param plane whose
+     * @param waist which
+     * @param path from the first mirror, m
+     * @param x px
+     * @param y px
+     */
     public record WaistDot(Plane plane, Waist waist, double path, double x, double y) {}
 
     /** Where things lie across the pane, px. */
@@ -105,8 +113,8 @@ public final class BeamDrawing {
         painter.line(s.left(), rows.middle(), s.right(), rows.middle(), Stroke.of(Ink.AXIS, 1, Dash.DASH_DOT));
         new BeamLabels(cavity, course, view, painter).names(rows.top(), rows.up());
         lane(painter, view, rows);
-        List<Halves.Dot> dots = halves.dots();
-        for (Halves.Dot d : dots) {
+        List<WaistDot> dots = halves.dots();
+        for (WaistDot d : dots) {
             Pane.waist(painter, d.plane(), d.x(), d.y(), points);
         }
         BeamLabels labels = new BeamLabels(cavity, course, view, painter);
@@ -159,11 +167,15 @@ public final class BeamDrawing {
         String unit = "path, mm";
         double free = s.right() - Lettering.width(unit, Type.SMALL) - 10;
         painter.text(unit, s.right(), rows.bottom() + 18, Type.SMALL, Ink.QUIET, Anchor.END);
+        // The crosshair's own number stands in the row of numbers.
+        double crossing = view.crosshair().isPresent() ? s.x(view.crosshair().getAsDouble()) : Double.NEGATIVE_INFINITY;
+        double taken = Lettering.width(Figures.mm(s.to()), Type.STRONG) / 2 + 6;
         for (double k = Math.ceil(s.from() * 1e3 / step - 1e-9); k * step <= s.to() * 1e3 * (1 + 1e-12); k++) {
             double x = s.x(k * step * 1e-3);
             painter.line(x, rows.bottom(), x, rows.bottom() + 4, Stroke.of(Ink.AXIS, 1));
             String text = Figures.fixed(k * step, decimals);
-            if (x + Lettering.width(text, Type.SMALL) / 2 < free) {
+            double half = Lettering.width(text, Type.SMALL) / 2;
+            if (x + half < free && Math.abs(x - crossing) > half + taken) {
                 painter.text(text, x, rows.bottom() + 18, Type.SMALL, Ink.QUIET, Anchor.MIDDLE);
             }
         }
@@ -236,11 +248,11 @@ public final class BeamDrawing {
         Halves halves = halves(view, Rows.of(view));
         WaistDot best = null;
         double least = tolerance;
-        for (Halves.Dot d : halves.dots()) {
+        for (WaistDot d : halves.dots()) {
             double off = Math.hypot(d.x() - x, d.y() - y);
             if (off <= least) {
                 least = off;
-                best = new WaistDot(d.plane(), d.waist(), d.path(), d.x(), d.y());
+                best = d;
             }
         }
         return Optional.ofNullable(best);

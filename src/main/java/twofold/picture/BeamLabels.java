@@ -79,18 +79,18 @@ final class BeamLabels {
     }
 
     /** The radii of waists, on the side away from the axis, as far as they find room. */
-    void numbers(List<Halves.Dot> dots, Halves halves, double top, double bottom, Points points) {
+    void numbers(List<BeamDrawing.WaistDot> dots, Halves halves, double top, double bottom, Points points) {
         Room room = new Room(view.width(), view.height());
         room.take(0, 0, view.width(), top - 4, Room.TEXT);
         room.take(0, bottom, view.width(), view.height(), Room.TEXT);
         halves.take(room);
-        for (Halves.Dot d : dots) {
+        for (BeamDrawing.WaistDot d : dots) {
             room.take(d.x() - 4, d.y() - 4, 8, 8, Room.TEXT);
         }
-        List<Halves.Dot> narrowFirst = dots.stream()
+        List<BeamDrawing.WaistDot> narrowFirst = dots.stream()
                 .sorted(Comparator.comparingDouble(d -> d.waist().radius()))
                 .toList();
-        for (Halves.Dot d : narrowFirst) {
+        for (BeamDrawing.WaistDot d : narrowFirst) {
             String text = Figures.um(d.waist().radius());
             double width = Lettering.width(text, Type.SMALL);
             double away = d.plane() == Plane.TANGENTIAL ? -1 : 1;
@@ -141,10 +141,14 @@ final class BeamLabels {
         double at = leftwards ? x - 8 : x + 8;
         Anchor anchor = leftwards ? Anchor.END : Anchor.START;
         for (Plane plane : Plane.values()) {
-            double y = plane == Plane.TANGENTIAL ? top + 12 : bottom - 5;
+            boolean above = plane == Plane.TANGENTIAL;
             cavity.mode(plane).radiusAt(leg, path - course.start(leg)).ifPresent(radius -> {
+                double curve = halves.y(plane, radius);
+                double outer = above ? top + 12 : bottom - 5;
+                double inner = above ? halves.y(plane, 0) - 6 : halves.y(plane, 0) + 15;
+                double y = Math.abs(outer - curve) > Math.abs(inner - curve) ? outer : inner;
                 veiled(Figures.um(radius), at, y, Pane.ink(plane), anchor, points);
-                Pane.circle(points, x, halves.y(plane, radius), 3);
+                Pane.circle(points, x, curve, 3);
                 painter.polygon(points, Ink.CROSSHAIR, 1);
             });
         }

@@ -180,7 +180,7 @@ public final class CloseUpDrawing {
             double middle = stretch.x(course.middle(centred.getAsInt()));
             painter.line(middle, axis - half, middle, axis + half, Stroke.of(Ink.CRYSTAL_EDGE, 1.2, Dash.DOTTED));
         }
-        for (Halves.Dot d : halves.dots()) {
+        for (BeamDrawing.WaistDot d : halves.dots()) {
             painter.line(d.x(), axis, d.x(), d.y(), Pane.line(d.plane(), 1.6));
             Pane.waist(painter, d.plane(), d.x(), d.y(), points);
         }

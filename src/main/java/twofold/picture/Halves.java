@@ -126,20 +126,9 @@ final class Halves {
         }
     }
 
-    /**
-     * A waist that lies within its stretch.
-     *
-     * @param plane whose
-     * @param waist which
-     * @param path from the first mirror, m
-     * @param x of its dot, px
-     * @param y of its dot, px
-     */
-    record Dot(Plane plane, Waist waist, double path, double x, double y) {}
-
     /** Every real waist that the stretch shows. */
-    List<Dot> dots() {
-        List<Dot> dots = new ArrayList<>();
+    List<BeamDrawing.WaistDot> dots() {
+        List<BeamDrawing.WaistDot> dots = new ArrayList<>();
         for (Plane plane : Plane.values()) {
             Eigenmode mode = cavity.mode(plane);
             for (Waist w : mode.waists()) {
@@ -148,7 +137,7 @@ final class Halves {
                 double path = course.start(w.leg()) + w.start() + after;
                 double slack = 1e-9 * course.length();
                 if (w.isReal() && w.length() > 0 && path >= stretch.from() - slack && path <= stretch.to() + slack) {
-                    dots.add(new Dot(plane, w, path, stretch.x(path), y(plane, w.radius())));
+                    dots.add(new BeamDrawing.WaistDot(plane, w, path, stretch.x(path), y(plane, w.radius())));
                 }
             }
         }

@@ -8,11 +8,16 @@ final class Room {
     /** Side of a cell, px. */
     private static final double CELL = 4;
 
-    /** Cost of covering a beam, a mount, a part's body, another text; and of leaving the pane. */
+    /** What it costs to cover a cell of a mount. */
+    static final byte MOUNT = 1;
+
+    /** Of a beam. */
     static final byte BEAM = 2;
 
-    static final byte MOUNT = 1;
+    /** Of a part's body. */
     static final byte BODY = 12;
+
+    /** Of other text. */
     static final byte TEXT = 120;
 
     private final int columns;
