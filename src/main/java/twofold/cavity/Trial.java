@@ -237,8 +237,18 @@ public final class Trial {
                     case MATRIX -> {
                         t.store(tangential, mark);
                         s.store(sagittal, mark);
-                        t.matrix(v, b + Chain.MATRIX_T);
-                        s.matrix(v, b + Chain.MATRIX_S);
+                        int m = b + Chain.MATRIX_T;
+                        t.become(
+                                t.first(v[m], v[m + 1]),
+                                t.second(v[m], v[m + 1]),
+                                t.first(v[m + 2], v[m + 3]),
+                                t.second(v[m + 2], v[m + 3]));
+                        m = b + Chain.MATRIX_S;
+                        s.become(
+                                s.first(v[m], v[m + 1]),
+                                s.second(v[m], v[m + 1]),
+                                s.first(v[m + 2], v[m + 3]),
+                                s.second(v[m + 2], v[m + 3]));
                         mark += 4;
                     }
                     case APERTURE, MIRROR -> {}
@@ -259,13 +269,13 @@ public final class Trial {
             } else if (chain.ring) {
                 t.lens(power / cos[leg]);
                 s.lens(power * cos[leg]);
-                Mode.ring(t, closed, 0);
-                Mode.ring(s, closed, Mode.SIZE);
+                Mode.ring(t.a, t.b, t.c, t.d, closed, 0);
+                Mode.ring(s.a, s.b, s.c, s.d, closed, Mode.SIZE);
             } else {
                 t.lens(power / 2);
                 s.lens(power / 2);
-                Mode.standing(t, closed, 0);
-                Mode.standing(s, closed, Mode.SIZE);
+                Mode.standing(t.a, t.b, t.c, t.d, closed, 0);
+                Mode.standing(s.a, s.b, s.c, s.d, closed, Mode.SIZE);
                 t.lens(power / 2);
                 s.lens(power / 2);
                 t.store(tangential, 4 * chain.station[at]);

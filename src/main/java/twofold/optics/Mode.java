@@ -24,17 +24,20 @@ public final class Mode {
      * (ad + bc, 2bd, 2ac, ad + bc), h = 1 + 2bc = 2ad − 1 and 1 − h² = −4abcd: near an edge one factor is small and
      * keeps its own relative precision.
      *
-     * @param way the one-way matrix
+     * @param a of the one-way matrix
+     * @param b of the one-way matrix, m
+     * @param c of the one-way matrix, 1/m
+     * @param d of the one-way matrix
      * @param to array that takes the closed chain, read in the middle of the first mirror
      * @param at index of its first number
      */
-    public static void standing(Walk way, double[] to, int at) {
-        double ad = way.a * way.d;
-        double bc = way.b * way.c;
+    public static void standing(double a, double b, double c, double d, double[] to, int at) {
+        double ad = a * d;
+        double bc = b * c;
         double h = Math.abs(bc) < Math.abs(ad) ? 1 + 2 * bc : 2 * ad - 1;
         to[at] = h;
-        to[at + 1] = 2 * way.b * way.d;
-        to[at + 2] = 2 * way.a * way.c;
+        to[at + 1] = 2 * b * d;
+        to[at + 2] = 2 * a * c;
         to[at + 3] = h;
         to[at + HALF_TRACE] = h;
         to[at + ONE_MINUS_SQUARE] = -4 * ad * bc;
@@ -43,15 +46,21 @@ public final class Mode {
     /**
      * Closes a ring: the walk came back to its start. 1 − h² = −bc − ((a − d)/2)², as the determinant is 1.
      *
-     * @param round the round trip
+     * @param a of the round trip
+     * @param b of the round trip, m
+     * @param c of the round trip, 1/m
+     * @param d of the round trip
      * @param to array that takes the closed chain
      * @param at index of its first number
      */
-    public static void ring(Walk round, double[] to, int at) {
-        round.store(to, at);
-        double half = (round.a - round.d) / 2;
-        to[at + HALF_TRACE] = (round.a + round.d) / 2;
-        to[at + ONE_MINUS_SQUARE] = -round.b * round.c - half * half;
+    public static void ring(double a, double b, double c, double d, double[] to, int at) {
+        to[at] = a;
+        to[at + 1] = b;
+        to[at + 2] = c;
+        to[at + 3] = d;
+        double half = (a - d) / 2;
+        to[at + HALF_TRACE] = (a + d) / 2;
+        to[at + ONE_MINUS_SQUARE] = -b * c - half * half;
     }
 
     /** 1 − |h|, from 1 − h²; negative where unstable. */
