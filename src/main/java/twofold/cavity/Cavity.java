@@ -17,6 +17,9 @@ import twofold.optics.Plane;
  * @param tangentialLines where the tangential waist lies in each crystal and plate, by part; empty unless stable
  * @param sagittalLines where the sagittal waist lies in each crystal and plate, by part; empty unless stable
  * @param clearance gaps between mounts and beams
+ * @param judgements of the design's requirements, in order
+ * @param ledgerLeg number of the leg whose ledger is kept: the one with the first crystal, else with the smallest waist
+ * @param ledger what each part adds to the difference between the planes, at the lower edge; empty where there is none
  */
 public record Cavity(
         Laid laid,
@@ -25,13 +28,17 @@ public record Cavity(
         List<Lengths> lengths,
         Map<Integer, CrystalLine> tangentialLines,
         Map<Integer, CrystalLine> sagittalLines,
-        Clearance clearance) {
+        Clearance clearance,
+        List<Judgement> judgements,
+        Optional<Integer> ledgerLeg,
+        Optional<Ledger> ledger) {
     /** Speed of light in vacuum, m/s; exact by definition of the metre. */
     public static final double LIGHT = 299_792_458;
 
     /** Copies the collections. */
     public Cavity {
         lengths = List.copyOf(lengths);
+        judgements = List.copyOf(judgements);
         tangentialLines = Map.copyOf(tangentialLines);
         sagittalLines = Map.copyOf(sagittalLines);
     }
@@ -54,7 +61,7 @@ public record Cavity(
 
     /** Solves both planes of a laid-out design. */
     public static Cavity solve(Laid laid) {
-        return new Solver(laid).solve();
+        return Solver.solve(laid);
     }
 
     /** A plane's answer. */

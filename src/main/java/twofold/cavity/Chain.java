@@ -14,6 +14,7 @@ import twofold.design.Lens;
 import twofold.design.Matrix;
 import twofold.design.Mirror;
 import twofold.design.Part;
+import twofold.design.Place;
 import twofold.design.Plate;
 import twofold.design.Shape;
 import twofold.design.Slab;
@@ -127,7 +128,7 @@ public final class Chain {
 
     /** A trial filled with the design's numbers, for one thread. */
     public Trial trial() {
-        return new Trial(this, numbers.clone());
+        return new Trial(new Numbers(this, numbers.clone()));
     }
 
     /** What the chain was made from. */
@@ -138,6 +139,43 @@ public final class Chain {
     /** How many legs there are. */
     int legs() {
         return mirror.length - 1;
+    }
+
+    /**
+     * The index of the part with a name.
+     *
+     * @throws IllegalArgumentException if there is none
+     */
+    public int part(String name) {
+        return laid.design()
+                .indexOf(name)
+                .orElseThrow(() -> new IllegalArgumentException("no part is called \"" + name + "\""));
+    }
+
+    /**
+     * The number of the leg between two mirrors, named in either order.
+     *
+     * @throws IllegalArgumentException if no leg joins them
+     */
+    public int leg(Place place) {
+        int a = part(place.first());
+        int b = place.second().map(this::part).orElse(a);
+        for (int leg = 0; leg < legs(); leg++) {
+            if ((mirror[leg] == a && mirror[leg + 1] == b) || (mirror[leg] == b && mirror[leg + 1] == a)) {
+                return leg;
+            }
+        }
+        throw new IllegalArgumentException("\"" + place + "\" is no leg");
+    }
+
+    /** The leg that ends at a mirror; −1 for the first mirror of a standing wave. */
+    int legTo(int part) {
+        for (int leg = 0; leg < legs(); leg++) {
+            if (mirror[leg + 1] == part) {
+                return leg;
+            }
+        }
+        return -1;
     }
 
     /** One past the last part on a leg. */
@@ -153,7 +191,17 @@ public final class Chain {
      * @throws IllegalArgumentException with the names, where that number does not act on the light
      */
     public int slot(int part, Field field) {
-        int offset = switch (field) {
+        int offset = offset(field);
+        if (offset < 0 || !field.kinds().contains(kind[part])) {
+            throw new IllegalArgumentException(
+                    field.json() + " of \"" + laid.design().parts().get(part).name() + "\" is no number of the chain");
+        }
+        return part * STRIDE + offset;
+    }
+
+    /** Where a field's number stands among those of a part; −1 for one that light does not feel. */
+    static int offset(Field field) {
+        return switch (field) {
             case ROC -> ROC;
             case CURVATURE -> CURVATURE;
             case ALONG -> AT;
@@ -163,11 +211,11 @@ public final class Chain {
             case THERMAL_POWER -> THERMAL;
             default -> -1;
         };
-        if (offset < 0 || !field.kinds().contains(kind[part])) {
-            throw new IllegalArgumentException(
-                    field.json() + " of \"" + laid.design().parts().get(part).name() + "\" is no number of the chain");
-        }
-        return part * STRIDE + offset;
+    }
+
+    /** Whether a number was set to another value than the design's. */
+    boolean differs(int slot, double[] now) {
+        return numbers[slot] != now[slot];
     }
 
     /** Where a mirror's x stands. */

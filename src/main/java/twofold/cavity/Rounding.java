@@ -31,12 +31,25 @@ final class Rounding {
             double square = (difference + da + dd) * (da + dd) / 2;
             return (bc + square) / (1 + Math.abs(trial.halfTrace(plane)));
         }
-        double[] way = trial.way(plane);
-        double[] growth = grown.way(plane);
         // 1 − |h| is −2bc near h = 1 and 2ad near h = −1.
         return trial.halfTrace(plane) > 0
-                ? 2 * product(way[1], way[2], u * growth[1], u * growth[2])
-                : 2 * product(way[0], way[3], u * growth[0], u * growth[3]);
+                ? 2
+                        * product(
+                                trial.way(plane, 1),
+                                trial.way(plane, 2),
+                                u * grown.way(plane, 1),
+                                u * grown.way(plane, 2))
+                : 2
+                        * product(
+                                trial.way(plane, 0),
+                                trial.way(plane, 3),
+                                u * grown.way(plane, 0),
+                                u * grown.way(plane, 3));
+    }
+
+    /** The bound on the error of what is 0 at an edge of a zone. */
+    static double of(Trial trial, EdgeCause cause, Plane plane) {
+        return Math.sqrt(trial.steps()) * UNIT * cause.growth(trial.magnitudes(), plane);
     }
 
     /**

@@ -1,12 +1,16 @@
 package twofold.cavity;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Stream;
+import twofold.design.Edge;
 import twofold.design.Kind;
 import twofold.design.Part;
+import twofold.design.Requirement;
 import twofold.layout.Clearance;
 import twofold.layout.Laid;
 import twofold.layout.Leg;
@@ -23,22 +27,46 @@ final class Solver {
     private final Chain chain;
     private final Trial trial;
 
-    Solver(Laid laid) {
+    /**
+     * Of a trial that has run.
+     *
+     * @param laid what the trial's numbers state
+     */
+    Solver(Laid laid, Trial trial) {
         this.laid = laid;
-        this.chain = Chain.of(laid);
-        this.trial = chain.trial();
+        this.trial = trial;
+        this.chain = trial.numbers.chain;
     }
 
-    Cavity solve() {
+    /** Runs a trial of a laid-out design and copies it. */
+    static Cavity solve(Laid laid) {
+        Trial trial = Chain.of(laid).trial();
         Fit fit = trial.run();
         if (fit != Fit.FITS) {
             throw new IllegalStateException("a laid-out design fits, but the chain says " + fit);
         }
+        return new Solver(laid, trial).cavity();
+    }
+
+    /** The gaps between mounts and the beam, if there is one in the tangential plane. */
+    Clearance clearance() {
+        boolean stable = trial.hasBeam(Plane.TANGENTIAL);
+        return clearance(stable ? waists(Plane.TANGENTIAL) : List.of());
+    }
+
+    private Clearance clearance(List<Waist> tangential) {
+        return Clearance.of(
+                laid,
+                tangential.stream()
+                        .map(w ->
+                                new Strip(w.leg(), w.start(), w.length(), STRIP * w.radius(), w.after(), w.rayleigh()))
+                        .toList());
+    }
+
+    private Cavity cavity() {
         Eigenmode tangential = mode(Plane.TANGENTIAL);
         Eigenmode sagittal = mode(Plane.SAGITTAL);
-        List<Strip> strips = tangential.waists().stream()
-                .map(w -> new Strip(w.leg(), w.start(), w.length(), STRIP * w.radius(), w.after(), w.rayleigh()))
-                .toList();
+        Optional<Integer> leg = ledgerLeg(tangential, sagittal);
         return new Cavity(
                 laid,
                 tangential,
@@ -46,7 +74,28 @@ final class Solver {
                 lengths(),
                 lines(tangential, Plane.TANGENTIAL),
                 lines(sagittal, Plane.SAGITTAL),
-                Clearance.of(laid, strips));
+                clearance(tangential.waists()),
+                laid.design().requirements().stream().map(this::judge).toList(),
+                leg,
+                leg.flatMap(l -> Ledger.of(trial, l, Edge.LOWER)));
+    }
+
+    private Judgement judge(Requirement requirement) {
+        return requirement.over().isPresent() ? Judgement.open(requirement) : Judgement.of(requirement, chain, trial);
+    }
+
+    private Optional<Integer> ledgerLeg(Eigenmode tangential, Eigenmode sagittal) {
+        for (int leg = 0; leg < chain.legs(); leg++) {
+            for (int i = chain.mirror[leg] + 1; i < chain.end(leg); i++) {
+                if (chain.kind[i] == Kind.CRYSTAL) {
+                    return Optional.of(leg);
+                }
+            }
+        }
+        return Stream.concat(tangential.waists().stream(), sagittal.waists().stream())
+                .filter(Waist::isReal)
+                .min(Comparator.comparingDouble(Waist::radius))
+                .map(Waist::leg);
     }
 
     private Eigenmode mode(Plane plane) {
@@ -90,95 +139,44 @@ final class Solver {
         for (int number = 0; number < laid.legs().size(); number++) {
             Leg leg = laid.legs().get(number);
             int from = leg.from();
-            int station = chain.station(from, Face.SURFACE);
             double start = 0;
             for (Standing s : leg.parts()) {
                 int part = s.part();
                 if (chain.kind[part] == Kind.APERTURE) {
                     continue;
                 }
-                waists.add(inAir(from, part, number, start, s.start() - start, station, plane));
+                waists.add(waist(Stretch.behind(chain, from), from, part, number, start, s.start() - start, plane));
                 if (chain.kind[part].isSlab()) {
                     inside(waists, s, number, plane);
                 }
                 from = part;
                 start = s.end();
-                station = chain.station(part, Face.SURFACE) + (hasTwoFaces(part) ? 1 : 0);
             }
-            waists.add(inAir(from, leg.to(), number, start, leg.path() - start, station, plane));
+            waists.add(waist(Stretch.behind(chain, from), from, leg.to(), number, start, leg.path() - start, plane));
         }
         return waists;
     }
 
-    private boolean hasTwoFaces(int part) {
-        return chain.kind[part].isSlab() || chain.kind[part] == Kind.MATRIX;
-    }
-
-    private Waist inAir(int from, int to, int leg, double start, double length, int station, Plane plane) {
-        return waist(
-                from,
-                to,
-                leg,
-                start,
-                length,
-                trial.reducedPathFromWaist(station, plane),
-                trial.reducedRayleigh(station, plane),
-                1,
-                1);
-    }
-
     private void inside(List<Waist> to, Standing s, int leg, Plane plane) {
         int part = s.part();
-        double n = trial.index(part);
-        double m = trial.magnify(part, plane);
-        boolean split = trial.hasThermalLens(part);
+        boolean split = trial.numbers.hasThermalLens(part);
         double length = split ? s.length() / 2 : s.length();
-        int station = chain.station(part, Face.ENTRY);
-        to.add(waist(
-                part,
-                part,
-                leg,
-                s.start(),
-                length,
-                trial.reducedPathFromWaist(station, plane),
-                trial.reducedRayleigh(station, plane),
-                n,
-                m));
+        to.add(waist(Stretch.inside(chain, part), part, part, leg, s.start(), length, plane));
         if (split) {
-            to.add(waist(
-                    part,
-                    part,
-                    leg,
-                    s.middle(),
-                    length,
-                    trial.reducedPathFromWaistBehindLens(part, plane),
-                    trial.reducedRayleighBehindLens(part, plane),
-                    n,
-                    m));
+            to.add(waist(Stretch.insideBehindLens(chain, part), part, part, leg, s.middle(), length, plane));
         }
     }
 
-    /** Inside a face that widens by m, q̂ is m² times that outside; lengths are n times reduced ones. */
-    private Waist waist(
-            int from,
-            int to,
-            int leg,
-            double start,
-            double length,
-            double reducedFromWaist,
-            double reducedRayleigh,
-            double n,
-            double m) {
-        double scale = m * m;
+    private Waist waist(Stretch stretch, int from, int to, int leg, double start, double length, Plane plane) {
         return new Waist(
                 from,
                 to,
                 leg,
                 start,
                 Math.max(0, length),
-                Math.sqrt(chain.wavelength / Math.PI * reducedRayleigh * scale),
-                -reducedFromWaist * scale * n + 0.0,
-                reducedRayleigh * scale * n);
+                stretch.radius(trial, plane),
+                stretch.after(trial, plane),
+                stretch.rayleigh(trial, plane));
     }
 
     private Map<Integer, CrystalLine> lines(Eigenmode mode, Plane plane) {
@@ -188,8 +186,8 @@ final class Solver {
             if (inside.isEmpty()) {
                 continue;
             }
-            double length = trial.inside(part);
-            double share = trial.reduced(part, plane) / length;
+            double length = trial.numbers.inside(part);
+            double share = trial.numbers.reduced(part, plane) / length;
             Optional<CrystalLine> after = inside.size() > 1
                     ? Optional.of(line(inside.get(1), inside.get(1).after(), share, Optional.empty()))
                     : Optional.empty();
@@ -212,11 +210,11 @@ final class Solver {
                 int part = s.part();
                 optical += (s.index() - 1) * s.length();
                 if (chain.kind[part].isSlab()) {
-                    tangential += trial.reduced(part, Plane.TANGENTIAL) - s.length();
-                    sagittal += trial.reduced(part, Plane.SAGITTAL) - s.length();
+                    tangential += trial.numbers.reduced(part, Plane.TANGENTIAL) - s.length();
+                    sagittal += trial.numbers.reduced(part, Plane.SAGITTAL) - s.length();
                 } else if (chain.kind[part] == Kind.MATRIX) {
-                    tangential += trial.boxLength(part, Plane.TANGENTIAL) - s.length();
-                    sagittal += trial.boxLength(part, Plane.SAGITTAL) - s.length();
+                    tangential += trial.numbers.boxLength(part, Plane.TANGENTIAL) - s.length();
+                    sagittal += trial.numbers.boxLength(part, Plane.SAGITTAL) - s.length();
                 }
             }
             all.add(new Cavity.Lengths(leg.path(), leg.distance(), optical, tangential, sagittal));

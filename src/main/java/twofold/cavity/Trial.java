@@ -1,14 +1,15 @@
 package twofold.cavity;
 
 import java.util.Arrays;
-import twofold.design.Field;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+import twofold.design.Design;
 import twofold.design.Kind;
-import twofold.layout.Aim;
+import twofold.layout.Laid;
 import twofold.layout.Layout;
 import twofold.optics.Mode;
 import twofold.optics.Plane;
 import twofold.optics.RayMatrix;
-import twofold.optics.Refraction;
 import twofold.optics.Walk;
 
 /**
@@ -16,36 +17,27 @@ import twofold.optics.Walk;
  * made. Set numbers, {@link #run}, read.
  */
 public final class Trial {
-    private static final double COS_GRAZING = Math.cos(Field.Limits.GRAZING);
+    /** Above this margin a plane is stable whatever rounding did; below it the rounding is bounded. */
+    private static final double CLEAR = 1e-6;
 
+    final Numbers numbers;
     private final Chain chain;
     private final double[] v;
-    private final boolean[] inMiddle;
-    private final boolean[] atBrewster;
-    private final double[] path;
-    private final double[] headingX;
-    private final double[] headingY;
-    private final double[] cos;
+    final Legs legs;
     private final double[] tangential;
     private final double[] sagittal;
+    private final double[] way = new double[8];
     private final double[] closed = new double[2 * Mode.SIZE];
     private final double[] middle = new double[4];
+    private @Nullable Trial grown;
 
-    Trial(Chain chain, double[] numbers) {
-        this.chain = chain;
-        this.v = numbers;
-        inMiddle = chain.inMiddle.clone();
-        atBrewster = chain.atBrewster.clone();
-        int legs = chain.legs();
-        path = new double[legs];
-        headingX = new double[legs];
-        headingY = new double[legs];
-        cos = new double[legs];
+    Trial(Numbers numbers) {
+        this.numbers = numbers;
+        this.chain = numbers.chain;
+        this.v = numbers.v;
+        this.legs = new Legs(numbers);
         tangential = new double[4 * chain.stations];
         sagittal = new double[4 * chain.stations];
-        for (int part = 0; part < chain.kind.length; part++) {
-            derive(part);
-        }
     }
 
     /**
@@ -55,24 +47,7 @@ public final class Trial {
      * @param si in SI
      */
     public void set(int slot, double si) {
-        int part = slot / Chain.STRIDE;
-        int offset = slot % Chain.STRIDE;
-        v[slot] = si;
-        if (chain.kind[part] == Kind.MIRROR) {
-            if (offset == Chain.ROC) {
-                v[part * Chain.STRIDE + Chain.CURVATURE] = 1 / si;
-            } else if (offset == Chain.CURVATURE) {
-                v[part * Chain.STRIDE + Chain.ROC] = 1 / si;
-            }
-        } else if (offset == Chain.AT) {
-            inMiddle[part] = false;
-        } else if (offset == Chain.TILT) {
-            atBrewster[part] = false;
-        } else if (offset == Chain.THERMAL) {
-            v[part * Chain.STRIDE + Chain.THERMAL_T] = si;
-            v[part * Chain.STRIDE + Chain.THERMAL_S] = si;
-        }
-        derive(part);
+        numbers.set(slot, si);
     }
 
     /** The number in a slot, in SI. */
@@ -80,121 +55,48 @@ public final class Trial {
         return v[slot];
     }
 
-    private void derive(int part) {
-        int b = part * Chain.STRIDE;
-        switch (chain.kind[part]) {
-            case MIRROR -> v[b + Chain.POWER] = 2 * v[b + Chain.CURVATURE];
-            case LENS -> deriveLens(part, b);
-            case PLATE, CRYSTAL -> deriveSlab(part, b);
-            case MATRIX -> v[b + Chain.HALF] = v[b + Chain.SIZE] / 2;
-            case APERTURE -> v[b + Chain.HALF] = 0;
-        }
-    }
-
-    private void deriveLens(int part, int b) {
-        double power = 1 / v[b + Chain.SIZE];
-        double tilt = v[b + Chain.TILT];
-        double across = tilt == 0 ? power : power * Refraction.tiltedLens(v[b + Chain.INDEX], tilt);
-        double in = tilt == 0 ? power : across / (Math.cos(tilt) * Math.cos(tilt));
-        v[b + Chain.PT] = chain.sagittalTilt[part] ? across : in;
-        v[b + Chain.PS] = chain.sagittalTilt[part] ? in : across;
-    }
-
-    private void deriveSlab(int part, int b) {
-        double n = v[b + Chain.INDEX];
-        if (atBrewster[part]) {
-            v[b + Chain.TILT] = Refraction.brewster(n);
-        }
-        double incidence = v[b + Chain.TILT];
-        boolean tilted = incidence != 0;
-        double m = tilted ? Refraction.magnification(n, incidence) : 1;
-        double turn = tilted ? chain.sign[part] * Refraction.turn(n, incidence) : 0;
-        double length = chain.kind[part] == Kind.PLATE
-                ? v[b + Chain.SIZE] / Refraction.cosInside(n, incidence)
-                : v[b + Chain.SIZE];
-        boolean sagittal = chain.sagittalTilt[part];
-        double mt = sagittal ? 1 : m;
-        double ms = sagittal ? m : 1;
-        double half = length / 2;
-        v[b + Chain.HALF] = half;
-        v[b + Chain.MAGNIFY_T] = mt;
-        v[b + Chain.MAGNIFY_S] = ms;
-        v[b + Chain.ZT] = half / (n * mt * mt);
-        v[b + Chain.ZS] = half / (n * ms * ms);
-        v[b + Chain.PT] = v[b + Chain.THERMAL_T] * mt * mt;
-        v[b + Chain.PS] = v[b + Chain.THERMAL_S] * ms * ms;
-        v[b + Chain.SHIFT] = sagittal ? 0 : length * Math.sin(turn);
-        v[b + Chain.ADVANCE] = length * Math.cos(turn);
-    }
-
-    /** Aims every leg from the mirrors' places, then walks both planes if the plan fits. */
+    /**
+     * Aims every leg from the mirrors' places, then walks both planes if the plan fits. If it does not, everything that is
+     * read is NaN.
+     */
     public Fit run() {
-        Fit fit = aim();
+        Fit fit = legs.aim();
         if (fit == Fit.FITS) {
             walk();
+        } else {
+            Arrays.fill(way, Double.NaN);
+            Arrays.fill(closed, Double.NaN);
         }
         return fit;
     }
 
-    private Fit aim() {
-        int legs = path.length;
-        for (int leg = 0; leg < legs; leg++) {
-            int from = chain.mirror[leg] * Chain.STRIDE;
-            int to = chain.mirror[leg + 1] * Chain.STRIDE;
-            double dx = v[to + Chain.X] - v[from + Chain.X];
-            double dy = v[to + Chain.Y] - v[from + Chain.Y];
-            double shift = 0;
-            double advance = 0;
-            double inside = 0;
-            for (int i = chain.mirror[leg] + 1; i < chain.end(leg); i++) {
-                int b = i * Chain.STRIDE;
-                switch (chain.kind[i]) {
-                    case PLATE, CRYSTAL -> {
-                        shift += v[b + Chain.SHIFT];
-                        advance += v[b + Chain.ADVANCE];
-                        inside += 2 * v[b + Chain.HALF];
-                    }
-                    case MATRIX -> {
-                        advance += v[b + Chain.SIZE];
-                        inside += v[b + Chain.SIZE];
-                    }
-                    case MIRROR, LENS, APERTURE -> {}
-                }
-            }
-            double extent = Aim.extent(dx, dy, shift);
-            double whole = extent - advance + inside;
-            path[leg] = whole;
-            headingX[leg] = Aim.headingX(dx, dy, extent, shift);
-            headingY[leg] = Aim.headingY(dx, dy, extent, shift);
-            if (!room(leg, whole, extent - advance)) {
-                return Fit.TOO_SHORT;
-            }
-        }
-        int folds = chain.ring ? legs : legs - 1;
-        for (int leg = 0; leg < folds; leg++) {
-            int next = leg + 1 < legs ? leg + 1 : 0;
-            cos[leg] = Aim.cosIncidence(headingX[leg], headingY[leg], headingX[next], headingY[next]);
-            if (!(cos[leg] > COS_GRAZING)) {
-                return Fit.GRAZING;
-            }
-        }
-        return Fit.FITS;
+    /** A copy after {@link #run}, to be walked again with other paths or parts while nothing is aimed anew. */
+    Trial copy() {
+        Trial copy = new Trial(numbers.copy());
+        copy.legs.take(legs);
+        return copy;
     }
 
-    /** Whether the parts of a leg stand apart and within it; sets the place of those in its middle. */
-    private boolean room(int leg, double whole, double air) {
-        double done = 0;
+    /**
+     * Walks again with another path of one leg, in the chain alone: no mirror moves, all angles and other paths stay. Parts
+     * keep their place from the mirror before, or stay in the middle. The path may be too short for the parts.
+     */
+    void walk(int leg, double longer) {
+        legs.path[leg] = longer;
         for (int i = chain.mirror[leg] + 1; i < chain.end(leg); i++) {
-            int b = i * Chain.STRIDE;
-            if (inMiddle[i]) {
-                v[b + Chain.AT] = whole / 2;
+            if (numbers.inMiddle[i]) {
+                v[i * Chain.STRIDE + Chain.AT] = longer / 2;
             }
-            if (!(v[b + Chain.AT] - v[b + Chain.HALF] - done >= -Layout.TOUCH)) {
-                return false;
-            }
-            done = v[b + Chain.AT] + v[b + Chain.HALF];
         }
-        return whole > 0 && air >= -Layout.TOUCH && whole - done >= -Layout.TOUCH;
+        walk();
+    }
+
+    /** Makes a fold mirror focus as it does at normal incidence, in walks without aiming. */
+    void straighten(int mirror) {
+        int leg = chain.legTo(mirror);
+        if (leg >= 0) {
+            legs.cos[leg] = 1;
+        }
     }
 
     /** The whole of the optics, once: both planes from the first mirror to where the chain closes. */
@@ -208,8 +110,10 @@ public final class Trial {
         }
         t.store(tangential, 0);
         s.store(sagittal, 0);
-        int legs = path.length;
-        for (int leg = 0; leg < legs; leg++) {
+        double[] path = legs.path;
+        double[] cos = legs.cos;
+        int count = path.length;
+        for (int leg = 0; leg < count; leg++) {
             double done = 0;
             int end = chain.end(leg);
             for (int i = chain.mirror[leg] + 1; i < end; i++) {
@@ -261,7 +165,7 @@ public final class Trial {
             s.space(path[leg] - done);
             int at = chain.mirror[leg + 1];
             double power = v[at * Chain.STRIDE + Chain.POWER];
-            if (leg + 1 < legs) {
+            if (leg + 1 < count) {
                 t.lens(power / cos[leg]);
                 s.lens(power * cos[leg]);
                 t.store(tangential, 4 * chain.station[at]);
@@ -274,6 +178,8 @@ public final class Trial {
             } else {
                 t.lens(power / 2);
                 s.lens(power / 2);
+                t.store(way, 0);
+                s.store(way, 4);
                 Mode.standing(t.a, t.b, t.c, t.d, closed, 0);
                 Mode.standing(s.a, s.b, s.c, s.d, closed, Mode.SIZE);
                 t.lens(power / 2);
@@ -316,7 +222,7 @@ public final class Trial {
     public double radius(int part, Face face, Plane plane) {
         double outside =
                 Mode.radius(closed, offset(plane), prefixes(plane), 4 * chain.station(part, face), chain.wavelength);
-        return face == Face.ENTRY ? outside * magnify(part, plane) : outside;
+        return face == Face.ENTRY ? outside * numbers.magnify(part, plane) : outside;
     }
 
     /** The wavefront's curvature just after a station's face in the forward pass, 1/m, positive diverging. */
@@ -325,52 +231,57 @@ public final class Trial {
         if (face != Face.ENTRY) {
             return reduced;
         }
-        double m = magnify(part, plane);
-        return reduced / (m * m * index(part));
+        double m = numbers.magnify(part, plane);
+        return reduced / (m * m * numbers.index(part));
     }
 
-    /** Width inside over width outside a part's faces. */
-    double magnify(int part, Plane plane) {
+    /**
+     * The radius in the middle of a slab, inside, m; of any other part as at its first face. NaN where unstable.
+     */
+    public double radius(int part, Plane plane) {
         if (!chain.kind[part].isSlab()) {
-            return 1;
+            return radius(part, chain.kind[part] == Kind.MATRIX ? Face.ENTRY : Face.SURFACE, plane);
         }
-        return v[part * Chain.STRIDE + (plane == Plane.TANGENTIAL ? Chain.MAGNIFY_T : Chain.MAGNIFY_S)];
+        behindLens(part, plane);
+        return Mode.radius(closed, offset(plane), middle, 0, chain.wavelength) * numbers.magnify(part, plane);
     }
 
-    /** The index inside a part; 1 for what is not a slab. */
-    double index(int part) {
-        return chain.kind[part].isSlab() ? v[part * Chain.STRIDE + Chain.INDEX] : 1;
+    /**
+     * The half axis of the beam's footprint on a face of a part, m: the radius outside the face over the cosine of the
+     * incidence in the plane of the incidence. NaN where unstable.
+     */
+    public double footprint(int part, Face face, Plane plane) {
+        double outside =
+                Mode.radius(closed, offset(plane), prefixes(plane), 4 * chain.station(part, face), chain.wavelength);
+        if (chain.kind[part] == Kind.MIRROR) {
+            return plane == Plane.TANGENTIAL ? outside / legs.cosIncidence(part) : outside;
+        }
+        boolean inTilt = chain.sagittalTilt[part] == (plane == Plane.SAGITTAL);
+        return inTilt ? outside / Math.cos(numbers.tilt(part)) : outside;
     }
 
-    /** The path inside a part, m. */
-    double inside(int part) {
-        return 2 * v[part * Chain.STRIDE + Chain.HALF];
+    /** Whether there is a beam in a plane: it is stable, and not for rounding alone. */
+    public boolean hasBeam(Plane plane) {
+        double margin = margin(plane);
+        return margin > CLEAR || (margin > 0 && state(plane) == State.STABLE);
     }
 
-    /** The reduced length of a slab as the chain uses it, seen from outside, m. */
-    double reduced(int part, Plane plane) {
-        return 2 * v[part * Chain.STRIDE + (plane == Plane.TANGENTIAL ? Chain.ZT : Chain.ZS)];
+    /** The design with the numbers of this trial. */
+    public Design design() {
+        return numbers.design();
     }
 
-    /** The b of a black box, m: what it does as a space. */
-    double boxLength(int part, Plane plane) {
-        return v[part * Chain.STRIDE + (plane == Plane.TANGENTIAL ? Chain.MATRIX_T : Chain.MATRIX_S) + 1];
-    }
-
-    /** Whether a slab has a lens in its middle. */
-    boolean hasThermalLens(int part) {
-        int b = part * Chain.STRIDE;
-        return chain.kind[part] == Kind.CRYSTAL && (v[b + Chain.THERMAL_T] != 0 || v[b + Chain.THERMAL_S] != 0);
+    /** That design on the table; empty where it does not fit. */
+    public Optional<Laid> laid() {
+        Design design = design();
+        return design.equals(chain.laid().design())
+                ? Optional.of(chain.laid())
+                : Layout.of(design).value();
     }
 
     /** The path of a leg, m. */
     public double pathOf(int leg) {
-        return path[leg];
-    }
-
-    /** The place of a part on its leg, m. */
-    double along(int part) {
-        return v[part * Chain.STRIDE + Chain.AT];
+        return legs.path[leg];
     }
 
     /** Reduced path from the waist to a station and the reduced Rayleigh length there, in outside measure, m. */
@@ -396,15 +307,13 @@ public final class Trial {
     private void behindLens(int part, Plane plane) {
         double[] from = prefixes(plane);
         int at = 4 * chain.station[part];
-        int b = part * Chain.STRIDE;
         Walk walk = new Walk();
         walk.a = from[at];
         walk.b = from[at + 1];
         walk.c = from[at + 2];
         walk.d = from[at + 3];
-        boolean t = plane == Plane.TANGENTIAL;
-        walk.space(v[b + (t ? Chain.ZT : Chain.ZS)]);
-        walk.lens(v[b + (t ? Chain.PT : Chain.PS)]);
+        walk.space(numbers.reduced(part, plane) / 2);
+        walk.lens(numbers.power(part, plane));
         walk.store(middle, 0);
     }
 
@@ -423,7 +332,7 @@ public final class Trial {
         return new RayMatrix(a + b * p, b, c + p * (d - a) - p * p * b, d - p * b);
     }
 
-    /** Whether a plane is stable, see {@link Rounding}. Allocates; not for sweeps. */
+    /** Whether a plane is stable, see {@link Rounding}. Walks once more, over magnitudes; allocates the first time. */
     public State state(Plane plane) {
         double margin = margin(plane);
         if (!(Math.abs(margin) > Rounding.ofMargin(this, plane))) {
@@ -437,15 +346,9 @@ public final class Trial {
         return closed[offset(plane) + number];
     }
 
-    /** The one-way matrix between the middles of a standing wave's end mirrors. */
-    double[] way(Plane plane) {
-        int end = chain.mirror[chain.mirror.length - 1];
-        int last = 4 * chain.station[end];
-        double[] prefix = Arrays.copyOfRange(prefixes(plane), last, last + 4);
-        double half = v[end * Chain.STRIDE + Chain.POWER] / 2;
-        prefix[2] += half * prefix[0];
-        prefix[3] += half * prefix[1];
-        return prefix;
+    /** An element of the one-way matrix between the middles of a standing wave's end mirrors: 0 to 3 are a, b, c, d. */
+    double way(Plane plane, int element) {
+        return way[(plane == Plane.TANGENTIAL ? 0 : 4) + element];
     }
 
     boolean isRing() {
@@ -454,42 +357,18 @@ public final class Trial {
 
     /** This trial after {@link #run}, walked again over the magnitudes of its numbers so that nothing cancels. */
     Trial magnitudes() {
-        Trial copy = new Trial(chain, v.clone());
-        System.arraycopy(cos, 0, copy.cos, 0, cos.length);
-        for (int leg = 0; leg < path.length; leg++) {
-            copy.path[leg] = path[leg] + Rounding.ofCoordinates(steps(), coordinates(leg));
+        Trial copy = grown;
+        if (copy == null) {
+            copy = copy();
+            grown = copy;
         }
-        for (int part = 0; part < chain.kind.length; part++) {
-            int b = part * Chain.STRIDE;
-            switch (chain.kind[part]) {
-                case MIRROR -> copy.diverge(b + Chain.POWER);
-                case LENS, PLATE, CRYSTAL -> {
-                    copy.diverge(b + Chain.PT);
-                    copy.diverge(b + Chain.PS);
-                }
-                case MATRIX -> {
-                    for (int i = 0; i < 4; i++) {
-                        copy.v[b + Chain.MATRIX_T + i] = Math.abs(v[b + Chain.MATRIX_T + i]);
-                        copy.v[b + Chain.MATRIX_S + i] = Math.abs(v[b + Chain.MATRIX_S + i]);
-                    }
-                }
-                case APERTURE -> {}
-            }
+        copy.numbers.takeMagnitudes(numbers);
+        copy.legs.take(legs);
+        for (int leg = 0; leg < chain.legs(); leg++) {
+            copy.legs.path[leg] += Rounding.ofCoordinates(steps(), legs.coordinates(leg));
         }
         copy.walk();
         return copy;
-    }
-
-    /** The root of the sum of squares of the coordinates at a leg's ends, m. */
-    private double coordinates(int leg) {
-        int from = chain.mirror[leg] * Chain.STRIDE;
-        int to = chain.mirror[leg + 1] * Chain.STRIDE;
-        return Math.hypot(
-                Math.hypot(v[from + Chain.X], v[from + Chain.Y]), Math.hypot(v[to + Chain.X], v[to + Chain.Y]));
-    }
-
-    private void diverge(int power) {
-        v[power] = -Math.abs(v[power]);
     }
 
     /** How many elementary steps one walk takes. */

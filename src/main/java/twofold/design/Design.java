@@ -80,4 +80,13 @@ public record Design(
     public List<Problem> problems() {
         return new Review(this).problems();
     }
+
+    /**
+     * What is wrong with asking a requirement of this design: its place, plane, edge, bound and lever.
+     *
+     * @param requirement not necessarily one of this design's
+     */
+    public List<Problem> problems(Requirement requirement) {
+        return new Review(this).problems(requirement);
+    }
 }

@@ -72,6 +72,12 @@ final class Review {
         return List.copyOf(found);
     }
 
+    /** What is wrong with one requirement, with places as if it were the first. */
+    List<Problem> problems(Requirement requirement) {
+        requirement(Subject.DOCUMENT.at("requirements").at(0), requirement);
+        return List.copyOf(found);
+    }
+
     private void add(Subject where, String what, String accepted) {
         found.add(new Problem(where, what, accepted));
     }
@@ -499,15 +505,22 @@ final class Review {
         if (first == null || second == null) {
             return;
         }
-        boolean mirrorsOfOneLeg = mirrors.contains(a)
-                && mirrors.contains(b)
-                && neighbours(mirrors.indexOf(a), mirrors.indexOf(b), mirrors.size());
-        boolean neighbouringParts = neighbours(parts.indexOf(first), parts.indexOf(second), parts.size());
-        if (!mirrorsOfOneLeg && !neighbouringParts) {
+        int i = Math.min(parts.indexOf(first), parts.indexOf(second));
+        int j = Math.max(parts.indexOf(first), parts.indexOf(second));
+        boolean round = design.shape() == Shape.RING && i == 0;
+        if (i == j || (!isFree(i + 1, j) && !(round && isFree(j + 1, parts.size())))) {
+            boolean isLeg = mirrors.contains(a)
+                    && mirrors.contains(b)
+                    && neighbours(mirrors.indexOf(a), mirrors.indexOf(b), mirrors.size());
             add(
                     where,
-                    "found \"" + Names.shown(a) + "\" and \"" + Names.shown(b) + "\", which do not follow each other",
-                    "a leg, or two neighbouring parts");
+                    "found \"" + Names.shown(a) + "\" and \"" + Names.shown(b) + "\", "
+                            + (isLeg ? "a leg with more than one free stretch" : "which do not follow each other"),
+                    "a leg of one free stretch, or two parts with nothing but air and apertures between");
         }
+    }
+
+    private boolean isFree(int from, int to) {
+        return parts.subList(from, Math.max(from, to)).stream().allMatch(p -> p.kind() == Kind.APERTURE);
     }
 }

@@ -31,7 +31,7 @@ public final class Aim {
     }
 
     /** The angle of incidence at a mirror between two headings, rad, precise at every angle. */
-    static double incidence(double inX, double inY, double outX, double outY) {
+    public static double incidence(double inX, double inY, double outX, double outY) {
         return Math.atan2(Math.abs(inX * outY - inY * outX), -(inX * outX + inY * outY)) / 2;
     }
 }

@@ -76,18 +76,29 @@ public final class Clearance {
      * @param most how many at the most
      */
     public List<Gap> smallest(int most) {
+        return smallest(most, Optional.empty());
+    }
+
+    /** The smallest gap that a part's mount has to anything; empty where it states none. */
+    public Optional<Gap> smallestOf(int part) {
+        return smallest(1, Optional.of(part)).stream().findFirst();
+    }
+
+    private List<Gap> smallest(int most, Optional<Integer> part) {
         PriorityQueue<Gap> kept =
                 new PriorityQueue<>(Comparator.comparingDouble(Gap::gap).reversed());
         for (int i = 0; i < footprints.size(); i++) {
             Footprint f = footprints.get(i);
+            boolean meant = part.map(p -> p == f.part()).orElse(true);
             for (int leg = 0; leg < laid.legs().size(); leg++) {
-                if (!touches(laid.legs().get(leg), f.part())) {
+                if (meant && !touches(laid.legs().get(leg), f.part())) {
                     offer(kept, most, f, leg);
                 }
             }
             for (int j = i + 1; j < footprints.size(); j++) {
                 Footprint other = footprints.get(j);
-                if (kept.size() < most || atLeast(f.corners(), other.corners()) < worst(kept)) {
+                if ((meant || part.map(p -> p == other.part()).orElse(true))
+                        && (kept.size() < most || atLeast(f.corners(), other.corners()) < worst(kept))) {
                     keep(
                             kept,
                             most,
