@@ -39,6 +39,8 @@ final class SolveText {
         answer.waists();
         answer.crystals();
         answer.clearance();
+        LedgerText.of(cavity).ifPresent(t -> answer.text.append(t).append('\n'));
+        answer.text.append(RequirementText.of(cavity));
         answer.notable();
         return answer.text.toString();
     }

@@ -9,15 +9,22 @@ import java.io.IOException;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;
 import java.util.List;
+import java.util.Optional;
 import twofold.cavity.Cavity;
 import twofold.cavity.CrystalLine;
 import twofold.cavity.Eigenmode;
+import twofold.cavity.Judgement;
+import twofold.cavity.Ledger;
 import twofold.cavity.State;
 import twofold.cavity.Station;
 import twofold.cavity.Waist;
 import twofold.design.Design;
+import twofold.design.Edge;
 import twofold.design.Kind;
 import twofold.design.Mirror;
+import twofold.design.Place;
+import twofold.design.Planes;
+import twofold.design.Requirement;
 import twofold.design.Shape;
 import twofold.design.Unit;
 import twofold.layout.Clearance;
@@ -73,6 +80,8 @@ public final class SolveJson {
         }
         json.writeEndObject();
         crystals();
+        requirements();
+        ledger();
         json.writeEndObject();
     }
 
@@ -228,6 +237,82 @@ public final class SolveJson {
             json.writeFieldName("after_lens");
             line(line.afterLens().get());
         }
+        json.writeEndObject();
+    }
+
+    private void requirements() throws IOException {
+        json.writeArrayFieldStart("requirements");
+        for (Judgement j : cavity.judgements()) {
+            Requirement r = j.requirement();
+            json.writeStartObject();
+            json.writeStringField("what", r.what().json());
+            json.writeFieldName("at");
+            place(r.at());
+            word("plane", r.plane().map(Planes::word));
+            if (r.what().hasEdge()) {
+                word("edge", r.edge().map(Edge::word));
+            }
+            if (r.over().isPresent()) {
+                json.writeStringField("over", r.over().get());
+            }
+            number("value", r.what().unit(), j.value());
+            number("margin", Unit.ONE, j.margin());
+            switch (j.verdict()) {
+                case MET -> json.writeBooleanField("met", true);
+                case NOT_MET -> json.writeBooleanField("met", false);
+                case WISH, OPEN -> json.writeNullField("met");
+            }
+            json.writeEndObject();
+        }
+        json.writeEndArray();
+    }
+
+    private void place(Optional<Place> at) throws IOException {
+        if (at.isEmpty()) {
+            json.writeNull();
+        } else if (at.get().second().isEmpty()) {
+            json.writeString(at.get().first());
+        } else {
+            pair(at.get().first(), at.get().second().get());
+        }
+    }
+
+    private void pair(String first, String second) throws IOException {
+        json.writeStartArray();
+        json.writeString(first);
+        json.writeString(second);
+        json.writeEndArray();
+    }
+
+    private void word(String name, Optional<String> word) throws IOException {
+        if (word.isPresent()) {
+            json.writeStringField(name, word.get());
+        } else {
+            json.writeNullField(name);
+        }
+    }
+
+    private void ledger() throws IOException {
+        if (cavity.ledger().isEmpty()) {
+            json.writeNullField("ledger");
+            return;
+        }
+        Ledger ledger = cavity.ledger().get();
+        Leg leg = cavity.laid().legs().get(ledger.leg());
+        json.writeObjectFieldStart("ledger");
+        json.writeFieldName("leg");
+        pair(name(leg.from()), name(leg.to()));
+        json.writeStringField("edge", ledger.edge().word());
+        json.writeArrayFieldStart("shares");
+        for (Ledger.Share share : ledger.shares()) {
+            json.writeStartObject();
+            json.writeStringField("part", name(share.part()));
+            number("mm", Unit.MM, share.length());
+            json.writeEndObject();
+        }
+        json.writeEndArray();
+        number("sum_mm", Unit.MM, ledger.sum());
+        number("split_mm", Unit.MM, ledger.split());
         json.writeEndObject();
     }
 }
