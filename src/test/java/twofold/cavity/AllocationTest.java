@@ -22,8 +22,8 @@ class AllocationTest {
 
     private static final int RUNS = 50_000;
 
-    /** So often are runs repeated until the compiler, which may be busy elsewhere, has come round to them. */
-    private static final int ROUNDS = 50;
+    /** So long are runs repeated, ns, until the compiler, whose cores may be busy, has come round to them. */
+    private static final long PATIENCE = 60_000_000_000L;
 
     @Test
     void oneEvaluationAllocatesNothing() {
@@ -69,7 +69,8 @@ class AllocationTest {
         ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();
         long bytes = Long.MAX_VALUE;
         double sum = 0;
-        for (int round = 0; round < ROUNDS && bytes >= SLACK; round++) {
+        long start = System.nanoTime();
+        while (bytes >= SLACK && System.nanoTime() - start < PATIENCE) {
             long before = threads.getCurrentThreadAllocatedBytes();
             for (int i = 0; i < RUNS; i++) {
                 sum += run.applyAsDouble(i);
