@@ -49,6 +49,6 @@ final class LedgerText {
 
     /** To a micrometre: these lengths are differences. */
     private static String millimetres(double metres) {
-        return Double.isNaN(metres) ? "-" : Table.fixed(Unit.MM.fromSi(metres), 3) + " mm";
+        return Double.isNaN(metres) ? "-" : Unit.fixed(Unit.MM.fromSi(metres), 3) + " mm";
     }
 }

@@ -23,7 +23,7 @@ final class RequirementText {
                     place(r),
                     j.verdict() == Judgement.Verdict.OPEN ? "-" : value(r.what().unit(), j.value()),
                     asked(r),
-                    Double.isNaN(j.margin()) ? "-" : Table.fixed(j.margin(), 2),
+                    Double.isNaN(j.margin()) ? "-" : Unit.fixed(j.margin(), 2),
                     j.verdict().word());
         }
         return cavity.judgements().isEmpty() ? "" : table.text("") + '\n';
@@ -46,7 +46,7 @@ final class RequirementText {
         double value = unit.fromSi(si);
         String number = unit == Unit.ONE && value != 0 && Math.abs(value) < SMALL
                 ? String.format(Locale.ROOT, "%.1e", value)
-                : Table.fixed(value, unit == Unit.UM ? 1 : unit == Unit.MM || unit == Unit.ONE ? 3 : 2);
+                : Unit.fixed(value, unit == Unit.UM ? 1 : unit == Unit.MM || unit == Unit.ONE ? 3 : 2);
         return number + unit(unit);
     }
 
