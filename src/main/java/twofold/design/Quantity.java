@@ -2,6 +2,7 @@ package twofold.design;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 
 /** Everything that can be read off a cavity: JSON name, unit, where it may be read, whether it has a plane, meaning. */
@@ -131,6 +132,15 @@ public enum Quantity {
     /** Whether it needs to be told which edge. */
     public boolean hasEdge() {
         return this == ZONE_EDGE_SPLIT;
+    }
+
+    /** Its name for a person: the JSON name without its unit, "Waist offset in Rayleigh lengths". */
+    public String title() {
+        String bare = json.replaceFirst("_(mm|um|mhz|deg)$", "")
+                .replaceFirst("_rayleighs$", " in Rayleigh lengths")
+                .replaceFirst("^fsr$", "free spectral range")
+                .replace('_', ' ');
+        return bare.substring(0, 1).toUpperCase(Locale.ROOT) + bare.substring(1);
     }
 
     /** What it is, in a few words. */
