@@ -9,6 +9,8 @@ import javafx.geometry.Orientation;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.SplitPane;
+import javafx.scene.control.Tab;
+import javafx.scene.control.TabPane;
 import javafx.scene.input.DragEvent;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
@@ -29,6 +31,7 @@ import twofold.window.bench.BenchPane;
 import twofold.window.panel.PartPane;
 import twofold.window.panel.PartsPane;
 import twofold.window.panel.ProblemsPane;
+import twofold.window.panel.RequirementsPane;
 import twofold.window.panel.StabilityPane;
 
 /** The editor's panes, wired to one session. A node: the application puts it into a window, a test into a stage. */
@@ -41,6 +44,8 @@ public final class Editor extends BorderPane {
     private final PartPane part = new PartPane();
     private final PartsPane parts;
     private final ProblemsPane problems = new ProblemsPane();
+    private final RequirementsPane requirements = new RequirementsPane();
+    private final Tab asked = new Tab("Requirements", requirements);
     private final Notice notice;
     private final Label said = new Label();
     private final Label facts = new Label();
@@ -63,12 +68,13 @@ public final class Editor extends BorderPane {
         VBox benchAndProblems = new VBox(6, problems, bench);
         VBox.setVgrow(bench, Priority.ALWAYS);
         pictures = split(Orientation.VERTICAL, benchAndProblems, lower);
-        VBox side = new VBox(8, stability, part, parts);
+        TabPane lists = tabs("lists", "Parts and requirements", new Tab("Parts", parts), asked);
+        VBox side = new VBox(8, stability, part, lists);
         VBox.setVgrow(part, Priority.ALWAYS);
-        part.setPrefHeight(420);
+        part.setPrefHeight(400);
         part.setMinHeight(140);
-        parts.setPrefHeight(220);
-        parts.setMinHeight(120);
+        lists.setPrefHeight(240);
+        lists.setMinHeight(140);
         side.setMinWidth(300);
         side.setPrefWidth(340);
         side.setMaxWidth(460);
@@ -91,6 +97,14 @@ public final class Editor extends BorderPane {
         SplitPane split = new SplitPane(panes);
         split.setOrientation(orientation);
         return split;
+    }
+
+    private static TabPane tabs(String id, String name, Tab... tabs) {
+        TabPane pane = new TabPane(tabs);
+        pane.setId(id);
+        pane.setAccessibleText(name);
+        pane.setTabClosingPolicy(TabPane.TabClosingPolicy.UNAVAILABLE);
+        return pane;
     }
 
     private HBox status() {
@@ -213,6 +227,8 @@ public final class Editor extends BorderPane {
         stability.show(shown);
         part.show(shown);
         parts.show(shown);
+        requirements.show(shown);
+        asked.setText(StatusWords.asked(shown));
         problems.show(shown);
         notice.show(shown);
         said.setText(StatusWords.said(shown));

@@ -2,6 +2,7 @@ package twofold.window;
 
 import java.util.Optional;
 import twofold.cavity.Cavity;
+import twofold.cavity.Judgement;
 import twofold.cavity.State;
 import twofold.design.Unit;
 import twofold.session.Shown;
@@ -25,7 +26,30 @@ final class StatusWords {
             int count = shown.problems().size();
             return count == 1 ? "The file has a problem." : "The file has " + count + " problems.";
         }
-        return shown.cavity().map(StatusWords::said).orElse("Nothing is open.");
+        return shown.cavity().map(c -> said(c) + met(c)).orElse("Nothing is open.");
+    }
+
+    /** " 3 of 5 requirements are not met.", or nothing where nothing is asked. */
+    private static String met(Cavity cavity) {
+        long asked = count(cavity, Judgement.Verdict.MET) + count(cavity, Judgement.Verdict.NOT_MET);
+        long failed = count(cavity, Judgement.Verdict.NOT_MET);
+        if (asked == 0) {
+            return "";
+        }
+        return failed == 0
+                ? " All requirements are met."
+                : " " + failed + " of " + asked + (asked == 1 ? " requirement is" : " requirements are") + " not met.";
+    }
+
+    private static long count(Cavity cavity, Judgement.Verdict verdict) {
+        return cavity.judgements().stream().filter(j -> j.verdict() == verdict).count();
+    }
+
+    /** The head of the list of requirements: "Requirements, 2 not met". */
+    static String asked(Shown shown) {
+        long failed =
+                shown.cavity().map(c -> count(c, Judgement.Verdict.NOT_MET)).orElse(0L);
+        return failed == 0 ? "Requirements" : "Requirements, " + failed + " not met";
     }
 
     private static String said(Cavity cavity) {

@@ -83,7 +83,7 @@ class EditorWindowTest {
     @Test
     void theFirstCrystalIsSelectedAtFirst() throws Exception {
         assertThat(selectedName()).isEqualTo("Rod");
-        assertThat(stage.node("said", Label.class).getText()).isEqualTo("Both planes are stable.");
+        assertThat(stage.node("said", Label.class).getText()).startsWith("Both planes are stable.");
         assertThat(stage.node("facts", Label.class).getText())
                 .contains("800 nm")
                 .contains("MHz");
@@ -265,7 +265,7 @@ class EditorWindowTest {
     @Test
     void anUnstableDesignIsSaidInWords() throws Exception {
         stage.openSample("one-plane.json");
-        assertThat(stage.node("said", Label.class).getText()).isEqualTo("Tangential unstable, sagittal stable.");
+        assertThat(stage.node("said", Label.class).getText()).startsWith("Tangential unstable, sagittal stable.");
         stage.picture("one-plane-light");
     }
 

@@ -21,10 +21,7 @@ public final class PartsPane extends VBox {
 
     /** Makes the pane. */
     public PartsPane(Session session) {
-        getStyleClass().add("card");
-        Label title = new Label("Parts");
-        title.getStyleClass().add("title");
-        title.setLabelFor(list);
+        getStyleClass().add("inner-card");
         list.setId("parts");
         list.setAccessibleText("Parts in beam order");
         list.setCellFactory(view -> new Row());
@@ -35,7 +32,7 @@ public final class PartsPane extends VBox {
             }
         });
         VBox.setVgrow(list, Priority.ALWAYS);
-        getChildren().addAll(title, list);
+        getChildren().add(list);
     }
 
     /** Shows the parts of the design that is shown. */
