@@ -127,6 +127,9 @@ final class Legs {
 
     /** How far apart a leg's mirrors are by ruler, m. */
     double distance(int leg) {
+        if (Double.isNaN(path[leg])) {
+            return Double.NaN;
+        }
         int from = chain.mirror[leg] * Chain.STRIDE;
         int to = chain.mirror[leg + 1] * Chain.STRIDE;
         return Math.hypot(v[to + Chain.X] - v[from + Chain.X], v[to + Chain.Y] - v[from + Chain.Y]);

@@ -5,62 +5,141 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 
-/** Everything that can be read off a cavity: JSON name, unit, where it may be read, whether it has a plane, meaning. */
+/** Everything that can be read off a cavity: JSON name, unit, where it may be read, whether it has a plane, meaning, source. */
 public enum Quantity {
     /** (A+D)/2 of the round trip. */
-    HALF_TRACE("half_trace", Unit.ONE, Where.NOWHERE, true, "(A+D)/2 of the unfolded round trip"),
+    HALF_TRACE(
+            "half_trace",
+            Unit.ONE,
+            Where.NOWHERE,
+            true,
+            "(A+D)/2 of the unfolded round trip",
+            "Kogelnik & Li, Appl. Opt. 5, 1550 (1966)"),
     /** 1 − |half trace|. */
-    STABILITY_MARGIN("stability_margin", Unit.ONE, Where.NOWHERE, true, "1 − |half trace|"),
+    STABILITY_MARGIN(
+            "stability_margin",
+            Unit.ONE,
+            Where.NOWHERE,
+            true,
+            "1 − |half trace|",
+            "Kogelnik & Li, Appl. Opt. 5, 1550 (1966)"),
     /** Round-trip Gouy phase. */
-    GOUY("gouy_deg", Unit.DEG, Where.NOWHERE, true, "Gouy phase of a round trip"),
+    GOUY(
+            "gouy_deg",
+            Unit.DEG,
+            Where.NOWHERE,
+            true,
+            "Gouy phase of a round trip",
+            "Kogelnik & Li, Appl. Opt. 5, 1550 (1966)"),
     /** Beam radius. */
-    RADIUS("radius_um", Unit.UM, Where.PART, true, "1/e² radius of intensity; in a crystal or plate at its middle"),
+    RADIUS(
+            "radius_um",
+            Unit.UM,
+            Where.PART,
+            true,
+            "1/e² radius of intensity; in a crystal or plate at its middle, inside; of a matrix at its entry",
+            "Kogelnik & Li, Appl. Opt. 5, 1550 (1966)"),
     /** Waist radius. */
-    WAIST_RADIUS("waist_radius_um", Unit.UM, Where.SLAB_OR_STRETCH, true, "radius of the waist"),
+    WAIST_RADIUS(
+            "waist_radius_um",
+            Unit.UM,
+            Where.SLAB_OR_STRETCH,
+            true,
+            "radius of the waist",
+            "Kogelnik & Li, Appl. Opt. 5, 1550 (1966)"),
     /** Waist place in a slab. */
     WAIST_OFFSET(
-            "waist_offset_mm", Unit.MM, Where.SLAB, true, "from the part's middle to the waist, positive downstream"),
+            "waist_offset_mm",
+            Unit.MM,
+            Where.SLAB,
+            true,
+            "from the part's middle to the waist, positive downstream",
+            "Kogelnik & Li, Appl. Opt. 5, 1550 (1966)"),
     /** Waist place in Rayleigh lengths. */
     WAIST_OFFSET_RAYLEIGHS(
-            "waist_offset_rayleighs", Unit.ONE, Where.SLAB, true, "waist_offset_mm over the Rayleigh length"),
+            "waist_offset_rayleighs",
+            Unit.ONE,
+            Where.SLAB,
+            true,
+            "waist_offset_mm over the Rayleigh length",
+            "Kogelnik & Li, Appl. Opt. 5, 1550 (1966)"),
     /** Distance between the planes' waists. */
     WAIST_SPLIT(
             "waist_split_mm",
             Unit.MM,
             Where.SLAB_OR_STRETCH,
             false,
-            "tangential minus sagittal waist place, along the beam"),
+            "tangential minus sagittal waist place, along the beam",
+            "a difference of two waist places"),
     /** Smaller radius over larger. */
-    ROUNDNESS("roundness", Unit.ONE, Where.PART_OR_STRETCH, false, "smaller radius over larger; a leg: of the waists"),
+    ROUNDNESS(
+            "roundness",
+            Unit.ONE,
+            Where.PART_OR_STRETCH,
+            false,
+            "smaller radius over larger; a leg: of the waists",
+            "ISO 11146-1, ellipticity"),
     /** Crystal length over twice the Rayleigh length. */
-    FOCUS_RATIO("focus_ratio", Unit.ONE, Where.CRYSTAL, true, "crystal length over twice the Rayleigh length"),
+    FOCUS_RATIO(
+            "focus_ratio",
+            Unit.ONE,
+            Where.CRYSTAL,
+            true,
+            "crystal length over twice the Rayleigh length",
+            "Boyd & Kleinman, J. Appl. Phys. 39, 3597 (1968): l/b"),
     /** Distance between the planes' zone edges. */
     ZONE_EDGE_SPLIT(
             "zone_edge_split_mm",
             Unit.MM,
             Where.LEG,
             false,
-            "an edge's place in the tangential minus in the sagittal plane"),
+            "an edge's place in the tangential minus in the sagittal plane",
+            "Kogelnik and others, IEEE J. Quantum Electron. QE-8, 373 (1972)"),
     /** Length on which both planes are stable. */
-    ZONE_OVERLAP("zone_overlap_mm", Unit.MM, Where.LEG, false, "length of the leg on which both planes are stable"),
+    ZONE_OVERLAP(
+            "zone_overlap_mm",
+            Unit.MM,
+            Where.LEG,
+            false,
+            "length of the leg on which both planes are stable, in the sagittal plane's zone",
+            "zones as Magni, Appl. Opt. 25, 107 (1986)"),
     /** Angle of incidence. */
-    INCIDENCE("incidence_deg", Unit.DEG, Where.MIRROR, false, "angle of incidence at a mirror"),
+    INCIDENCE("incidence_deg", Unit.DEG, Where.MIRROR, false, "angle of incidence at a mirror", "plane geometry"),
     /** Path of a leg. */
-    LEG("leg_mm", Unit.MM, Where.LEG, false, "path of a leg, inside parts included"),
+    LEG("leg_mm", Unit.MM, Where.LEG, false, "path of a leg, inside parts included", "plane geometry and Snell's law"),
     /** Distance of two mirrors. */
-    DISTANCE("distance_mm", Unit.MM, Where.LEG, false, "mirror to mirror by ruler"),
+    DISTANCE("distance_mm", Unit.MM, Where.LEG, false, "mirror to mirror by ruler", "plane geometry"),
     /** Path of a round trip. */
-    ROUND_TRIP("round_trip_mm", Unit.MM, Where.NOWHERE, false, "path of a round trip"),
+    ROUND_TRIP(
+            "round_trip_mm", Unit.MM, Where.NOWHERE, false, "path of a round trip", "plane geometry and Snell's law"),
     /** Free spectral range. */
-    FSR("fsr_mhz", Unit.MHZ, Where.NOWHERE, false, "free spectral range"),
+    FSR(
+            "fsr_mhz",
+            Unit.MHZ,
+            Where.NOWHERE,
+            false,
+            "free spectral range",
+            "Siegman, Lasers (1986), ch. 11; with the phase index"),
     /** Smallest gap. */
-    CLEARANCE("clearance_mm", Unit.MM, Where.ANYWHERE_OR_PART, false, "smallest gap between mounts and beams"),
+    CLEARANCE(
+            "clearance_mm",
+            Unit.MM,
+            Where.ANYWHERE_OR_PART,
+            false,
+            "smallest gap between mounts, and between mounts and the strip of three tangential radii each side",
+            "plane geometry; strips of three radii: common practice, no source"),
     /** Power outside a clear aperture. */
-    CLIP_LOSS("clip_loss", Unit.ONE, Where.PART, false, "power outside the clear aperture, worst face, one pass"),
+    CLIP_LOSS(
+            "clip_loss",
+            Unit.ONE,
+            Where.PART,
+            false,
+            "power outside the clear aperture, worst face, one pass",
+            "integral of the Gaussian intensity"),
     /** Width of the plan. */
-    PLAN_WIDTH("plan_width_mm", Unit.MM, Where.NOWHERE, false, "extent of all footprints in x"),
+    PLAN_WIDTH("plan_width_mm", Unit.MM, Where.NOWHERE, false, "extent of all footprints in x", "plane geometry"),
     /** Depth of the plan. */
-    PLAN_DEPTH("plan_depth_mm", Unit.MM, Where.NOWHERE, false, "extent of all footprints in y");
+    PLAN_DEPTH("plan_depth_mm", Unit.MM, Where.NOWHERE, false, "extent of all footprints in y", "plane geometry");
 
     /** Where a quantity is read. */
     public enum Where {
@@ -100,13 +179,15 @@ public enum Quantity {
     private final Where where;
     private final boolean hasPlane;
     private final String doc;
+    private final String source;
 
-    Quantity(String json, Unit unit, Where where, boolean hasPlane, String doc) {
+    Quantity(String json, Unit unit, Where where, boolean hasPlane, String doc, String source) {
         this.json = json;
         this.unit = unit;
         this.where = where;
         this.hasPlane = hasPlane;
         this.doc = doc;
+        this.source = source;
     }
 
     /** The name in a file and on the command line. */
@@ -146,6 +227,11 @@ public enum Quantity {
     /** What it is, in a few words. */
     public String doc() {
         return doc;
+    }
+
+    /** Where its definition comes from. */
+    public String source() {
+        return source;
     }
 
     /** The quantity with a JSON name. */

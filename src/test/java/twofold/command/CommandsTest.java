@@ -42,6 +42,11 @@ class CommandsTest {
                 .contains("sagittal    stable      -0.209   0.791     102.09°")
                 .contains("Rod, entry                    39.0 µm   26.3 µm      0.673")
                 .contains("  tangential  38.7 µm        -1.14 mm         10.35 mm  -0.21 mm")
+                .contains("astigmatism ledger: the lower edge along Fold 1/Fold 2, tangential minus sagittal")
+                .containsPattern(
+                        "  Rod +1\\.924 mm\n  Fold 2 +-0\\.954 mm\n  sum +0\\.016 mm\n  edge split +0\\.016 mm")
+                .containsPattern("waist_offset_rayleighs@Rod:both +-0\\.110 +-0\\.1 to 0\\.1 +-0\\.10 +not met")
+                .containsPattern("roundness@End B +0\\.989 +at least 0\\.95 +0\\.04 +met")
                 .contains("Both planes are stable.")
                 .contains("Not checked for clearance, as no mount is stated: Rod.");
     }
@@ -60,6 +65,8 @@ class CommandsTest {
         assertThat(run.out())
                 .contains("unstable")
                 .contains("Neither plane is stable: there is no beam.")
+                .contains("astigmatism ledger: none along Fold 1/Fold 2, as the sagittal plane is not stable")
+                .containsPattern("roundness@End B +undefined +at least 0\\.95 +- +not met")
                 .contains("Clearances are between mounts alone: the tangential plane has no beam.")
                 .doesNotContain("NaN");
         assertThat(Run.of("solve", unstable(), "--json").out())

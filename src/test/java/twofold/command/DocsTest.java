@@ -17,6 +17,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import twofold.design.Field;
 import twofold.design.Kind;
+import twofold.design.Quantity;
 import twofold.file.DesignReader;
 
 /** What README and the pages in docs show is true: every command of theirs runs, every design reads, tables match. */
@@ -132,5 +133,25 @@ class DocsTest {
         };
         return "| `" + field.json() + "` | " + kinds + " | " + field.doc() + " | " + field.accepted() + " | " + absent
                 + " |";
+    }
+
+    @Test
+    void theTableOfQuantitiesIsTheVocabulary() throws IOException {
+        String table = Stream.concat(
+                        Stream.of(
+                                "| quantity | what it is | unit | read at | plane | source |",
+                                "|---|---|---|---|---|---|"),
+                        Arrays.stream(Quantity.values()).map(DocsTest::row))
+                .collect(Collectors.joining("\n"));
+        assertThat(Files.readString(Path.of("docs/quantities.md")))
+                .as("docs/quantities.md between <!-- quantities … --> and <!-- /quantities --> must read:\n%s", table)
+                .contains("checked by a test -->\n" + table + "\n<!-- /quantities -->");
+    }
+
+    private static String row(Quantity quantity) {
+        String unit = quantity.unit().symbol().isEmpty() ? "–" : quantity.unit().symbol();
+        String plane = quantity.hasPlane() ? "yes" : quantity.hasEdge() ? "no, but an edge: lower or upper" : "no";
+        return "| `" + quantity.json() + "` | " + quantity.doc().replace("|", "\\|") + " | " + unit + " | "
+                + quantity.where().words() + " | " + plane + " | " + quantity.source() + " |";
     }
 }

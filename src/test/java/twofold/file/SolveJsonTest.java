@@ -45,7 +45,7 @@ class SolveJsonTest {
         return values;
     }
 
-    /** Rounded as printed in the definition of the format, section 3; its clearance, 0.45 mm, takes the beam to widen
+    /** Rounded as printed in the definition of the format, section 3, the ledger in that of the ledger; its clearance, 0.45 mm, takes the beam to widen
      * in straight lines between mirrors and is left out. */
     @ParameterizedTest
     @CsvSource({
@@ -76,7 +76,12 @@ class SolveJsonTest {
         "/crystals/0/sagittal/waist_radius_um, 22.3",
         "/crystals/0/sagittal/waist_offset_mm, -0.364",
         "/crystals/0/sagittal/shift_to_centre_mm, -0.207",
-        "/crystals/0/sagittal/rayleigh_mm, 3.44"
+        "/crystals/0/sagittal/rayleigh_mm, 3.44",
+        "/ledger/shares/0/mm, -0.954",
+        "/ledger/shares/1/mm, 1.924",
+        "/ledger/shares/2/mm, -0.954",
+        "/ledger/sum_mm, 0.016",
+        "/ledger/split_mm, 0.016"
     })
     void theExampleHasItsPrintedNumbers(String path, BigDecimal printed) throws IOException {
         Map<String, String> values = flat(answer(example()));
@@ -98,6 +103,16 @@ class SolveJsonTest {
                 .containsEntry("/crystals/0/tangential/inside", "true")
                 .containsEntry("/clearance/0/part", "Fold 2")
                 .containsEntry("/clearance/0/to", "beam End A/Fold 1")
+                .containsEntry("/requirements/0/what", "waist_offset_rayleighs")
+                .containsEntry("/requirements/0/at", "Rod")
+                .containsEntry("/requirements/0/plane", "both")
+                .containsEntry("/requirements/0/met", "false")
+                .containsEntry("/requirements/1/plane", "null")
+                .containsEntry("/requirements/1/met", "true")
+                .containsEntry("/ledger/leg/0", "Fold 1")
+                .containsEntry("/ledger/leg/1", "Fold 2")
+                .containsEntry("/ledger/edge", "lower")
+                .containsEntry("/ledger/shares/1/part", "Rod")
                 .doesNotContainKeys("/incidence_deg/End A", "/incidence_deg/End B");
     }
 
@@ -120,6 +135,12 @@ class SolveJsonTest {
                 .containsEntry("/crystals/0/tangential", "null")
                 .containsEntry("/crystals/0/sagittal", "null")
                 .containsKey("/planes/tangential/round_trip/3");
+        assertThat(values)
+                .as("undefined values, and no zone that would hold the cavity")
+                .containsEntry("/requirements/0/value", "null")
+                .containsEntry("/requirements/0/margin", "null")
+                .containsEntry("/requirements/0/met", "false")
+                .containsEntry("/ledger", "null");
         double h = Math.abs(Double.parseDouble(values.getOrDefault("/planes/tangential/half_trace", "0")));
         assertThat(Double.parseDouble(values.getOrDefault("/planes/tangential/magnification", "0")))
                 .isCloseTo(h + Math.sqrt(h * h - 1), org.assertj.core.api.Assertions.withinPercentage(1e-9));
@@ -137,5 +158,32 @@ class SolveJsonTest {
         assertThat(values.keySet().stream().filter(k -> k.matches("/planes/tangential/waists/\\d+/from")))
                 .as("two stretches inside the rod instead of one")
                 .hasSize(6);
+    }
+
+    @Test
+    void aRequirementSaysItsEdgeItsLegItsLeverAndWhatIsNoQuestion() throws IOException {
+        String asked = """
+                "requirements": [
+                  { "what": "zone_edge_split_mm", "at": ["Fold 1", "Fold 2"], "edge": "lower", "equals": 0.02, "within": 0.01 },
+                  { "what": "plan_width_mm", "prefer": "smallest" },
+                  { "what": "clearance_mm", "at_least": 0, "over": "gap" } ],
+                "old":""";
+        Map<String, String> values =
+                flat(answer(example().replace("\"requirements\":", asked).replaceAll("(?s)\"old\":.*?\\],", "")));
+        assertThat(values)
+                .containsEntry("/requirements/0/at/0", "Fold 1")
+                .containsEntry("/requirements/0/at/1", "Fold 2")
+                .containsEntry("/requirements/0/plane", "null")
+                .containsEntry("/requirements/0/edge", "lower")
+                .containsEntry("/requirements/0/met", "true")
+                .containsEntry("/requirements/1/at", "null")
+                .containsEntry("/requirements/1/margin", "null")
+                .containsEntry("/requirements/1/met", "null")
+                .containsEntry("/requirements/2/over", "gap")
+                .doesNotContainKey("/requirements/1/edge");
+        assertThat(Double.parseDouble(values.getOrDefault("/requirements/0/value", "")))
+                .isEqualTo(Double.parseDouble(values.getOrDefault("/ledger/split_mm", "0")));
+        assertThat(Double.parseDouble(values.getOrDefault("/requirements/0/margin", "")))
+                .isBetween(0.64, 0.66);
     }
 }
