@@ -122,9 +122,20 @@ final class Sieve {
         }
         return switch (list) {
             case "parts" -> !field.equals("kind") || partsAreKnown;
-            case "requirements" -> field.equals("over") ? leversAreKnown : keepsReference(problem, list, index, field);
+            case "requirements" ->
+                field.equals("over")
+                        ? leversAreKnown
+                        : !isPairOfUnknown(problem, index) && keepsReference(problem, list, index, field);
             default -> keepsReference(problem, list, index, field);
         };
+    }
+
+    /** Whether a problem is that of two known parts as a place, which hangs on what is read there. */
+    private boolean isPairOfUnknown(Problem problem, int index) {
+        Subject requirement = Subject.DOCUMENT.at("requirements").at(index);
+        return faults.isBroken(requirement.at("what"))
+                && problem.where().equals(requirement.at("at"))
+                && design.requirements().get(index).at().flatMap(Place::second).isPresent();
     }
 
     /** Whether a problem is a field's own. */
