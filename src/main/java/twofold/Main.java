@@ -2,9 +2,11 @@ package twofold;
 
 import java.io.FileDescriptor;
 import java.io.FileOutputStream;
+import java.io.IOException;
 import java.io.OutputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.logging.Level;
@@ -26,7 +28,7 @@ public final class Main {
         PrintStream out = new PrintStream(new FileOutputStream(FileDescriptor.out), false, StandardCharsets.UTF_8);
         PrintStream err = new PrintStream(new FileOutputStream(FileDescriptor.err), true, StandardCharsets.UTF_8);
         List<String> arguments = List.of(args);
-        int status = isForWindow(arguments) ? window(arguments, out, err) : Commands.run(arguments, out, err);
+        int status = isForWindow(arguments) ? window(arguments, out, err) : Commands.run(arguments, out, err, isTerminal());
         out.flush();
         System.exit(status);
     }
@@ -48,7 +50,17 @@ public final class Main {
             return Commands.DONE;
         }
         return arguments.isEmpty()
-                ? Commands.run(arguments, out, err)
+                ? Commands.run(arguments, out, err, isTerminal())
                 : WithoutWindow.answer(arguments.get(0), why.get(), out, err);
+    }
+
+    /** Whether standard error goes to a terminal; false where the system does not say, as Java 17 has no way to ask. */
+    private static boolean isTerminal() {
+        try {
+            String target = Path.of("/proc/self/fd/2").toRealPath().toString();
+            return target.startsWith("/dev/pts/") || target.startsWith("/dev/tty");
+        } catch (IOException e) {
+            return false;
+        }
     }
 }

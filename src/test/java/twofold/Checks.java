@@ -72,6 +72,11 @@ public final class Checks {
             return number(value("expected", key));
         }
 
+        /** An expected list. */
+        public List<Double> expecteds(String key) {
+            return numbers(value("expected", key));
+        }
+
         /** An expected list of words. */
         public List<String> words(String key) {
             return list(value("expected", key)).stream().map(String.class::cast).toList();

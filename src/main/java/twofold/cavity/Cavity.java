@@ -64,6 +64,26 @@ public record Cavity(
         return Solver.solve(laid);
     }
 
+    /** This answer with its requirements over a lever's range judged too. */
+    public Cavity judgedOver(Sweeper sweeper) {
+        Chain chain = Chain.of(laid);
+        return new Cavity(
+                laid,
+                tangential,
+                sagittal,
+                lengths,
+                tangentialLines,
+                sagittalLines,
+                clearance,
+                judgements.stream()
+                        .map(j -> j.verdict() == Judgement.Verdict.OPEN
+                                ? Judgement.over(j.requirement(), chain, sweeper)
+                                : j)
+                        .toList(),
+                ledgerLeg,
+                ledger);
+    }
+
     /** A plane's answer. */
     public Eigenmode mode(Plane plane) {
         return plane == Plane.TANGENTIAL ? tangential : sagittal;

@@ -191,12 +191,11 @@ public final class Chain {
      * @throws IllegalArgumentException with the names, where that number does not act on the light
      */
     public int slot(int part, Field field) {
-        int offset = offset(field);
-        if (offset < 0 || !field.kinds().contains(kind[part])) {
+        if (!has(part, field)) {
             throw new IllegalArgumentException(
                     field.json() + " of \"" + laid.design().parts().get(part).name() + "\" is no number of the chain");
         }
-        return part * STRIDE + offset;
+        return part * STRIDE + offset(field);
     }
 
     /** Where a field's number stands among those of a part; −1 for one that light does not feel. */
@@ -216,6 +215,11 @@ public final class Chain {
     /** Whether a number was set to another value than the design's. */
     boolean differs(int slot, double[] now) {
         return numbers[slot] != now[slot];
+    }
+
+    /** Whether a field of a part is a number of the chain: light feels it. */
+    public boolean has(int part, Field field) {
+        return offset(field) >= 0 && field.kinds().contains(kind[part]);
     }
 
     /** Where a mirror's x stands. */

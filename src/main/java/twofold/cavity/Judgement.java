@@ -60,7 +60,7 @@ public record Judgement(Requirement requirement, double value, double margin, Ve
                 .orElseThrow();
         double worst = Double.NaN;
         for (Optional<Plane> plane : planes(requirement)) {
-            double value = sweeper.worst(lever, reading(requirement, plane, chain), v -> goodness(requirement, v));
+            double value = sweeper.worst(lever, c -> reading(requirement, plane, c), v -> goodness(requirement, v));
             worst = plane.equals(planes(requirement).get(0)) ? value : worse(requirement, worst, value);
         }
         return judged(requirement, worst);

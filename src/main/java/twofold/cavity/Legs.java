@@ -4,6 +4,7 @@ import java.util.Arrays;
 import twofold.design.Field;
 import twofold.layout.Aim;
 import twofold.layout.Layout;
+import twofold.layout.Plan;
 
 /** The legs of a trial, aimed from the places of its mirrors. Mutable, confined to a trial. */
 final class Legs {
@@ -29,6 +30,22 @@ final class Legs {
         headingX = new double[legs];
         headingY = new double[legs];
         cos = new double[legs];
+    }
+
+    /** States in a plan what the parts on each leg do to it now. */
+    void load(Plan plan) {
+        for (int leg = 0; leg < path.length; leg++) {
+            double shift = 0;
+            double excess = 0;
+            for (int i = chain.mirror[leg] + 1; i < chain.end(leg); i++) {
+                int b = i * Chain.STRIDE;
+                if (chain.kind[i].isSlab()) {
+                    shift += v[b + Chain.SHIFT];
+                    excess += 2 * v[b + Chain.HALF] - v[b + Chain.ADVANCE];
+                }
+            }
+            plan.load(leg, shift, excess);
+        }
     }
 
     /** Takes what another trial's legs were aimed to. */

@@ -7,6 +7,7 @@ import twofold.design.Design;
 import twofold.design.Kind;
 import twofold.layout.Laid;
 import twofold.layout.Layout;
+import twofold.layout.Plan;
 import twofold.optics.Mode;
 import twofold.optics.Plane;
 import twofold.optics.RayMatrix;
@@ -68,6 +69,11 @@ public final class Trial {
             Arrays.fill(closed, Double.NaN);
         }
         return fit;
+    }
+
+    /** States in a plan what the parts on each leg do to it now. */
+    public void load(Plan plan) {
+        legs.load(plan);
     }
 
     /** A copy after {@link #run}, to be walked again with other paths or parts while nothing is aimed anew. */

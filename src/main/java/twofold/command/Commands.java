@@ -39,7 +39,7 @@ public final class Commands implements Callable<Integer> {
     /** Exit status: a file could not be read, written or accepted. */
     public static final int FILE = 3;
 
-    private static final List<String> NAMES = List.of("solve", "place", "draw", "check");
+    private static final List<String> NAMES = List.of("solve", "place", "draw", "check", "sweep", "map");
 
     private final Streams streams;
 
@@ -63,10 +63,11 @@ public final class Commands implements Callable<Integer> {
      * @param arguments as typed
      * @param out takes results alone
      * @param err takes errors and everything else
+     * @param isTerminal whether a person watches the error stream, so that long work shows how far it is
      * @return the exit status
      */
-    public static int run(List<String> arguments, PrintStream out, PrintStream err) {
-        Streams streams = new Streams(out, err);
+    public static int run(List<String> arguments, PrintStream out, PrintStream err, boolean isTerminal) {
+        Streams streams = new Streams(out, err, isTerminal);
         PrintWriter outWriter = new PrintWriter(out, true, StandardCharsets.UTF_8);
         PrintWriter errWriter = new PrintWriter(err, true, StandardCharsets.UTF_8);
         CommandLine line = new CommandLine(new Commands(streams))
@@ -74,6 +75,8 @@ public final class Commands implements Callable<Integer> {
                 .addSubcommand(new PlaceCommand(streams))
                 .addSubcommand(new DrawCommand(streams))
                 .addSubcommand(new CheckCommand(streams))
+                .addSubcommand(new SweepCommand(streams))
+                .addSubcommand(new MapCommand(streams))
                 .setExpandAtFiles(false)
                 .setUsageHelpWidth(110)
                 .setOut(outWriter)
@@ -96,6 +99,21 @@ public final class Commands implements Callable<Integer> {
         out.flush();
         err.flush();
         return status;
+    }
+
+    /** Writes a survey to the out stream. */
+    static int survey(SurveyCsv csv, Streams streams, String what, boolean withProgress) {
+        boolean ended;
+        boolean stopped;
+        try (ProgressLine progress = new ProgressLine(streams, what, withProgress)) {
+            ended = csv.write(streams, progress);
+            stopped = progress.isStopped();
+        }
+        if (streams.out().checkError()) {
+            streams.complain("standard output is closed or full: the rest is not written");
+            return FILE;
+        }
+        return ended || stopped ? DONE : FILE;
     }
 
     @Override

@@ -12,6 +12,7 @@ import twofold.file.Located;
 import twofold.file.ReadDesign;
 import twofold.layout.Laid;
 import twofold.layout.Layout;
+import twofold.study.WorstOver;
 
 /**
  * What became of a file that a command was given.
@@ -36,7 +37,15 @@ record Opened(Optional<Design> design, List<Located> problems, boolean isReadabl
 
     /** Reads and solves a file; empty when that cannot be, and then the error stream says why. */
     static Optional<Cavity> solve(String file, Streams streams) {
-        return read(file, streams).design().map(Opened::laid).map(Cavity::solve);
+        return read(file, streams)
+                .design()
+                .map(Opened::laid)
+                .map(l -> Cavity.solve(l).judgedOver(new WorstOver(l)));
+    }
+
+    /** Reads and lays out a file; empty when that cannot be, and then the error stream says why. */
+    static Optional<Laid> lay(String file, Streams streams) {
+        return read(file, streams).design().map(Opened::laid);
     }
 
     private static Laid laid(Design design) {

@@ -7,8 +7,9 @@ import java.io.PrintStream;
  *
  * @param out results alone, so that they can be piped
  * @param err errors, one a line
+ * @param isTerminal whether a person watches the error stream
  */
-record Streams(PrintStream out, PrintStream err) {
+record Streams(PrintStream out, PrintStream err, boolean isTerminal) {
     /** One line that is not about a place in a file. */
     void complain(String message) {
         err.println("twofold: " + message);

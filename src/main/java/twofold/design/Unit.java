@@ -35,14 +35,19 @@ public enum Unit {
 
     private static final MathContext EXACT_ENOUGH = new MathContext(40);
 
+    /** What stands for the power of a factor that is no power of ten. */
+    private static final int NO_POWER = Integer.MIN_VALUE;
+
     private final String symbol;
     private final BigDecimal factor;
     private final int decimals;
+    private final int power;
 
     Unit(String symbol, String factor, int decimals) {
         this.symbol = symbol;
         this.decimals = decimals;
         this.factor = new BigDecimal(factor);
+        this.power = this.factor.unscaledValue().equals(java.math.BigInteger.ONE) ? this.factor.scale() : NO_POWER;
     }
 
     /** The unit as printed behind a number; empty for a pure number. */
@@ -87,9 +92,26 @@ public enum Unit {
      * @param si finite, in SI
      */
     public String text(double si) {
+        StringBuilder text = new StringBuilder(24);
+        append(si, text);
+        return text.toString();
+    }
+
+    /**
+     * Writes what {@link #text} gives.
+     *
+     * @param si finite, in SI
+     * @param to takes the text
+     */
+    public void append(double si, StringBuilder to) {
         if (si == 0) {
-            return "0";
+            to.append('0');
+        } else if (power == NO_POWER || !ShortDecimal.append(si, power, to)) {
+            to.append(slow(si));
         }
+    }
+
+    private String slow(double si) {
         BigDecimal exact = new BigDecimal(si).divide(factor, EXACT_ENOUGH);
         // A decimal of up to 15 digits survives a double, so the shortest one shows at 15 digits with zeros cut.
         for (int digits = 15; digits < 18; digits++) {

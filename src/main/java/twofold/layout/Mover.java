@@ -210,6 +210,13 @@ public final class Mover {
         }
     }
 
+    /** Takes over what the parts of a design do, whose mirrors are those of the plan at rest. */
+    public void load(Design changed) {
+        Plan plan = rest.copy();
+        plan.load(changed);
+        load(plan);
+    }
+
     /**
      * Sets the values.
      *

@@ -18,12 +18,12 @@ public record Outcome<T>(Optional<T> value, List<Problem> problems) {
     }
 
     /** A value without problems. */
-    static <T> Outcome<T> of(T value) {
+    public static <T> Outcome<T> of(T value) {
         return new Outcome<>(Optional.of(value), List.of());
     }
 
     /** Problems without a value. */
-    static <T> Outcome<T> failed(List<Problem> problems) {
+    public static <T> Outcome<T> failed(List<Problem> problems) {
         return new Outcome<>(Optional.empty(), problems);
     }
 }

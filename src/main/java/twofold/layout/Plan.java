@@ -2,9 +2,12 @@ package twofold.layout;
 
 import java.util.ArrayList;
 import java.util.List;
+import twofold.design.Design;
 import twofold.design.Mirror;
+import twofold.design.Part;
 import twofold.design.Point;
 import twofold.design.Shape;
+import twofold.material.Materials;
 
 /**
  * A plan as plain numbers, for moving mirrors millions of times: where each mirror stands, and what the parts on each leg do
@@ -41,15 +44,7 @@ public final class Plan {
                 mirrors.stream().mapToDouble(m -> m.at().y()).toArray(),
                 new double[legs],
                 new double[legs]);
-        for (int leg = 0; leg < legs; leg++) {
-            double shift = 0;
-            double excess = 0;
-            for (Standing s : laid.legs().get(leg).parts()) {
-                shift += s.shift();
-                excess += s.length() - s.advance();
-            }
-            plan.load(leg, shift, excess);
-        }
+        plan.load(laid.design());
         return plan;
     }
 
@@ -106,6 +101,29 @@ public final class Plan {
     public void load(int leg, double sideways, double longer) {
         shift[leg] = sideways;
         excess[leg] = longer;
+    }
+
+    /** States what the parts of a design of the same mirrors do to its legs, whether they fit or not. */
+    void load(Design design) {
+        Glazing glazing = new Glazing(design.wavelength(), Materials.standard());
+        int leg = -1;
+        double sideways = 0;
+        double longer = 0;
+        for (int i = 0; i < design.parts().size(); i++) {
+            Part part = design.parts().get(i);
+            if (part instanceof Mirror) {
+                leg++;
+                sideways = 0;
+                longer = 0;
+            } else {
+                Standing s = glazing.standing(i, part);
+                sideways += s.shift();
+                longer += s.length() - s.advance();
+            }
+            if (leg < legs) {
+                load(leg, sideways, longer);
+            }
+        }
     }
 
     void take(Plan other) {

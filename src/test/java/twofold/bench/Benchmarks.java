@@ -15,15 +15,15 @@ import org.openjdk.jmh.runner.options.VerboseMode;
 public final class Benchmarks {
     private Benchmarks() {}
 
-    /** Runs them; takes about a minute. */
+    /** Runs them; takes some minutes. */
     public static void main(String[] args) throws RunnerException {
         Collection<RunResult> results = new Runner(new OptionsBuilder()
                         .include(WalkBenchmark.class.getSimpleName())
+                        .include(MapBenchmark.class.getSimpleName())
                         .addProfiler(GCProfiler.class)
                         .verbosity(VerboseMode.SILENT)
                         .build())
                 .run();
-        double floor = time(results, "bare").getScore();
         PrintStream out = System.out;
         out.printf(Locale.ROOT, "%-14s %10s %8s %10s %8s%n", "benchmark", "ns", "±", "÷ bare", "B/op");
         for (RunResult result : results) {
@@ -35,9 +35,14 @@ public final class Benchmarks {
                     time.getLabel(),
                     time.getScore(),
                     time.getScoreError(),
-                    time.getScore() / floor,
+                    time.getScore() / floor(results, time.getLabel()),
                     bytes == null ? Double.NaN : bytes.getScore());
         }
+    }
+
+    /** Maps run on all cores, and so does their floor. */
+    private static double floor(Collection<RunResult> results, String label) {
+        return time(results, MapBenchmark.floor(label).orElse("bare")).getScore();
     }
 
     private static Result<?> time(Collection<RunResult> results, String label) {

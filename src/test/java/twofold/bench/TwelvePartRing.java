@@ -21,6 +21,10 @@ public final class TwelvePartRing {
 
     /** The ring: a hexagon of 0.2 m; three slabs at Brewster's angle, the fourth with a thermal lens. */
     public static Design design() {
+        return Design.of("speed", 1064e-9, Shape.RING, parts());
+    }
+
+    static List<Part> parts() {
         List<Part> parts = new ArrayList<>();
         for (int corner = 0; corner < 6; corner++) {
             double angle = corner * Math.PI / 3;
@@ -47,7 +51,7 @@ public final class TwelvePartRing {
                 default -> {}
             }
         }
-        return Design.of("speed", 1064e-9, Shape.RING, parts);
+        return parts;
     }
 
     private static Part brewster(int number) {

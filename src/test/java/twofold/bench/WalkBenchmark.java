@@ -1,5 +1,6 @@
 package twofold.bench;
 
+import java.util.Arrays;
 import java.util.concurrent.TimeUnit;
 import org.apache.commons.math3.linear.Array2DRowRealMatrix;
 import org.apache.commons.math3.linear.RealMatrix;
@@ -30,8 +31,8 @@ public class WalkBenchmark {
     /** A matrix for each of twelve parts and for the space before it. */
     private static final int PRODUCTS = 24;
 
-    private final double[] tangential = new double[4 * PRODUCTS];
-    private final double[] sagittal = new double[4 * PRODUCTS];
+    private final double[] tangential = matrices();
+    private final double[] sagittal = matrices();
     private final RealMatrix[] tangentialMatrices = new RealMatrix[PRODUCTS];
     private final RealMatrix[] sagittalMatrices = new RealMatrix[PRODUCTS];
     private Trial trial =
@@ -40,7 +41,7 @@ public class WalkBenchmark {
     private double place;
     private double step = 1e-6;
 
-    /** Fills the bare products with spaces and weak lenses. */
+    /** Fills the matrices. */
     @Setup
     public void fill() {
         Chain chain = Chain.of(Layout.of(TwelvePartRing.design()).value().orElseThrow());
@@ -48,9 +49,7 @@ public class WalkBenchmark {
         x = chain.x(0);
         place = trial.get(x);
         for (int i = 0; i < PRODUCTS; i++) {
-            double[] m = i % 2 == 0 ? new double[] {1, 0.1, 0, 1} : new double[] {1, 0, -0.3, 1};
-            System.arraycopy(m, 0, tangential, 4 * i, 4);
-            System.arraycopy(m, 0, sagittal, 4 * i, 4);
+            double[] m = Arrays.copyOfRange(tangential, 4 * i, 4 * i + 4);
             tangentialMatrices[i] = new Array2DRowRealMatrix(new double[][] {{m[0], m[1]}, {m[2], m[3]}}, false);
             sagittalMatrices[i] = tangentialMatrices[i].copy();
         }
@@ -62,7 +61,7 @@ public class WalkBenchmark {
         return bare(tangential) + bare(sagittal);
     }
 
-    private static double bare(double[] m) {
+    static double bare(double[] m) {
         double a = 1;
         double b = 0;
         double c = 0;
@@ -78,6 +77,16 @@ public class WalkBenchmark {
             d = s;
         }
         return (a + d) / 2;
+    }
+
+    /** Spaces and weak lenses. */
+    static double[] matrices() {
+        double[] all = new double[4 * PRODUCTS];
+        for (int i = 0; i < PRODUCTS; i++) {
+            double[] m = i % 2 == 0 ? new double[] {1, 0.1, 0, 1} : new double[] {1, 0, -0.3, 1};
+            System.arraycopy(m, 0, all, 4 * i, 4);
+        }
+        return all;
     }
 
     /** From a moved mirror to both half traces and one radius. */

@@ -173,7 +173,7 @@ class CommandsTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"solve", "place", "check"})
+    @ValueSource(strings = {"solve", "place", "check", "sweep", "map"})
     void everyCommandHasHelpWithAnExample(String command) {
         Run run = Run.of(command, "--help");
         assertThat(run.status()).isZero();

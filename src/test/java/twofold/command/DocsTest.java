@@ -8,6 +8,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
@@ -76,8 +77,7 @@ class DocsTest {
     @ParameterizedTest
     @MethodSource("commands")
     void everyCommandShownRuns(String command) {
-        List<String> arguments =
-                new ArrayList<>(Pattern.compile(" ").splitAsStream(command).toList());
+        List<String> arguments = words(command);
         arguments.remove(0);
         for (String option : List.of("--write", "--to")) {
             int at = arguments.indexOf(option) + 1;
@@ -89,6 +89,16 @@ class DocsTest {
         Run run = Run.of(arguments.toArray(String[]::new));
         assertThat(run.status()).as(run.err()).isZero();
         assertThat(run.out()).isNotEmpty();
+    }
+
+    /** As a shell parts a line: at spaces outside double quotes. */
+    private static List<String> words(String command) {
+        List<String> words = new ArrayList<>();
+        Matcher word = Pattern.compile("(?:[^\\s\"]|\"[^\"]*\")+").matcher(command);
+        while (word.find()) {
+            words.add(word.group().replace("\"", ""));
+        }
+        return words;
     }
 
     @Test

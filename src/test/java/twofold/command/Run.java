@@ -20,7 +20,8 @@ record Run(int status, String out, String err) {
         int status = Commands.run(
                 List.of(arguments),
                 new PrintStream(out, false, StandardCharsets.UTF_8),
-                new PrintStream(err, false, StandardCharsets.UTF_8));
+                new PrintStream(err, false, StandardCharsets.UTF_8),
+                false);
         return new Run(status, out.toString(StandardCharsets.UTF_8), err.toString(StandardCharsets.UTF_8));
     }
 }

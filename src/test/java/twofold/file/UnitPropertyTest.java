@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.fail;
 
 import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.Locale;
 import java.util.Random;
 import java.util.regex.Pattern;
@@ -30,6 +32,24 @@ class UnitPropertyTest {
             if (unit.toSi(new BigDecimal(text)) != si
                     || !JSON_NUMBER.matcher(text).matches()) {
                 fail(si + " is written as " + text);
+            }
+        }
+    }
+
+    /** No decimal of fewer digits, correctly rounded from the exact value, reads back to the same double. */
+    @ParameterizedTest
+    @EnumSource(Unit.class)
+    void everyNumberIsAsShortAsItCanBe(Unit unit) {
+        Random random = new Random(11);
+        for (int i = 0; i < NUMBERS / 4; i++) {
+            double plain = Math.pow(10, random.nextInt(12) - 6) * random.nextDouble();
+            double si = i % 10 == 0 ? Math.scalb(1.0, random.nextInt(60) - 25) : plain;
+            BigDecimal written = new BigDecimal(unit.text(si)).stripTrailingZeros();
+            if (written.precision() > 1) {
+                BigDecimal shorter = written.round(new MathContext(written.precision() - 1, RoundingMode.HALF_EVEN));
+                if (unit.toSi(shorter) == si) {
+                    fail(si + " is written as " + written + ", but " + shorter + " would do");
+                }
             }
         }
     }

@@ -1,0 +1,124 @@
+package twofold.study;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
+import java.util.stream.Collectors;
+import twofold.cavity.Chain;
+import twofold.cavity.EdgeCause;
+import twofold.cavity.Reading;
+import twofold.design.Lever;
+import twofold.layout.Laid;
+import twofold.optics.Plane;
+
+/**
+ * The edges of one plane's stability zones along any lever: simple roots of what {@link EdgeCause} tells, found where it
+ * changes sign between samples and then bisected. A zone is known by the edges that bound it.
+ *
+ * @param plane which
+ * @param edges by value, ascending
+ */
+public record ZonesAlong(Plane plane, List<Edge> edges) {
+    /** Copies the list. */
+    public ZonesAlong {
+        edges = List.copyOf(edges);
+    }
+
+    /**
+     * An edge.
+     *
+     * @param cause what happens there
+     * @param rank which of the places where that happens, from 0 at the smallest value
+     * @param value of the lever, in SI
+     */
+    public record Edge(EdgeCause cause, int rank, double value) {
+        /** "B = 0", or "B = 0, second" where that happens again; of a ring "half trace 1". */
+        public String name() {
+            String what = switch (cause) {
+                case FIRST_CENTRE_ON_LAST -> "A = 0";
+                case ENDS_IMAGED -> "B = 0";
+                case CENTRES_IMAGED -> "C = 0";
+                case LAST_CENTRE_ON_FIRST -> "D = 0";
+                case CLOSES_AT_ONCE -> "half trace 1";
+                case CLOSES_REVERSED -> "half trace -1";
+            };
+            return rank == 0 ? what : what + " #" + (rank + 1);
+        }
+    }
+
+    /**
+     * The edges along a lever.
+     *
+     * @param samples between which a sign changes at most once
+     */
+    public static ZonesAlong of(Laid laid, Axis samples, Plane plane) {
+        List<EdgeCause> causes = EdgeCause.of(Chain.of(laid));
+        Asker asker = asker(laid, samples.lever(), causes, plane);
+        double[] places = java.util.stream.IntStream.range(0, samples.size())
+                .mapToDouble(samples::value)
+                .sorted()
+                .toArray();
+        double[] before = new double[causes.size()];
+        double[] here = new double[causes.size()];
+        int[] ranks = new int[causes.size()];
+        List<Edge> edges = new ArrayList<>();
+        for (int i = 0; i < places.length; i++) {
+            asker.ask(new double[] {places[i]}, here, 0);
+            for (int c = 0; c < here.length && i > 0; c++) {
+                if (here[c] * before[c] < 0 || (here[c] == 0 && before[c] != 0)) {
+                    edges.add(new Edge(
+                            causes.get(c), ranks[c]++, root(asker, causes.size(), c, places[i - 1], places[i])));
+                }
+            }
+            System.arraycopy(here, 0, before, 0, here.length);
+        }
+        edges.sort(Comparator.comparingDouble(Edge::value));
+        return new ZonesAlong(plane, edges);
+    }
+
+    private static Asker asker(Laid laid, Lever lever, List<EdgeCause> causes, Plane plane) {
+        return Asker.of(
+                laid,
+                List.of(lever),
+                causes.stream()
+                        .<Function<Chain, Reading>>map(cause -> chain -> trial -> cause.of(trial, plane))
+                        .toList());
+    }
+
+    /** Halves the interval until nothing lies between its ends. */
+    private static double root(Asker asker, int causes, int cause, double from, double to) {
+        double[] answers = new double[causes];
+        asker.ask(new double[] {from}, answers, 0);
+        double atFrom = answers[cause];
+        double a = from;
+        double b = to;
+        while (true) {
+            double middle = a + (b - a) / 2;
+            if (middle <= a || middle >= b) {
+                return b;
+            }
+            asker.ask(new double[] {middle}, answers, 0);
+            if (answers[cause] * atFrom > 0) {
+                a = middle;
+            } else {
+                b = middle;
+            }
+        }
+    }
+
+    /**
+     * The identity of the zone that holds a value of the lever, by its edges: "B = 0 to D = 0"; "-" stands for an edge
+     * beyond the lever's range.
+     *
+     * @param value where the plane is stable
+     */
+    public String zone(double value) {
+        Optional<Edge> lower = edges.stream().filter(e -> e.value() <= value).reduce((a, b) -> b);
+        Optional<Edge> upper = edges.stream().filter(e -> e.value() > value).findFirst();
+        return java.util.stream.Stream.of(lower, upper)
+                .map(e -> e.map(Edge::name).orElse("-"))
+                .collect(Collectors.joining(" to "));
+    }
+}

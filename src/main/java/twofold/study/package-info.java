@@ -1,0 +1,12 @@
+/**
+ * Questions over many cavities: what becomes of some quantities while levers move.
+ *
+ * <p>{@link twofold.study.Setting} sets levers in a trial, moving mirrors where a leg or an incidence is set.
+ * {@link twofold.study.Question} puts levers and quantities together, {@link twofold.study.Survey} asks it along one or two
+ * {@link twofold.study.Axis axes} on all cores, in order and with bounded memory. {@link twofold.study.WorstOver} finds the
+ * worst value over a lever's range.
+ *
+ * <p>Each takes values, answers NaN where something is undefined, and tells its {@link twofold.study.Progress}, which can
+ * stop it. A point's answer depends on the levers' values alone: not on its neighbours, nor on how many cores there are.
+ */
+package twofold.study;
