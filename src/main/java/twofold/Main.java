@@ -28,7 +28,8 @@ public final class Main {
         PrintStream out = new PrintStream(new FileOutputStream(FileDescriptor.out), false, StandardCharsets.UTF_8);
         PrintStream err = new PrintStream(new FileOutputStream(FileDescriptor.err), true, StandardCharsets.UTF_8);
         List<String> arguments = List.of(args);
-        int status = isForWindow(arguments) ? window(arguments, out, err) : Commands.run(arguments, out, err, isTerminal());
+        int status =
+                isForWindow(arguments) ? window(arguments, out, err) : Commands.run(arguments, out, err, isTerminal());
         out.flush();
         System.exit(status);
     }

@@ -28,7 +28,7 @@ public final class WithoutWindow {
      * @return the exit status
      */
     public static int answer(String file, String why, PrintStream out, PrintStream err) {
-        Streams streams = new Streams(out, err);
+        Streams streams = new Streams(out, err, false);
         Optional<Cavity> cavity = Opened.solve(file, streams);
         if (cavity.isEmpty()) {
             return Commands.FILE;

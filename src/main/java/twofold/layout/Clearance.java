@@ -90,11 +90,6 @@ public final class Clearance {
         for (int i = 0; i < footprints.size(); i++) {
             Footprint f = footprints.get(i);
             boolean meant = part.map(p -> p == f.part()).orElse(true);
-            for (int leg = 0; leg < laid.legs().size(); leg++) {
-                if (meant && !touches(laid.legs().get(leg), f.part())) {
-                    offer(kept, most, f, leg);
-                }
-            }
             for (int j = i + 1; j < footprints.size(); j++) {
                 Footprint other = footprints.get(j);
                 if ((meant || part.map(p -> p == other.part()).orElse(true))
@@ -110,11 +105,21 @@ public final class Clearance {
                 }
             }
         }
+        // Mounts are quickly measured, and what is near among them spares beams that are further away.
+        for (Footprint f : footprints) {
+            for (int leg = 0; leg < laid.legs().size(); leg++) {
+                if (part.map(p -> p == f.part()).orElse(true)
+                        && !touches(laid.legs().get(leg), f.part())) {
+                    offer(kept, most, f, leg);
+                }
+            }
+        }
         return kept.stream().sorted(Comparator.comparingDouble(Gap::gap)).toList();
     }
 
     private void offer(PriorityQueue<Gap> kept, int most, Footprint f, int leg) {
-        double least = Double.POSITIVE_INFINITY;
+        double limit = kept.size() < most ? Double.POSITIVE_INFINITY : worst(kept);
+        double least = limit;
         for (Strip strip : strips) {
             if (strip.leg() != leg || strip.length() <= 0) {
                 continue;
@@ -123,13 +128,14 @@ public final class Clearance {
             Point b = laid.legs().get(leg).at(strip.start() + strip.length());
             double length = a.distance(b);
             double near = Convex.toSegment(centre(f.corners()), a, b) - reach(f.corners()) - strip.widest();
-            if (length > 0 && (kept.size() < most || near < worst(kept))) {
+            if (length > 0 && near < least) {
                 least = Math.min(
                         least,
-                        strip.gap(f.corners(), a, new Point((b.x() - a.x()) / length, (b.y() - a.y()) / length)));
+                        strip.gap(
+                                f.corners(), a, new Point((b.x() - a.x()) / length, (b.y() - a.y()) / length), least));
             }
         }
-        if (least < Double.POSITIVE_INFINITY) {
+        if (least < limit) {
             keep(kept, most, new Gap(f.part(), Optional.of(leg), Optional.empty(), least));
         }
     }

@@ -53,8 +53,9 @@ public record Strip(int leg, double start, double length, double waist, double a
      * @param corners of the polygon
      * @param from where the stretch begins on the table
      * @param u unit vector along the beam
+     * @param atMost where the gap is larger, this is the answer
      */
-    double gap(List<Point> corners, Point from, Point u) {
+    double gap(List<Point> corners, Point from, Point u, double atMost) {
         List<Point> local = corners.stream()
                 .map(c -> new Point(
                         (c.x() - from.x()) * u.x() + (c.y() - from.y()) * u.y(),
@@ -68,7 +69,7 @@ public record Strip(int leg, double start, double length, double waist, double a
             below = Math.min(below, -p.y() - halfWidth(p.x()));
         }
         double across = Math.max(above, below);
-        return across <= 0 ? across : Math.min(outline(local), across);
+        return across <= 0 ? across : outline(local, Math.min(across, atMost));
     }
 
     /** The part of a polygon beside the stretch, as corners. */
@@ -89,15 +90,35 @@ public record Strip(int leg, double start, double length, double waist, double a
         return inside;
     }
 
-    /** The distance from a polygon that does not overlap, in the stretch's own frame, to the stretch. */
-    private double outline(List<Point> corners) {
-        double least = Double.POSITIVE_INFINITY;
+    /**
+     * The distance from a polygon that does not overlap, in the stretch's own frame, to the stretch.
+     *
+     * @param atMost a distance that it does not exceed; what is further away by its extent alone is not measured
+     */
+    private double outline(List<Point> corners, double atMost) {
+        double left = corners.stream().mapToDouble(Point::x).min().orElse(0);
+        double right = corners.stream().mapToDouble(Point::x).max().orElse(0);
+        double below = corners.stream().mapToDouble(Point::y).min().orElse(0);
+        double above = corners.stream().mapToDouble(Point::y).max().orElse(0);
+        if (Math.hypot(
+                        Math.max(0, Math.max(left - length, -right)),
+                        Math.max(0, Math.max(below - widest(), -above - widest())))
+                >= atMost) {
+            return atMost;
+        }
+        double least = atMost;
         List<Double> paths = samples();
         for (int i = 1; i < paths.size(); i++) {
             double a = paths.get(i - 1);
             double b = paths.get(i);
             double wa = halfWidth(a);
             double wb = halfWidth(b);
+            double w = Math.max(wa, wb);
+            double along = Math.max(0, Math.max(left - b, a - right));
+            double across = Math.max(0, Math.max(below - w, -above - w));
+            if (Math.hypot(along, across) >= least) {
+                continue;
+            }
             least = Math.min(
                     least,
                     Convex.gap(

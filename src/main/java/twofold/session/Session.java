@@ -14,7 +14,9 @@ import twofold.design.Part;
 import twofold.file.DesignReader;
 import twofold.file.ReadDesign;
 import twofold.file.SafeFile;
+import twofold.layout.Laid;
 import twofold.layout.Layout;
+import twofold.study.WorstOver;
 
 /**
  * One open document. Confined to the thread that made it; the listener hears of every change there.
@@ -85,9 +87,10 @@ public final class Session {
     }
 
     private static Cavity solved(Design design) {
-        return Cavity.solve(Layout.of(design)
+        Laid laid = Layout.of(design)
                 .value()
-                .orElseThrow(() -> new IllegalStateException("a design without problems lies on the table")));
+                .orElseThrow(() -> new IllegalStateException("a design without problems lies on the table"));
+        return Cavity.solve(laid).judgedOver(new WorstOver(laid));
     }
 
     private void opened(Source source, Runner.Ended<Opened> ended) {

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 import java.util.stream.DoubleStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -112,13 +113,14 @@ class JudgementTest {
                 .findFirst()
                 .orElseThrow();
         // What sets levers is told apart from what judges: here a range of three values stands for it.
-        Sweeper three = (Lever lever, Reading reading, java.util.function.DoubleUnaryOperator goodness) -> {
-            assertThat(over.over()).contains(lever.name());
-            return DoubleStream.of(0.9, 0.3, 0.6)
-                    .boxed()
-                    .min(java.util.Comparator.comparingDouble(goodness::applyAsDouble))
-                    .orElseThrow();
-        };
+        Sweeper three =
+                (Lever lever, Function<Chain, Reading> reading, java.util.function.DoubleUnaryOperator goodness) -> {
+                    assertThat(over.over()).contains(lever.name());
+                    return DoubleStream.of(0.9, 0.3, 0.6)
+                            .boxed()
+                            .min(java.util.Comparator.comparingDouble(goodness::applyAsDouble))
+                            .orElseThrow();
+                };
         Judgement judgement = Judgement.over(over, chain(v), three);
         assertThat(judgement.value()).isEqualTo(0.3);
         assertThat(judgement.verdict()).isEqualTo(Judgement.Verdict.MET);
