@@ -48,8 +48,26 @@ final class Stagehand {
             App.show(stage, editor, recall);
             return new Stagehand(stage, editor, new Robot());
         });
-        settle();
+        hand.awaitKeyboard();
         return hand;
+    }
+
+    /** Waits until the window has the keyboard, which a window before it may give up late. */
+    private void awaitKeyboard() throws Exception {
+        for (int i = 0; i < 100; i++) {
+            settle();
+            boolean has = fx(() -> {
+                stage.toFront();
+                stage.requestFocus();
+                return stage.isFocused() && editor.getWidth() > 0;
+            });
+            if (has) {
+                settle();
+                return;
+            }
+            Thread.sleep(20);
+        }
+        throw new IllegalStateException("the window never got the keyboard");
     }
 
     /** Does something on the toolkit's thread. */
@@ -145,6 +163,7 @@ final class Stagehand {
     }
 
     void press(KeyCode... keys) throws Exception {
+        awaitKeyboard();
         fx(() -> {
             for (KeyCode key : keys) {
                 robot.keyPress(key);
