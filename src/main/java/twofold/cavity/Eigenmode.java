@@ -13,6 +13,8 @@ import twofold.optics.RayMatrix;
  * @param gouy round-trip Gouy phase, rad; NaN unless stable
  * @param magnification of a round trip; 1 unless unstable
  * @param roundTrip from the surface of the first mirror, light leaving it
+ * @param oneWay of a standing wave, from the middle of the first mirror to the middle of the last, their curvatures
+ *     included; empty for a ring
  * @param stations along one pass; empty unless stable
  * @param waists one for each stretch, in beam order; empty unless stable
  */
@@ -23,6 +25,7 @@ public record Eigenmode(
         double gouy,
         double magnification,
         RayMatrix roundTrip,
+        Optional<RayMatrix> oneWay,
         List<Station> stations,
         List<Waist> waists) {
     /** Copies the lists. */

@@ -108,6 +108,7 @@ final class Solver {
                 stable ? trial.gouy(plane) : Double.NaN,
                 state == State.UNSTABLE ? trial.magnification(plane) : 1,
                 trial.roundTrip(plane),
+                trial.oneWay(plane),
                 stable ? stations(plane) : List.of(),
                 stable ? waists(plane) : List.of());
     }

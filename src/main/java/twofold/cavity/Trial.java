@@ -357,6 +357,13 @@ public final class Trial {
         return way[(plane == Plane.TANGENTIAL ? 0 : 4) + element];
     }
 
+    /** The one-way matrix between the middles of a standing wave's end mirrors; empty for a ring. */
+    Optional<RayMatrix> oneWay(Plane plane) {
+        return chain.ring
+                ? Optional.empty()
+                : Optional.of(new RayMatrix(way(plane, 0), way(plane, 1), way(plane, 2), way(plane, 3)));
+    }
+
     boolean isRing() {
         return chain.ring;
     }

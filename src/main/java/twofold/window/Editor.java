@@ -28,11 +28,13 @@ import twofold.session.Source;
 import twofold.window.beam.BeamPane;
 import twofold.window.beam.CloseUpPane;
 import twofold.window.bench.BenchPane;
+import twofold.window.panel.LedgerPane;
 import twofold.window.panel.PartPane;
 import twofold.window.panel.PartsPane;
 import twofold.window.panel.ProblemsPane;
 import twofold.window.panel.RequirementsPane;
 import twofold.window.panel.StabilityPane;
+import twofold.window.panel.ZonesPane;
 
 /** The editor's panes, wired to one session. A node: the application puts it into a window, a test into a stage. */
 public final class Editor extends BorderPane {
@@ -44,6 +46,8 @@ public final class Editor extends BorderPane {
     private final PartPane part = new PartPane();
     private final PartsPane parts;
     private final ProblemsPane problems = new ProblemsPane();
+    private final LedgerPane ledger = new LedgerPane();
+    private final ZonesPane zones = new ZonesPane();
     private final RequirementsPane requirements = new RequirementsPane();
     private final Tab asked = new Tab("Requirements", requirements);
     private final Notice notice;
@@ -69,10 +73,16 @@ public final class Editor extends BorderPane {
         VBox.setVgrow(bench, Priority.ALWAYS);
         pictures = split(Orientation.VERTICAL, benchAndProblems, lower);
         TabPane lists = tabs("lists", "Parts and requirements", new Tab("Parts", parts), asked);
-        VBox side = new VBox(8, stability, part, lists);
-        VBox.setVgrow(part, Priority.ALWAYS);
-        part.setPrefHeight(400);
-        part.setMinHeight(140);
+        TabPane looks = tabs(
+                "looks",
+                "The part, zones and astigmatism",
+                new Tab("Part", part),
+                new Tab("Zones", zones),
+                new Tab("Astigmatism", ledger));
+        VBox side = new VBox(8, stability, looks, lists);
+        VBox.setVgrow(looks, Priority.ALWAYS);
+        looks.setPrefHeight(400);
+        looks.setMinHeight(160);
         lists.setPrefHeight(240);
         lists.setMinHeight(140);
         side.setMinWidth(300);
@@ -153,6 +163,8 @@ public final class Editor extends BorderPane {
         beam.setTheme(next);
         closeUp.setTheme(next);
         stability.setTheme(next);
+        zones.setTheme(next);
+        ledger.setTheme(next);
     }
 
     /** Positions of the dividers, 0 to 1. */
@@ -227,6 +239,8 @@ public final class Editor extends BorderPane {
         stability.show(shown);
         part.show(shown);
         parts.show(shown);
+        zones.show(shown);
+        ledger.show(shown);
         requirements.show(shown);
         asked.setText(StatusWords.asked(shown));
         problems.show(shown);

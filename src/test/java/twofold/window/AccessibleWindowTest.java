@@ -13,6 +13,7 @@ import javafx.scene.control.Labeled;
 import javafx.scene.control.MenuBar;
 import javafx.scene.control.ScrollBar;
 import javafx.scene.control.SplitPane;
+import javafx.scene.control.TabPane;
 import javafx.scene.image.WritableImage;
 import javafx.scene.paint.Color;
 import org.jspecify.annotations.Nullable;
@@ -74,6 +75,36 @@ class AccessibleWindowTest {
         assertThat(reached).hasSizeGreaterThan(8);
         assertThat(reached)
                 .allSatisfy(n -> assertThat(isNamed(n)).as("%s has a name", n).isTrue());
+    }
+
+    @ParameterizedTest
+    @CsvSource({"z-fold-rod", "bow-tie-doubler", "one-plane", "v-fold-pumped"})
+    void zonesAndAstigmatismAreDrawnInBothThemes(String sample) throws Exception {
+        Stagehand opened = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
+        stage = opened;
+        opened.openSample(sample + ".json");
+        TabPane looks = opened.node("looks", TabPane.class);
+        TabPane lists = opened.node("lists", TabPane.class);
+        for (Theme theme : Theme.values()) {
+            for (int tab = 1; tab < 3; tab++) {
+                int chosen = tab;
+                Stagehand.fx(() -> {
+                    opened.editor().setTheme(theme);
+                    looks.getSelectionModel().select(chosen);
+                    lists.getSelectionModel().select(1);
+                    return true;
+                });
+                WritableImage image = opened.picture(sample + "-tab" + tab + "-" + theme.word());
+                Color paper = Color.web(theme.css(Ink.PAPER));
+                int inked = 0;
+                for (int x = 990; x < 1260; x += 2) {
+                    for (int y = 240; y < 500; y += 2) {
+                        inked += image.getPixelReader().getColor(x, y).equals(paper) ? 0 : 1;
+                    }
+                }
+                assertThat(inked).as("something is drawn").isGreaterThan(200);
+            }
+        }
     }
 
     @ParameterizedTest

@@ -116,6 +116,9 @@ final class Stagehand {
     /** Moves the mouse to a point of a node. */
     void move(Node on, double x, double y) throws Exception {
         fx(() -> {
+            // What has just become visible has its place only after a layout.
+            editor.applyCss();
+            editor.layout();
             Point2D at = on.localToScreen(x, y);
             robot.mouseMove(at);
             return true;

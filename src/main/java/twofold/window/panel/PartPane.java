@@ -31,7 +31,7 @@ public final class PartPane extends VBox {
 
     /** Makes the pane. */
     public PartPane() {
-        getStyleClass().add("card");
+        getStyleClass().add("inner-card");
         title.getStyleClass().add("title");
         title.setMinWidth(0);
         HBox.setHgrow(title, Priority.ALWAYS);
