@@ -6,7 +6,7 @@ package twofold.cavity;
  * <p>For a hole of radius a and radii u and v the power outside is ∫exp(−2a²k)/k dφ / (2πuv) with k = cos²φ/u² +
  * sin²φ/v². With tan φ = (v/u) tan ψ that is the mean of exp(−2a²/(u²cos²ψ + v²sin²ψ)) over ψ, smooth and at most 1; for v
  * = 0, a slit, it is Craig's form of erfc(√2 a/u) (IEEE MILCOM 91, 571 (1991), from memory). The trapezium rule converges
- * geometrically on a periodic function (Trefethen &amp; Weideman, SIAM Rev. 56, 385 (2014)), and allocates nothing.
+ * geometrically on a periodic function (Trefethen &amp; Weideman, SIAM Rev. 56, 385 (2014), from memory), and allocates nothing.
  */
 public final class Clipping {
     /** How well two successive halvings of the step must agree, relative. */
