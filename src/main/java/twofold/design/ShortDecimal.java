@@ -1,12 +1,15 @@
 package twofold.design;
 
+import java.math.BigDecimal;
+import java.math.BigInteger;
+import java.math.MathContext;
+
 /**
- * The shortest decimal that reads back to a double, for units that are a power of ten of the SI unit: as
- * {@link Unit#text} says, and fast enough for millions of numbers.
+ * The shortest decimal in a unit that reads back to a double, as {@link Unit#text} says, fast enough for millions of numbers.
  *
  * <p>A double from 1e-6 to 1e16 times a power of ten that makes it 17 digits long is exact as a sum of two doubles, the
- * rounded product and what a fused multiply-add finds missing. Rounded to 15, 16 or 17 digits it reads back if it is less
- * than half a unit in the last place away.
+ * rounded product and what a fused multiply-add finds missing; times a unit that is no power of ten it is good to 1e-31.
+ * Rounded to 15, 16 or 17 digits it reads back if it is less than half a unit in the last place away.
  */
 final class ShortDecimal {
     private static final double LEAST = 1e-6;
@@ -33,41 +36,60 @@ final class ShortDecimal {
         }
     }
 
-    private ShortDecimal() {}
+    /** The SI unit over the unit, in two doubles, less powers of ten. */
+    private final double times;
+
+    private final double timesRest;
+    /** The power of ten that was taken out. */
+    private final int power;
 
     /**
-     * Writes a number times 10 to a power.
+     * For a unit.
+     *
+     * @param factor the unit in SI
+     */
+    ShortDecimal(BigDecimal factor) {
+        boolean isPower = factor.unscaledValue().equals(BigInteger.ONE);
+        BigDecimal inverse = isPower ? BigDecimal.ONE : BigDecimal.ONE.divide(factor, new MathContext(40));
+        power = isPower ? factor.scale() : 0;
+        times = inverse.doubleValue();
+        timesRest = inverse.subtract(new BigDecimal(times)).doubleValue();
+    }
+
+    /**
+     * Writes a number in the unit.
      *
      * @param si any double
-     * @param power of ten by which the number is shown larger
      * @param to takes the text
      * @return whether it could; else nothing was written
      */
-    static boolean append(double si, int power, StringBuilder to) {
+    boolean append(double si, StringBuilder to) {
         double size = Math.abs(si);
-        if (!(size >= LEAST && size < MOST)) {
+        double shown = size * times;
+        if (!(shown >= LEAST && shown < MOST)) {
             return false;
         }
-        int shift = 16 - (int) Math.floor(Math.log10(size));
-        if (shift >= 0 && shift < POWERS.length && size * POWERS[shift] >= 10 * SEVENTEEN) {
+        double rest = Math.fma(size, times, -shown) + size * timesRest;
+        int shift = 16 - (int) Math.floor(Math.log10(shown));
+        if (shift >= 0 && shift < POWERS.length && shown * POWERS[shift] >= 10 * SEVENTEEN) {
             shift--;
-        } else if (shift + 1 < POWERS.length && size * POWERS[shift] < SEVENTEEN) {
+        } else if (shift + 1 < POWERS.length && shown * POWERS[shift] < SEVENTEEN) {
             shift++;
         }
         if (shift < 0 || shift >= POWERS.length) {
             return false;
         }
-        double high = size * POWERS[shift];
-        double low = Math.fma(size, POWERS[shift], -high);
+        double high = shown * POWERS[shift];
+        double low = Math.fma(shown, POWERS[shift], -high) + rest * POWERS[shift];
         if (!(high >= SEVENTEEN && high < 10 * SEVENTEEN)) {
             return false;
         }
         // The digits are those of whole, and part of one more, from 0 to 1.
         long whole = (long) high + (long) Math.floor(low);
         double part = low - Math.floor(low);
-        double up = Math.ulp(size) / 2 * POWERS[shift];
+        double up = Math.ulp(size) / 2 * times * POWERS[shift];
         // Below a power of two the next number lies half as far away.
-        double down = (size - Math.nextDown(size)) / 2 * POWERS[shift];
+        double down = (size - Math.nextDown(size)) / 2 * times * POWERS[shift];
         long digits = nearest(whole, part, 1);
         int dropped = 0;
         for (int drop = 2; drop >= 1; drop--) {

@@ -10,6 +10,7 @@ import java.math.RoundingMode;
  * <p>Reading multiplies the decimal <em>text</em> exactly and rounds once. Writing gives the shortest decimal that reads
  * back to the same double, so that load and save is stable by construction.
  */
+@SuppressWarnings("ImmutableEnumChecker") // a ShortDecimal holds final numbers alone
 public enum Unit {
     /** A pure number. */
     ONE("", "1", 3),
@@ -35,19 +36,16 @@ public enum Unit {
 
     private static final MathContext EXACT_ENOUGH = new MathContext(40);
 
-    /** What stands for the power of a factor that is no power of ten. */
-    private static final int NO_POWER = Integer.MIN_VALUE;
-
     private final String symbol;
     private final BigDecimal factor;
+    private final ShortDecimal decimal;
     private final int decimals;
-    private final int power;
 
     Unit(String symbol, String factor, int decimals) {
         this.symbol = symbol;
         this.decimals = decimals;
         this.factor = new BigDecimal(factor);
-        this.power = this.factor.unscaledValue().equals(java.math.BigInteger.ONE) ? this.factor.scale() : NO_POWER;
+        this.decimal = new ShortDecimal(this.factor);
     }
 
     /** The unit as printed behind a number; empty for a pure number. */
@@ -106,7 +104,7 @@ public enum Unit {
     public void append(double si, StringBuilder to) {
         if (si == 0) {
             to.append('0');
-        } else if (power == NO_POWER || !ShortDecimal.append(si, power, to)) {
+        } else if (!decimal.append(si, to)) {
             to.append(slow(si));
         }
     }
