@@ -16,8 +16,8 @@ import twofold.layout.Laid;
 public final class WorstOver implements Sweeper {
     private static final int POINTS = 401;
 
-    /** Of a step, which a place is found to; the worst value is good to its square. */
-    private static final double NEAR = 1e-7;
+    /** Golden sections, each of which leaves 0.618: a place is found to 1e-7 of a step, the worst value to its square. */
+    private static final int SECTIONS = 34;
 
     private static final double GOLDEN = (Math.sqrt(5) - 1) / 2;
 
@@ -93,7 +93,7 @@ public final class WorstOver implements Sweeper {
             double d = a + GOLDEN * (b - a);
             double atC = value(c);
             double atD = value(d);
-            while (Math.abs(b - a) > NEAR * Math.abs(to - from)) {
+            for (int i = 0; i < SECTIONS; i++) {
                 if (Double.isNaN(atC) || Double.isNaN(atD)) {
                     return Double.NaN;
                 }
