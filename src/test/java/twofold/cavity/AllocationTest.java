@@ -3,6 +3,7 @@ package twofold.cavity;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.Optional;
+import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
@@ -15,6 +16,12 @@ import twofold.optics.Plane;
 
 /** The walk and what is read off it allocate nothing, so that a map of millions of points makes no garbage. */
 class AllocationTest {
+    /** What the compiler makes of the walk depends on what it has seen: a session sees every kind of cavity. */
+    @BeforeAll
+    static void everyKindOfCavityWasWalked() {
+        Allocated.seeEveryKind();
+    }
+
     @Test
     void oneEvaluationAllocatesNothing() {
         Chain chain = Chain.of(Layout.of(TwelvePartRing.design()).value().orElseThrow());

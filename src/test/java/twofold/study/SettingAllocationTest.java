@@ -3,6 +3,7 @@ package twofold.study;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
+import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import twofold.Allocated;
@@ -18,6 +19,11 @@ import twofold.optics.Plane;
 
 /** Setting fields, and moving rigid arms, allocates nothing: maps of millions of points make no garbage. */
 class SettingAllocationTest {
+    @BeforeAll
+    static void everyKindOfCavityWasWalked() {
+        Allocated.seeEveryKind();
+    }
+
     @ParameterizedTest
     @CsvSource({
         "focal_length_mm, Lens, '', 4000",
