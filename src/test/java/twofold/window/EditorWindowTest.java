@@ -142,7 +142,7 @@ class EditorWindowTest {
     }
 
     @Test
-    void theMiddleButtonAndTheSpaceBarPan() throws Exception {
+    void theMiddleButtonTheKeysAndTheSpaceBarPan() throws Exception {
         BenchView before = benchView();
         stage.drag(bench, MouseButton.MIDDLE, 300, 300, 80, 40);
         assertThat(benchView().viewport().originX() - before.viewport().originX())
@@ -156,6 +156,19 @@ class EditorWindowTest {
         stage.press(KeyCode.ALT, KeyCode.LEFT);
         assertThat(benchView().viewport().originX() - before.viewport().originX())
                 .isCloseTo(120, within(1.0));
+        String selected = selectedName();
+        stage.hold(KeyCode.SPACE);
+        stage.drag(bench, MouseButton.PRIMARY, 300, 300, -50, 30);
+        stage.release(KeyCode.SPACE);
+        assertThat(benchView().viewport().originX() - before.viewport().originX())
+                .isCloseTo(70, within(1.0));
+        assertThat(benchView().viewport().originY() - before.viewport().originY())
+                .isCloseTo(70, within(1.0));
+        assertThat(selectedName()).as("a pan selects nothing").isEqualTo(selected);
+        stage.drag(bench, MouseButton.PRIMARY, 300, 300, -50, 30);
+        assertThat(benchView().viewport().originX() - before.viewport().originX())
+                .as("without the space bar nothing moves")
+                .isCloseTo(70, within(1.0));
     }
 
     @Test

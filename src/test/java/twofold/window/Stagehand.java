@@ -165,6 +165,25 @@ final class Stagehand {
         settle();
     }
 
+    /** Presses a key and keeps it down. */
+    void hold(KeyCode key) throws Exception {
+        awaitKeyboard();
+        fx(() -> {
+            robot.keyPress(key);
+            return true;
+        });
+        settle();
+    }
+
+    /** Lets a key go. */
+    void release(KeyCode key) throws Exception {
+        fx(() -> {
+            robot.keyRelease(key);
+            return true;
+        });
+        settle();
+    }
+
     void press(KeyCode... keys) throws Exception {
         awaitKeyboard();
         fx(() -> {
