@@ -231,7 +231,7 @@ class EditorWindowTest {
             stage.editor().session().look();
             return true;
         });
-        Stagehand.settle();
+        stage.settle();
         assertThat(stage.node("notice", javafx.scene.layout.HBox.class).isVisible())
                 .isTrue();
         assertThat(shown().problems()).isEmpty();
@@ -292,7 +292,7 @@ class EditorWindowTest {
             stage.editor().session().reload();
             return true;
         });
-        Stagehand.settle();
+        stage.settle();
         assertThat(shown().failure()).isPresent();
         assertThat(shown().cavity()).isPresent();
         assertThat(Optional.of(benchView())).isPresent();

@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
+import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.FutureTask;
 import javafx.application.Platform;
 import javafx.embed.swing.SwingFXUtils;
@@ -77,10 +78,38 @@ final class Stagehand {
         return task.get(20, SECONDS);
     }
 
-    /** Waits until what the last turns posted has run and was drawn. */
-    static void settle() throws Exception {
+    /**
+     * Waits until what the last turns posted has run, was laid out and drawn. Turns alone are not enough: the window's
+     * size and its dividers reach the drawings at the pulses after them, and a point taken from a picture drawn before
+     * that is somewhere else by the time the mouse gets there.
+     */
+    void settle() throws Exception {
         for (int i = 0; i < 3; i++) {
             fx(() -> true);
+        }
+        for (int i = 0; i < 2; i++) {
+            pulse();
+        }
+    }
+
+    private void pulse() throws Exception {
+        if (!fx(stage::isShowing)) {
+            return;
+        }
+        CountDownLatch laidOut = new CountDownLatch(1);
+        Runnable count = laidOut::countDown;
+        fx(() -> {
+            editor.getScene().addPostLayoutPulseListener(count);
+            Platform.requestNextPulse();
+            return true;
+        });
+        boolean came = laidOut.await(20, SECONDS);
+        fx(() -> {
+            editor.getScene().removePostLayoutPulseListener(count);
+            return true;
+        });
+        if (!came) {
+            throw new IllegalStateException("no pulse came");
         }
     }
 
