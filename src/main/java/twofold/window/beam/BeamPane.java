@@ -4,13 +4,8 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
-import javafx.scene.Cursor;
 import javafx.scene.control.Tooltip;
-import javafx.scene.input.KeyCode;
-import javafx.scene.input.KeyEvent;
-import javafx.scene.input.MouseButton;
 import javafx.scene.input.MouseEvent;
-import javafx.scene.input.ScrollEvent;
 import org.jspecify.annotations.Nullable;
 import twofold.cavity.Cavity;
 import twofold.picture.BeamDrawing;
@@ -19,19 +14,13 @@ import twofold.picture.Painter;
 import twofold.picture.Stretch;
 import twofold.session.Session;
 import twofold.session.Shown;
-import twofold.window.DrawingPane;
+import twofold.window.ViewPane;
 
-/**
- * The beam along the unfolded path. The wheel zooms at the pointer, the middle button or the space bar with the first pans,
- * a click picks a part, hovering over a waist's dot shows its numbers; keys as on the bench.
- */
-public final class BeamPane extends DrawingPane {
+/** The beam along the unfolded path; hovering over a waist's dot shows its numbers. */
+public final class BeamPane extends ViewPane {
     private static final double NEAR_PART = 12;
     private static final double NEAR_DOT = 8;
-    private static final double STEP = 1.25;
-    private static final double PAN = 40;
 
-    private final Session session;
     private final Tooltip numbers = new Tooltip();
     private @Nullable Cavity cavity;
     private @Nullable BeamDrawing drawing;
@@ -39,29 +28,11 @@ public final class BeamPane extends DrawingPane {
     private double to;
     private OptionalInt selected = OptionalInt.empty();
     private OptionalDouble pointed = OptionalDouble.empty();
-    private boolean isSpaceDown;
-    private boolean isPanning;
-    private double lastX;
 
     /** Makes the pane. */
     public BeamPane(Session session) {
-        super("Beam along the path");
-        this.session = session;
+        super("Beam along the path", session);
         setId("beam");
-        setFocusTraversable(true);
-        addEventHandler(MouseEvent.MOUSE_MOVED, this::moved);
-        addEventHandler(MouseEvent.MOUSE_EXITED, e -> left());
-        addEventHandler(MouseEvent.MOUSE_PRESSED, this::pressed);
-        addEventHandler(MouseEvent.MOUSE_DRAGGED, this::dragged);
-        addEventHandler(MouseEvent.MOUSE_RELEASED, e -> released());
-        addEventHandler(ScrollEvent.SCROLL, this::scrolled);
-        addEventHandler(KeyEvent.KEY_PRESSED, this::key);
-        addEventHandler(KeyEvent.KEY_RELEASED, e -> {
-            if (e.getCode() == KeyCode.SPACE) {
-                isSpaceDown = false;
-                released();
-            }
-        });
     }
 
     /** Shows a moment of the session; another design is shown whole. */
@@ -79,7 +50,7 @@ public final class BeamPane extends DrawingPane {
         redraw();
     }
 
-    /** Shows the whole path. */
+    @Override
     public void showAll() {
         from = 0;
         to = drawing == null ? 0 : drawing.course().length();
@@ -89,7 +60,11 @@ public final class BeamPane extends DrawingPane {
     /** What is shown now; empty before anything is. */
     public Optional<BeamView> view() {
         BeamDrawing d = drawing;
-        return d == null ? Optional.empty() : Optional.of(view(d, Math.floor(getWidth()), Math.floor(getHeight())));
+        return d == null ? Optional.empty() : Optional.of(view(d));
+    }
+
+    private BeamView view(BeamDrawing d) {
+        return view(d, Math.floor(getWidth()), Math.floor(getHeight()));
     }
 
     private BeamView view(BeamDrawing d, double width, double height) {
@@ -113,7 +88,8 @@ public final class BeamPane extends DrawingPane {
         redraw();
     }
 
-    private void zoom(double factor, double x) {
+    @Override
+    protected void zoom(double factor, double x, double y) {
         BeamDrawing d = drawing;
         view().ifPresent(v -> {
             if (d != null) {
@@ -122,7 +98,8 @@ public final class BeamPane extends DrawingPane {
         });
     }
 
-    private void pan(double dx) {
+    @Override
+    protected void pan(double dx, double dy) {
         BeamDrawing d = drawing;
         view().ifPresent(v -> {
             if (d != null) {
@@ -131,18 +108,15 @@ public final class BeamPane extends DrawingPane {
         });
     }
 
-    private void moved(MouseEvent e) {
+    @Override
+    protected void hover(MouseEvent e) {
         BeamDrawing d = drawing;
         if (d == null) {
             return;
         }
-        BeamView v = view(d, Math.floor(getWidth()), Math.floor(getHeight()));
+        BeamView v = view(d);
         OptionalDouble path = d.pathAt(v, e.getX(), e.getY());
-        session.point(path.isPresent() ? Optional.of(path.getAsDouble()) : Optional.empty());
-        setCursor(
-                isSpaceDown
-                        ? Cursor.MOVE
-                        : d.partAt(v, e.getX(), e.getY(), NEAR_PART).isPresent() ? Cursor.HAND : Cursor.DEFAULT);
+        session().point(path.isPresent() ? Optional.of(path.getAsDouble()) : Optional.empty());
         Optional<BeamDrawing.WaistDot> dot = d.waistAt(v, e.getX(), e.getY(), NEAR_DOT);
         if (dot.isPresent()) {
             numbers.setText(WaistWords.of(dot.get()));
@@ -152,67 +126,23 @@ public final class BeamPane extends DrawingPane {
         }
     }
 
-    private void left() {
-        session.point(Optional.empty());
+    @Override
+    protected void left() {
+        super.left();
         numbers.hide();
     }
 
-    private void pressed(MouseEvent e) {
-        requestFocus();
-        lastX = e.getX();
-        boolean first = e.getButton() == MouseButton.PRIMARY;
-        isPanning = e.getButton() == MouseButton.MIDDLE || (first && isSpaceDown);
+    @Override
+    protected void press(MouseEvent e) {
+        // Between parts a click on the path means nothing: the selection stays.
+        if (partAt(e.getX(), e.getY()).isPresent()) {
+            super.press(e);
+        }
+    }
+
+    @Override
+    protected OptionalInt partAt(double x, double y) {
         BeamDrawing d = drawing;
-        if (first && !isPanning && d != null) {
-            OptionalInt part =
-                    d.partAt(view(d, Math.floor(getWidth()), Math.floor(getHeight())), e.getX(), e.getY(), NEAR_PART);
-            if (part.isPresent()) {
-                session.select(Optional.of(part.getAsInt()));
-            }
-        }
-    }
-
-    private void dragged(MouseEvent e) {
-        if (isPanning) {
-            pan(e.getX() - lastX);
-            lastX = e.getX();
-        }
-    }
-
-    private void released() {
-        isPanning = false;
-        setCursor(Cursor.DEFAULT);
-    }
-
-    private void scrolled(ScrollEvent e) {
-        double steps = e.getDeltaY() / Math.max(1, e.getMultiplierY());
-        if (steps != 0) {
-            zoom(Math.pow(STEP, Math.max(-4, Math.min(4, steps))), e.getX());
-            e.consume();
-        }
-    }
-
-    private void key(KeyEvent e) {
-        boolean known = true;
-        switch (e.getCode()) {
-            case SPACE -> isSpaceDown = true;
-            case HOME -> showAll();
-            case PLUS, EQUALS, ADD -> zoom(STEP, getWidth() / 2);
-            case MINUS, SUBTRACT -> zoom(1 / STEP, getWidth() / 2);
-            case PAGE_DOWN -> session.step(1);
-            case PAGE_UP -> session.step(-1);
-            case ESCAPE -> session.select(Optional.empty());
-            case LEFT -> known = e.isAltDown() && panned(PAN);
-            case RIGHT -> known = e.isAltDown() && panned(-PAN);
-            default -> known = false;
-        }
-        if (known) {
-            e.consume();
-        }
-    }
-
-    private boolean panned(double dx) {
-        pan(dx);
-        return true;
+        return d == null ? OptionalInt.empty() : d.partAt(view(d), x, y, NEAR_PART);
     }
 }
