@@ -2,6 +2,7 @@ package twofold.layout;
 
 import java.util.List;
 import twofold.design.Point;
+import twofold.design.Side;
 
 /**
  * The beam from one mirror to the next.
@@ -42,5 +43,37 @@ public record Leg(
         double share = length > 0 ? Math.min(1, Math.max(0, (along - a.path()) / length)) : 0;
         return new Point(
                 a.at().x() + share * (b.at().x() - a.at().x()), a.at().y() + share * (b.at().y() - a.at().y()));
+    }
+
+    /**
+     * The place of the axis that is nearest to a point of the table.
+     *
+     * @param path from the leg's start, m
+     * @param distance from the point, m
+     * @param side the point's, looking along the beam
+     */
+    public record Foot(double path, double distance, Side side) {}
+
+    /** The place of the axis nearest to a point of the table. */
+    public Foot nearest(Point to) {
+        Foot nearest = new Foot(0, Double.POSITIVE_INFINITY, Side.LEFT);
+        for (int i = 1; i < bends.size(); i++) {
+            Bend a = bends.get(i - 1);
+            Bend b = bends.get(i);
+            double alongX = b.at().x() - a.at().x();
+            double alongY = b.at().y() - a.at().y();
+            double offX = to.x() - a.at().x();
+            double offY = to.y() - a.at().y();
+            double square = alongX * alongX + alongY * alongY;
+            double share = square == 0 ? 0 : Math.min(1, Math.max(0, (offX * alongX + offY * alongY) / square));
+            double distance = Math.hypot(offX - share * alongX, offY - share * alongY);
+            if (distance < nearest.distance()) {
+                nearest = new Foot(
+                        a.path() + share * (b.path() - a.path()),
+                        distance,
+                        alongX * offY - alongY * offX >= 0 ? Side.LEFT : Side.RIGHT);
+            }
+        }
+        return nearest;
     }
 }

@@ -120,21 +120,10 @@ public final class Course {
         double path = 0;
         double least = Double.POSITIVE_INFINITY;
         for (int l = 0; l < laid.legs().size(); l++) {
-            List<Leg.Bend> bends = laid.legs().get(l).bends();
-            for (int i = 1; i < bends.size(); i++) {
-                Leg.Bend a = bends.get(i - 1);
-                Leg.Bend b = bends.get(i);
-                double dx = b.at().x() - a.at().x();
-                double dy = b.at().y() - a.at().y();
-                double square = dx * dx + dy * dy;
-                double share = square == 0
-                        ? 0
-                        : Math.min(1, Math.max(0, ((to.x() - a.at().x()) * dx + (to.y() - a.at().y()) * dy) / square));
-                double off = Math.hypot(a.at().x() + share * dx - to.x(), a.at().y() + share * dy - to.y());
-                if (off < least) {
-                    least = off;
-                    path = starts[l] + a.path() + share * (b.path() - a.path());
-                }
+            Leg.Foot foot = laid.legs().get(l).nearest(to);
+            if (foot.distance() < least) {
+                least = foot.distance();
+                path = starts[l] + foot.path();
             }
         }
         return new Nearest(path, least);

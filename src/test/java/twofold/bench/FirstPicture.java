@@ -5,6 +5,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.concurrent.Semaphore;
 import javafx.application.Platform;
+import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
 import javafx.scene.canvas.Canvas;
@@ -17,6 +18,8 @@ import javafx.scene.control.MenuBar;
 import javafx.scene.control.MenuButton;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.SplitPane;
+import javafx.scene.control.Tab;
+import javafx.scene.control.TabPane;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
@@ -119,20 +122,27 @@ final class FirstPicture {
         }
         Pane stability = pane();
         stability.setPrefHeight(112);
-        VBox side = new VBox(
-                8,
-                stability,
-                new Label("Part"),
-                new Button("Copy figures"),
-                new ScrollPane(grid),
-                new Label("Parts"),
-                list);
+        TabPane looks = tabs(
+                new VBox(6, new HBox(8, new Label("Part"), new Button("Copy figures")), new ScrollPane(grid)),
+                pane(),
+                pane());
+        TabPane lists = tabs(list, new ScrollPane(new GridPane()));
+        VBox side = new VBox(8, stability, looks, lists);
         SplitPane whole = new SplitPane(pictures, side);
         whole.setDividerPositions(0.76);
         BorderPane root = new BorderPane(whole);
         root.setTop(new VBox(menus, tools));
         root.setBottom(new HBox(new Label("Said"), new Label("Facts")));
         return root;
+    }
+
+    /** Tabs as the editor has them. */
+    private static TabPane tabs(Node... contents) {
+        TabPane tabs = new TabPane();
+        for (Node content : contents) {
+            tabs.getTabs().add(new Tab("Tab", content));
+        }
+        return tabs;
     }
 
     private static Pane pane() {
