@@ -3,40 +3,67 @@ package twofold.session;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.function.Consumer;
+import java.util.function.UnaryOperator;
 import twofold.cavity.Cavity;
 import twofold.design.Design;
 import twofold.design.Kind;
 import twofold.design.Part;
+import twofold.design.Problem;
+import twofold.design.Subject;
+import twofold.edit.Edit;
 import twofold.file.DesignReader;
+import twofold.file.Fingerprint;
 import twofold.file.ReadDesign;
 import twofold.file.SafeFile;
 import twofold.layout.Laid;
 import twofold.layout.Layout;
+import twofold.layout.Outcome;
 import twofold.study.WorstOver;
 
 /**
- * One open document. Confined to the thread that made it; the listener hears of every change there.
+ * One open document: opened or made, edited with undo and redo, saved. Confined to the thread that made it; the listener
+ * hears of every change there, of each once.
+ *
+ * <p>An edit or a preview is solved before the call returns; requirements over a lever's range are judged afterwards, the
+ * newest design's alone. Nothing here asks: whoever opens or makes another document has asked what shall become of
+ * unsaved work ({@link Shown#isUnsaved}).
  */
 public final class Session {
     private final Runner runner;
     private final Consumer<Shown> listener;
+    private final Newest<Cavity, Cavity> judge;
+    private final Saver saver;
     private Shown shown = Shown.NOTHING;
-    private byte[] asRead = new byte[0];
+    private Optional<Document> document = Optional.empty();
+    private Optional<Preview> preview = Optional.empty();
+    private Selection selection = Selection.NONE;
+    private Optional<Double> pointed = Optional.empty();
+    private List<Problem> obstacles = List.of();
+    private Optional<Refused> refused = Optional.empty();
+    private Set<Fingerprint> refusedBytes = Set.of();
+    private boolean isChangedOnDisk;
+    private Optional<String> trouble = Optional.empty();
+    private int documents;
     private int newest;
+
+    /** What is shown of an edit before it is made; and the selection to return to, unless the person selects meanwhile. */
+    private record Preview(Edit edit, Cavity cavity, Optional<Selection> home) {}
 
     /**
      * Makes a session with nothing open.
      *
-     * @param runner for reading and solving
+     * @param runner for reading, writing and judging
      * @param listener told of every change
      */
     public Session(Runner runner, Consumer<Shown> listener) {
         this.runner = runner;
         this.listener = listener;
+        this.judge = new Newest<>(runner, c -> c.judgedOver(new WorstOver(c.laid())), this::judged);
+        this.saver = new Saver(runner);
     }
 
     /** What is shown now. */
@@ -44,141 +71,447 @@ public final class Session {
         return shown;
     }
 
-    private void show(Shown next) {
+    private void show() {
+        Optional<Cavity> cavity = cavity();
+        Optional<History> history = document.map(Document::history);
+        boolean isPreview = preview.isPresent();
+        Shown next = new Shown(
+                document.map(Document::number).orElse(0),
+                document.map(Document::source),
+                cavity,
+                selection,
+                pointed,
+                isPreview ? preview.map(p -> p.edit().name()) : history.flatMap(History::undoName),
+                isPreview ? Optional.empty() : history.flatMap(History::redoName),
+                history.map(History::isUnsaved).orElse(false),
+                isPreview,
+                obstacles,
+                refused,
+                isChangedOnDisk,
+                trouble);
         if (!next.equals(shown)) {
             shown = next;
             listener.accept(next);
         }
     }
 
+    /** What is to be seen: the preview, else the document. */
+    private Optional<Cavity> cavity() {
+        return preview.map(Preview::cavity).or(() -> document.map(Document::cavity));
+    }
+
+    private Optional<Design> design() {
+        return cavity().map(c -> c.laid().design());
+    }
+
+    static String words(Exception why) {
+        String message = why.getMessage();
+        return message == null ? why.getClass().getSimpleName() : message;
+    }
+
+    // Opening
+
     /** What reading a source came to. */
-    @SuppressWarnings("ArrayRecordComponent") // compared by nobody
-    private record Opened(byte[] bytes, ReadDesign read, Optional<Cavity> cavity) {}
-
-    /** Opens a file; where it is bad, the last good design stays beside its problems. */
-    public void open(Path file) {
-        open(Source.of(file), () -> SafeFile.read(file, DesignReader.MOST_BYTES));
-    }
-
-    /** Opens a sample carried in the program. */
-    public void openSample(String name) {
-        open(Source.sample(name), () -> Samples.bytes(name));
-    }
+    private record Opened(Fingerprint print, ReadDesign read, Optional<Cavity> cavity) {}
 
     /** Where a document's bytes come from. */
     private interface Bytes {
         byte[] read() throws IOException;
     }
 
+    /**
+     * Opens a file. Where it is bad, the open document stays as it is, and the file's problems are shown beside it. The
+     * document's own file, opened again, is one step of its history.
+     */
+    public void open(Path file) {
+        open(Source.of(file), () -> SafeFile.read(file, DesignReader.MOST_BYTES + 1));
+    }
+
+    /** Opens a sample carried in the program; it can be saved in another file only. */
+    public void openSample(String name) {
+        open(Source.sample(name), () -> Samples.bytes(name));
+    }
+
     /** Opens; a newer request makes an older one's answer void. */
     private void open(Source source, Bytes bytes) {
         int mine = ++newest;
+        Optional<Design> asked = document.map(d -> d.history().now());
         runner.run(
                 () -> {
                     byte[] all = bytes.read();
                     ReadDesign read = DesignReader.read(all);
-                    return new Opened(all, read, read.design().map(Session::solved));
+                    return new Opened(Fingerprint.of(all), read, read.design().map(d -> judgedWhole(Document.lay(d))));
                 },
                 ended -> {
                     if (mine == newest) {
-                        opened(source, ended);
+                        opened(
+                                source,
+                                ended,
+                                asked.equals(document.map(d -> d.history().now())));
+                        settle();
                     }
                 });
     }
 
-    private static Cavity solved(Design design) {
-        Laid laid = Layout.of(design)
-                .value()
-                .orElseThrow(() -> new IllegalStateException("a design without problems lies on the table"));
+    private static Cavity judgedWhole(Laid laid) {
         return Cavity.solve(laid).judgedOver(new WorstOver(laid));
     }
 
-    private void opened(Source source, Runner.Ended<Opened> ended) {
-        if (ended instanceof Runner.Ended.Done<Opened> done) {
+    private void opened(Source source, Runner.Ended<Opened> ended, boolean isUntouched) {
+        isChangedOnDisk = false;
+        if (ended instanceof Runner.Ended.Failed<Opened> failed) {
+            refuse(source, List.of(), Optional.of(words(failed.why())), Set.of());
+        } else if (ended instanceof Runner.Ended.Done<Opened> done) {
             Opened opened = done.value();
-            asRead = opened.bytes();
-            if (opened.cavity().isPresent()) {
+            boolean isOwn = document.map(Document::source).equals(Optional.of(source));
+            if (opened.cavity().isEmpty()) {
+                refuse(source, opened.read().problems(), Optional.empty(), Set.of(opened.print()));
+            } else if (isOwn) {
+                again(document.orElseThrow(), opened);
+            } else if (isUntouched) {
                 Cavity cavity = opened.cavity().get();
-                show(Shown.good(source, cavity, keptSelection(source, cavity)));
+                begin(source, History.ofSaved(cavity.laid().design()), cavity);
+                document.orElseThrow().holds(opened.print());
             } else {
-                show(shown.bad(source, opened.read().problems(), Optional.empty()));
+                String why = "the open design was edited meanwhile; open the file again";
+                refuse(source, List.of(), Optional.of(why), Set.of(opened.print()));
             }
-        } else if (ended instanceof Runner.Ended.Failed<Opened> failed) {
-            asRead = new byte[0];
-            String why = failed.why().getMessage();
-            show(shown.bad(
-                    source,
-                    List.of(),
-                    Optional.of(why == null ? failed.why().getClass().getSimpleName() : why)));
         }
     }
 
-    /** The part selected before a reload, by name; else the first crystal, which is what a person asks about. */
-    private Optional<Integer> keptSelection(Source source, Cavity cavity) {
-        Design design = cavity.laid().design();
-        Optional<Integer> kept = shown.source().equals(Optional.of(source))
-                ? selectedPart().map(Part::name).flatMap(design::indexOf)
-                : Optional.empty();
-        return kept.or(() -> first(design, Kind.CRYSTAL));
+    private void refuse(Source source, List<twofold.file.Located> wrong, Optional<String> why, Set<Fingerprint> bytes) {
+        refused = Optional.of(new Refused(source, wrong, why));
+        refusedBytes = bytes;
     }
 
-    private static Optional<Integer> first(Design design, Kind kind) {
+    /** Takes over what the document's own file holds. */
+    private void again(Document mine, Opened opened) {
+        Cavity cavity = opened.cavity().orElseThrow();
+        Design read = cavity.laid().design();
+        become(mine, Edit.of("reload " + mine.source().name(), now -> Outcome.of(read)), cavity);
+        mine.saved(mine.source(), read, opened.print());
+        refused = Optional.empty();
+        trouble = Optional.empty();
+    }
+
+    /**
+     * Begins a new document, which is in no file yet.
+     *
+     * @return the design on the table, or its problems: then nothing changes
+     */
+    public Outcome<Laid> create(Design design) {
+        Outcome<Laid> laid = Layout.of(design);
+        if (laid.value().isPresent()) {
+            newest++;
+            isChangedOnDisk = false;
+            begin(
+                    Source.UNTITLED,
+                    History.ofUnsaved(design),
+                    Cavity.solve(laid.value().get()));
+        } else {
+            obstacles = laid.problems();
+        }
+        settle();
+        return laid;
+    }
+
+    private void begin(Source source, History history, Cavity cavity) {
+        document = Optional.of(new Document(++documents, source, history, cavity));
+        preview = Optional.empty();
+        selection = first(cavity.laid().design(), Kind.CRYSTAL);
+        pointed = Optional.empty();
+        obstacles = List.of();
+        refused = Optional.empty();
+        trouble = Optional.empty();
+    }
+
+    /** The first crystal is what a person asks about. */
+    private static Selection first(Design design, Kind kind) {
         for (int i = 0; i < design.parts().size(); i++) {
             if (design.parts().get(i).kind() == kind) {
-                return Optional.of(i);
+                return Selection.of(i);
             }
         }
-        return Optional.empty();
+        return Selection.NONE;
     }
 
-    /** The selected part. */
-    public Optional<Part> selectedPart() {
-        return shown.selected()
-                .flatMap(i -> shown.cavity().map(c -> c.laid().design().parts().get(i)));
-    }
-
-    /** Reads the file again. */
+    /** Reads again what was last asked for. */
     public void reload() {
-        shown.source().ifPresent(s -> s.file().ifPresentOrElse(this::open, () -> openSample(s.name())));
+        shown.attended()
+                .ifPresent(s -> s.file().ifPresentOrElse(this::open, () -> {
+                    if (!s.equals(Source.UNTITLED)) {
+                        openSample(s.name());
+                    }
+                }));
     }
 
-    /** Compares the file on disk with what was read; a change is shown, not acted on. */
+    /** Compares the file on disk with what was read or saved; a change is shown, not acted on. */
     public void look() {
-        Optional<Path> file = shown.source().flatMap(Source::file);
+        Optional<Path> file = shown.attended().flatMap(Source::file);
         if (file.isEmpty()) {
             return;
         }
         int mine = newest;
-        byte[] known = asRead;
+        Optional<Document> whose = document;
+        Set<Fingerprint> known = known();
         runner.run(
                 () -> Files.isReadable(file.get())
-                        && !Arrays.equals(known, SafeFile.read(file.get(), DesignReader.MOST_BYTES)),
+                        && !known.contains(Fingerprint.of(SafeFile.read(file.get(), DesignReader.MOST_BYTES + 1))),
                 ended -> {
-                    if (mine == newest && ended instanceof Runner.Ended.Done<Boolean> done) {
-                        show(shown.changedOnDisk(done.value()));
+                    boolean isCurrent = mine == newest && whose.equals(document) && known.equals(known());
+                    if (isCurrent && ended instanceof Runner.Ended.Done<Boolean> done) {
+                        isChangedOnDisk = done.value();
+                        show();
                     }
                 });
     }
 
-    /** Selects a part, or none. */
+    private Set<Fingerprint> known() {
+        return refused.isPresent()
+                ? refusedBytes
+                : document.map(Document::known).orElse(Set.of());
+    }
+
+    /** Takes away what was said of a refused file, a refused edit and of saving. */
+    public void dismiss() {
+        refused = Optional.empty();
+        refusedBytes = Set.of();
+        obstacles = List.of();
+        trouble = Optional.empty();
+        show();
+    }
+
+    // Editing
+
+    /** What an edit would lead to, without making it. */
+    public Outcome<Laid> would(Edit edit) {
+        return document.map(d -> edit.on(d.cavity().laid()))
+                .orElseGet(() ->
+                        Outcome.failed(List.of(new Problem(Subject.DOCUMENT, "nothing is open", "an open design"))));
+    }
+
+    /**
+     * Makes an edit, after a preview that is shown was made one.
+     *
+     * @return what it led to, or why it was refused: then nothing changes
+     */
+    public Outcome<Laid> edit(Edit edit) {
+        commit();
+        Outcome<Laid> outcome = would(edit);
+        obstacles = outcome.problems();
+        outcome.value().ifPresent(laid -> become(document.orElseThrow(), edit, Cavity.solve(laid)));
+        settle();
+        return outcome;
+    }
+
+    /** The document becomes what an edit made of it, and the selection follows. */
+    private void become(Document mine, Edit edit, Cavity next) {
+        Design before = design().orElseThrow();
+        preview = Optional.empty();
+        mine.become(edit, next);
+        selection = selection.after(before, mine.design());
+    }
+
+    /**
+     * Shows what an edit would lead to, as during a drag: always of the design as it is without previews, each in place of
+     * the one before, in no history until {@link #commit}. Where it is refused, what was shown stays.
+     */
+    public Outcome<Laid> preview(Edit edit) {
+        Outcome<Laid> outcome = would(edit);
+        obstacles = outcome.problems();
+        outcome.value().ifPresent(laid -> {
+            Design before = design().orElseThrow();
+            Optional<Selection> home = preview.isPresent() ? preview.get().home() : Optional.of(selection);
+            preview = Optional.of(new Preview(edit, Cavity.solve(laid), home));
+            selection = selection.after(before, laid.design());
+        });
+        settle();
+        return outcome;
+    }
+
+    /** Makes what the preview shows one step of the history; does nothing without a preview. */
+    public void commit() {
+        preview.ifPresent(p -> {
+            become(document.orElseThrow(), p.edit(), p.cavity());
+            obstacles = List.of();
+            settle();
+        });
+    }
+
+    /** Returns from a preview to the design as it is. */
+    public void abandon() {
+        preview.ifPresent(p -> {
+            Design before = p.cavity().laid().design();
+            preview = Optional.empty();
+            selection = p.home().orElseGet(() -> selection.after(before, design().orElseThrow()));
+            obstacles = List.of();
+            settle();
+        });
+    }
+
+    /** Takes the last step back; where a preview is shown, that alone. */
+    public void undo() {
+        if (preview.isPresent()) {
+            abandon();
+        } else {
+            move(Document::undo);
+        }
+    }
+
+    /** Does the step again that was undone last; nothing where a preview is shown. */
+    public void redo() {
+        if (preview.isEmpty()) {
+            move(Document::redo);
+        }
+    }
+
+    /** One step in a document's history. */
+    private interface Move {
+        boolean of(Document document);
+    }
+
+    private void move(Move by) {
+        document.ifPresent(d -> {
+            Design before = d.design();
+            if (by.of(d)) {
+                selection = selection.after(before, d.design());
+                obstacles = List.of();
+                settle();
+            }
+        });
+    }
+
+    /** Has judged what is still open, and shows the state. */
+    private void settle() {
+        cavity().filter(Shown::isPending).ifPresent(judge::ask);
+        show();
+    }
+
+    private void judged(Cavity asked, Runner.Ended<Cavity> ended) {
+        if (ended instanceof Runner.Ended.Failed<Cavity> failed) {
+            throw new IllegalStateException("requirements over a lever cannot be judged", failed.why());
+        } else if (ended instanceof Runner.Ended.Done<Cavity> done) {
+            Cavity cavity = done.value();
+            preview = preview.map(p -> p.cavity().equals(asked) ? new Preview(p.edit(), cavity, p.home()) : p);
+            document.ifPresent(d -> d.judged(asked, cavity));
+            show();
+        }
+    }
+
+    // Saving
+
+    /**
+     * Saves the design, a preview made a step first, in its file, if no other program changed that.
+     *
+     * @param then told how it ended, after the listener
+     */
+    public void save(Consumer<Saving> then) {
+        saveOwn(true, then);
+    }
+
+    /** Saves the design in its file, whatever that holds. */
+    public void saveOver(Consumer<Saving> then) {
+        saveOwn(false, then);
+    }
+
+    private void saveOwn(boolean isStrict, Consumer<Saving> then) {
+        Optional<Path> file = document.map(Document::source).flatMap(Source::file);
+        if (file.isPresent()) {
+            save(file.get(), isStrict, then);
+        } else {
+            then.accept(Saving.NEEDS_NAME);
+        }
+    }
+
+    /** Saves the design in a file, whatever that holds, which is the document's from then on. */
+    public void saveAs(Path file, Consumer<Saving> then) {
+        save(file, false, then);
+    }
+
+    private void save(Path file, boolean isStrict, Consumer<Saving> then) {
+        commit();
+        Document mine = document.orElseThrow(() -> new IllegalStateException("nothing is open"));
+        mine.history().breakRun();
+        saver.save(mine, file, () -> isStrict ? Optional.of(mine.known()) : Optional.empty(), end -> {
+            if (document.equals(Optional.of(mine))) {
+                if (end.saving() == Saving.DONE) {
+                    isChangedOnDisk = false;
+                    refused = refused.filter(r -> !r.source().equals(mine.source()));
+                } else if (end.saving() == Saving.CHANGED_ON_DISK) {
+                    isChangedOnDisk = true;
+                }
+                trouble = end.why()
+                        .map(why -> Source.of(file).name() + " could not be saved: " + why
+                                + ". The design is still open here, unsaved.");
+                show();
+            }
+            then.accept(end.saving());
+        });
+    }
+
+    // Selecting and pointing
+
+    /** The part that leads the selection. */
+    public Optional<Part> selectedPart() {
+        return shown.selected().flatMap(i -> design().map(d -> d.parts().get(i)));
+    }
+
+    /** Selects a part alone, or none. */
     public void select(Optional<Integer> part) {
-        show(shown.select(part.filter(i -> i >= 0 && i < parts())));
+        selecting(now -> part.filter(this::isPart).map(Selection::of).orElse(Selection.NONE));
+    }
+
+    /** Selects the parts with some names, the last of them as the lead. */
+    public void select(List<String> names) {
+        selecting(now -> Selection.of(names.stream()
+                .flatMap(n -> design().flatMap(d -> d.indexOf(n)).stream())
+                .toList()));
+    }
+
+    /** Selects a part beside the others, or no longer. */
+    public void toggle(int part) {
+        selecting(now -> isPart(part) ? now.toggled(part) : now);
+    }
+
+    /** Selects everything from the lead to a part. */
+    public void selectTo(int part) {
+        selecting(now -> isPart(part) ? now.upTo(part) : now);
+    }
+
+    /** Selects every part. */
+    public void selectAll() {
+        selecting(now -> now.everything(parts()));
     }
 
     /** Selects the part a number of steps along the beam, round the ends. */
     public void step(int by) {
         if (parts() > 0) {
-            int from = shown.selected().orElse(by > 0 ? -1 : 0);
+            int from = selection.lead().orElse(by > 0 ? -1 : 0);
             select(Optional.of(Math.floorMod(from + by, parts())));
         }
     }
 
+    private void selecting(UnaryOperator<Selection> change) {
+        Selection next = change.apply(selection);
+        if (!next.equals(selection)) {
+            selection = next;
+            document.ifPresent(d -> d.history().breakRun());
+            preview = preview.map(p -> new Preview(p.edit(), p.cavity(), Optional.empty()));
+            show();
+        }
+    }
+
+    private boolean isPart(int index) {
+        return index >= 0 && index < parts();
+    }
+
     private int parts() {
-        return shown.cavity().map(c -> c.laid().design().parts().size()).orElse(0);
+        return design().map(d -> d.parts().size()).orElse(0);
     }
 
     /** Points at the beam, or no longer. */
     public void point(Optional<Double> at) {
-        show(shown.point(at));
+        pointed = at;
+        show();
     }
 }

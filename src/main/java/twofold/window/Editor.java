@@ -58,7 +58,8 @@ public final class Editor extends BorderPane {
     private final SplitPane whole;
     private Consumer<String> titles = t -> {};
     private Consumer<Path> opened = p -> {};
-    private Optional<Source> source = Optional.empty();
+    private Optional<Source> attended = Optional.empty();
+    private int document;
     private Theme theme = Theme.LIGHT;
 
     /** Makes the editor with nothing open. */
@@ -231,8 +232,8 @@ public final class Editor extends BorderPane {
     }
 
     private void show(Shown shown) {
-        boolean isOther = !shown.source().equals(source);
-        source = shown.source();
+        boolean isOther = shown.document() != document;
+        document = shown.document();
         bench.show(shown, isOther);
         beam.show(shown, isOther);
         closeUp.show(shown);
@@ -247,8 +248,9 @@ public final class Editor extends BorderPane {
         notice.show(shown);
         said.setText(StatusWords.said(shown));
         facts.setText(StatusWords.facts(shown));
-        if (isOther) {
-            shown.source().flatMap(Source::file).ifPresent(opened);
+        if (!shown.attended().equals(attended)) {
+            attended = shown.attended();
+            attended.flatMap(Source::file).ifPresent(opened);
         }
         titles.accept(StatusWords.title(shown));
     }

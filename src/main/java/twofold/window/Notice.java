@@ -25,6 +25,7 @@ final class Notice extends HBox {
     void show(Shown shown) {
         setVisible(shown.isChangedOnDisk());
         setManaged(shown.isChangedOnDisk());
-        words.setText(shown.source().map(Source::name).orElse("The file") + " was changed on disk by another program.");
+        words.setText(
+                shown.attended().map(Source::name).orElse("The file") + " was changed on disk by another program.");
     }
 }

@@ -15,18 +15,26 @@ final class StatusWords {
     private StatusWords() {}
 
     static String title(Shown shown) {
-        return shown.source().map(Source::name).map(n -> n + " – " + PROGRAM).orElse(PROGRAM);
+        return shown.source()
+                .or(shown::attended)
+                .map(Source::name)
+                .map(n -> (shown.isUnsaved() ? "• " : "") + n + " – " + PROGRAM)
+                .orElse(PROGRAM);
     }
 
     static String said(Shown shown) {
         if (shown.failure().isPresent()) {
-            return "The file cannot be read: " + shown.failure().get();
+            return name(shown) + " cannot be read: " + shown.failure().get();
         }
         if (!shown.problems().isEmpty()) {
             int count = shown.problems().size();
-            return count == 1 ? "The file has a problem." : "The file has " + count + " problems.";
+            return name(shown) + (count == 1 ? " has a problem." : " has " + count + " problems.");
         }
         return shown.cavity().map(c -> said(c) + met(c)).orElse("Nothing is open.");
+    }
+
+    private static String name(Shown shown) {
+        return shown.attended().map(Source::name).orElse("The file");
     }
 
     /** " 3 of 5 requirements are not met.", or nothing where nothing is asked. */

@@ -4,15 +4,13 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayDeque;
 import java.util.ArrayList;
-import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
-import java.util.concurrent.Callable;
-import java.util.function.Consumer;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import twofold.design.Design;
+import twofold.design.Field;
 import twofold.design.Part;
 
 class SessionTest {
@@ -24,16 +22,6 @@ class SessionTest {
 
     private final List<Shown> heard = new ArrayList<>();
     private final Session session = new Session(Runner.onTheSpot(), heard::add);
-
-    /** Holds work back until the test lets it run. */
-    private static final class Later implements Runner {
-        private final Deque<Runnable> waiting = new ArrayDeque<>();
-
-        @Override
-        public <T> void run(Callable<T> work, Consumer<Ended<T>> then) {
-            waiting.add(() -> then.accept(Runner.attempt(work)));
-        }
-    }
 
     private Path copy() throws Exception {
         return Files.copy(SAMPLE, folder.resolve("mine.json"));
@@ -107,9 +95,8 @@ class SessionTest {
         slow.open(SAMPLE);
         slow.open(other);
         // The older answer comes last.
-        Runnable first = later.waiting.remove();
-        later.waiting.remove().run();
-        first.run();
+        later.runLast();
+        later.runOne();
         assertThat(slow.shown().source().map(Source::name)).contains("other.json");
     }
 
@@ -153,5 +140,69 @@ class SessionTest {
                         });
             }
         }
+    }
+
+    @Test
+    void aBadFileLeavesTheEditedDesignAndItsHistoryAlone() throws Exception {
+        Path file = copy();
+        session.open(file);
+        session.edit(Edits.set("Fold 1", Field.ROC, 0.102));
+        Shown edited = session.shown();
+        Path bad = Files.writeString(folder.resolve("bad.json"), "{");
+        session.open(bad);
+        assertThat(session.shown().refused().map(Refused::source)).contains(Source.of(bad));
+        assertThat(session.shown().problems()).isNotEmpty();
+        assertThat(session.shown().source()).contains(Source.of(file));
+        assertThat(session.shown().isStale())
+                .as("the pictures show what is edited")
+                .isFalse();
+        session.dismiss();
+        assertThat(session.shown()).isEqualTo(edited);
+        session.open(folder.resolve("none.json"));
+        assertThat(session.shown().failure()).contains("there is no such file");
+        session.undo();
+        assertThat(session.shown().isUnsaved()).isFalse();
+        // Mended, it is opened by a reload.
+        Files.copy(SAMPLE, folder.resolve("none.json"));
+        session.look();
+        assertThat(session.shown().isChangedOnDisk()).isTrue();
+        session.reload();
+        assertThat(session.shown().source()).contains(Source.of(folder.resolve("none.json")));
+        assertThat(session.shown().refused()).isEmpty();
+    }
+
+    @Test
+    void aReloadIsAStepSoThatUnsavedWorkCanBeTakenBack() throws Exception {
+        Path file = copy();
+        session.open(file);
+        int document = session.shown().document();
+        session.edit(Edits.set("Fold 1", Field.ROC, 0.102));
+        Design mine = session.shown().cavity().orElseThrow().laid().design();
+        session.reload();
+        assertThat(session.shown().isUnsaved()).isFalse();
+        assertThat(session.shown().undo()).contains("reload mine.json");
+        assertThat(session.shown().document()).isEqualTo(document);
+        session.undo();
+        assertThat(session.shown().cavity().orElseThrow().laid().design()).isEqualTo(mine);
+        assertThat(session.shown().isUnsaved()).isTrue();
+        session.undo();
+        assertThat(session.shown().isUnsaved()).isFalse();
+    }
+
+    @Test
+    void whatWasEditedWhileAFileWasReadIsNotLost() throws Exception {
+        Later later = new Later();
+        Session slow = new Session(later, heard::add);
+        slow.open(SAMPLE);
+        later.runAll();
+        Path other = Files.copy(Path.of("samples/x-fold.json"), folder.resolve("other.json"));
+        slow.open(other);
+        slow.edit(Edits.set("Fold 1", Field.ROC, 0.102));
+        later.runAll();
+        assertThat(slow.shown().source()).contains(Source.of(SAMPLE));
+        assertThat(slow.shown().failure()).hasValueSatisfying(w -> assertThat(w).contains("edited meanwhile"));
+        slow.open(other);
+        later.runAll();
+        assertThat(slow.shown().source()).contains(Source.of(other));
     }
 }

@@ -38,8 +38,10 @@ public final class ProblemsPane extends VBox {
         if (!isBad) {
             return;
         }
-        String name = shown.source().map(s -> s.name()).orElse("The file");
-        String beside = shown.cavity().isPresent() ? " The pictures show the last good design." : "";
+        String name = shown.attended().map(s -> s.name()).orElse("The file");
+        String beside = shown.isStale()
+                ? " The pictures show the last good design."
+                : shown.source().map(s -> " " + s.name() + " stays open.").orElse("");
         List<String> lines = shown.failure()
                 .map(List::of)
                 .orElseGet(

@@ -19,7 +19,6 @@ import twofold.picture.GPair;
 import twofold.picture.Painter;
 import twofold.picture.ZoneStripDrawing;
 import twofold.session.Shown;
-import twofold.session.Source;
 import twofold.window.DrawingPane;
 
 /**
@@ -35,7 +34,7 @@ public final class ZonesPane extends DrawingPane {
     private final Tooltip words = new Tooltip();
     private final List<GPair> tangential = new ArrayList<>();
     private final List<GPair> sagittal = new ArrayList<>();
-    private Optional<Source> source = Optional.empty();
+    private int document;
     private @Nullable Cavity cavity;
     private @Nullable ZoneStripDrawing strip;
 
@@ -49,8 +48,8 @@ public final class ZonesPane extends DrawingPane {
 
     /** Shows a moment of the session. */
     public void show(Shown shown) {
-        if (!shown.source().equals(source)) {
-            source = shown.source();
+        if (shown.document() != document) {
+            document = shown.document();
             tangential.clear();
             sagittal.clear();
         }
