@@ -75,7 +75,7 @@ class ArchitectureTest {
                 .whereLayer("layout")
                 .mayOnlyBeAccessedByLayers("cavity", "edit", "study", "file", "picture", "session", "command", "window")
                 .whereLayer("material")
-                .mayOnlyBeAccessedByLayers("layout")
+                .mayOnlyBeAccessedByLayers("layout", "edit", "window")
                 .whereLayer("design")
                 .mayNotAccessAnyLayer()
                 .whereLayer("optics")

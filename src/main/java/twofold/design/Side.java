@@ -39,6 +39,16 @@ public enum Side {
         return sign;
     }
 
+    /** The other side of the same tilt. */
+    public Side opposite() {
+        return switch (this) {
+            case LEFT -> RIGHT;
+            case RIGHT -> LEFT;
+            case UP -> DOWN;
+            case DOWN -> UP;
+        };
+    }
+
     /** The side that is taken when none is given. */
     public static Side usual(TiltPlane tilt) {
         return tilt == TiltPlane.TANGENTIAL ? LEFT : UP;

@@ -26,7 +26,6 @@ public record Edit(String name, boolean joins, Function<Laid, Outcome<Design>> c
 
     /** The changed design on the table, or all problems that stand in the way. */
     public Outcome<Laid> on(Laid now) {
-        Outcome<Design> changed = change.apply(now);
-        return changed.value().map(Layout::of).orElseGet(() -> Outcome.failed(changed.problems()));
+        return change.apply(now).then(Layout::of);
     }
 }

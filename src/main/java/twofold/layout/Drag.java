@@ -85,7 +85,7 @@ public final class Drag {
             String name = laid.design().mirrors().get(mirror).name();
             return new Move.Refused(
                     name + " cannot be moved (" + follow.words() + "): in the way stands the hold of "
-                            + Refusal.held(pins.get(0)),
+                            + pins.get(0).words(),
                     pins,
                     java.util.OptionalDouble.empty());
         }

@@ -2,6 +2,7 @@ package twofold.layout;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
 
 /** What else moves when one mirror is moved to a point. */
 public enum Follow {
@@ -35,6 +36,13 @@ public enum Follow {
         return partners
                 ? List.of(MIRRORED_PARTNER, ARM_FOLLOWS, ARM_SWINGS, OTHERS_STAY)
                 : List.of(ARM_FOLLOWS, ARM_SWINGS, OTHERS_STAY);
+    }
+
+    /** The number of a mirror's partner, the mirror itself where it stands on the axis; empty in a plan without symmetry. */
+    public static OptionalInt partner(Laid laid, int mirror) {
+        return Partner.of(Plan.of(laid), mirror).stream()
+                .mapToInt(Partner::mirror)
+                .findFirst();
     }
 
     /**

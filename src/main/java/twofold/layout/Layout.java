@@ -7,15 +7,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import twofold.design.Along;
-import twofold.design.Aperture;
-import twofold.design.Crystal;
 import twofold.design.Design;
 import twofold.design.Field;
-import twofold.design.Lens;
-import twofold.design.Matrix;
 import twofold.design.Mirror;
-import twofold.design.Part;
-import twofold.design.Plate;
 import twofold.design.Point;
 import twofold.design.Problem;
 import twofold.design.Shape;
@@ -269,18 +263,9 @@ public final class Layout {
     private List<Standing> fit(List<Standing> loose, double path, int from, int to) {
         List<Standing> placed = new ArrayList<>();
         for (Standing s : loose) {
-            Along along = along(design.parts().get(s.part()));
+            Along along = Room.along(design.parts().get(s.part()));
             double middle = along.inMiddle() ? path / 2 : along.path();
-            placed.add(new Standing(
-                    s.part(),
-                    middle,
-                    s.length(),
-                    s.index(),
-                    s.incidence(),
-                    s.turn(),
-                    s.shift(),
-                    s.lift(),
-                    s.advance()));
+            placed.add(s.at(middle));
         }
         boolean fits = true;
         for (int i = 0; i < placed.size(); i++) {
@@ -300,7 +285,7 @@ public final class Layout {
     }
 
     private void misfit(Standing s, double low, double high, double path, String before, int to) {
-        boolean middle = along(design.parts().get(s.part())).inMiddle();
+        boolean middle = Room.along(design.parts().get(s.part())).inMiddle();
         String reach = s.length() > 0
                 ? ": it reaches from " + millimetres(s.start()) + " to " + millimetres(s.end()) + " mm"
                 : "";
@@ -342,39 +327,5 @@ public final class Layout {
         }
         bends.add(new Leg.Bend(path, b));
         return bends;
-    }
-
-    private static Along along(Part part) {
-        return part.match(new Part.Cases<Along>() {
-            @Override
-            public Along mirror(Mirror mirror) {
-                throw new IllegalArgumentException("a mirror stands on no leg");
-            }
-
-            @Override
-            public Along lens(Lens lens) {
-                return lens.along();
-            }
-
-            @Override
-            public Along plate(Plate plate) {
-                return plate.slab().along();
-            }
-
-            @Override
-            public Along crystal(Crystal crystal) {
-                return crystal.slab().along();
-            }
-
-            @Override
-            public Along aperture(Aperture aperture) {
-                return aperture.along();
-            }
-
-            @Override
-            public Along matrix(Matrix matrix) {
-                return matrix.along();
-            }
-        });
     }
 }

@@ -2,6 +2,7 @@ package twofold.layout;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 import twofold.design.Problem;
 
 /**
@@ -22,8 +23,18 @@ public record Outcome<T>(Optional<T> value, List<Problem> problems) {
         return new Outcome<>(Optional.of(value), List.of());
     }
 
+    /** One problem without a value. */
+    public static <T> Outcome<T> failed(Problem problem) {
+        return failed(List.of(problem));
+    }
+
     /** Problems without a value. */
     public static <T> Outcome<T> failed(List<Problem> problems) {
         return new Outcome<>(Optional.empty(), problems);
+    }
+
+    /** What follows from the value, or the problems that there are already. */
+    public <R> Outcome<R> then(Function<T, Outcome<R>> next) {
+        return value.map(next).orElseGet(() -> failed(problems));
     }
 }

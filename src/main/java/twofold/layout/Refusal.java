@@ -22,7 +22,7 @@ final class Refusal {
         String why = inTheWay.isEmpty()
                 ? ""
                 : ": in the way " + (inTheWay.size() == 1 ? "stands the hold of " : "stand the holds of ")
-                        + inTheWay.stream().map(h -> held(h)).collect(Collectors.joining(", "));
+                        + inTheWay.stream().map(Hold::words).collect(Collectors.joining(", "));
         String closest =
                 nearest.isPresent() ? "; the closest is " + shown(knobs.get(0).target(), nearest.getAsDouble()) : "";
         String triangle = design.shape() == Shape.RING && design.mirrors().size() == 3
@@ -50,19 +50,5 @@ final class Refusal {
         double rounded = Math.rint(unit.fromSi(si) * 1e6) / 1e6;
         String number = String.format(Locale.ROOT, "%.6f", rounded).replaceAll("\\.?0+$", "");
         return number + (unit == Unit.DEG ? "°" : " mm");
-    }
-
-    /** What a hold holds, in words. */
-    static String held(Hold hold) {
-        if (hold instanceof Hold.Leg h) {
-            return "the leg " + h.leg();
-        } else if (hold instanceof Hold.Incidence h) {
-            return "the incidence at " + h.mirror();
-        } else if (hold instanceof Hold.Position h) {
-            return "the place of " + h.mirror();
-        } else if (hold instanceof Hold.Direction h) {
-            return "the direction of " + h.leg();
-        }
-        return "the round trip";
     }
 }

@@ -32,4 +32,9 @@ public record Standing(
     public double end() {
         return middle + length / 2;
     }
+
+    /** The same elsewhere on its leg. */
+    Standing at(double place) {
+        return new Standing(part, place, length, index, incidence, turn, shift, lift, advance);
+    }
 }
