@@ -2,7 +2,7 @@ package twofold.layout;
 
 import java.util.List;
 import twofold.design.Point;
-import twofold.design.Side;
+import twofold.design.Turn;
 
 /**
  * The beam from one mirror to the next.
@@ -52,11 +52,11 @@ public record Leg(
      * @param distance from the point, m
      * @param side the point's, looking along the beam
      */
-    public record Foot(double path, double distance, Side side) {}
+    public record Foot(double path, double distance, Turn side) {}
 
     /** The place of the axis nearest to a point of the table. */
     public Foot nearest(Point to) {
-        Foot nearest = new Foot(0, Double.POSITIVE_INFINITY, Side.LEFT);
+        Foot nearest = new Foot(0, Double.POSITIVE_INFINITY, Turn.LEFT);
         for (int i = 1; i < bends.size(); i++) {
             Bend a = bends.get(i - 1);
             Bend b = bends.get(i);
@@ -71,7 +71,7 @@ public record Leg(
                 nearest = new Foot(
                         a.path() + share * (b.path() - a.path()),
                         distance,
-                        alongX * offY - alongY * offX >= 0 ? Side.LEFT : Side.RIGHT);
+                        alongX * offY - alongY * offX >= 0 ? Turn.LEFT : Turn.RIGHT);
             }
         }
         return nearest;

@@ -290,6 +290,11 @@ public final class Session {
                         Outcome.failed(List.of(new Problem(Subject.DOCUMENT, "nothing is open", "an open design"))));
     }
 
+    /** The design on the table as it is without a preview. */
+    public Optional<Laid> laid() {
+        return document.map(d -> d.cavity().laid());
+    }
+
     /**
      * Makes an edit, after a preview that is shown was made one.
      *

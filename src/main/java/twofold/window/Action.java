@@ -47,7 +47,8 @@ record Action(
         return keys.isEmpty() ? Optional.empty() : Optional.of(KeyCombination.valueOf(keys));
     }
 
-    private void perform(Consumer<String> say) {
+    /** Does it, or says why not. */
+    void perform(Consumer<String> say) {
         Optional<String> why = whyNot.get();
         if (why.isPresent()) {
             say.accept(text.get() + ": " + why.get());

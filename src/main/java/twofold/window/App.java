@@ -31,7 +31,7 @@ final class App {
         Recall recall = new Recall(Settings.usualFile(System.getenv(), System.getProperty("user.home")));
         Background background = new Background();
         Editor editor = new Editor(background);
-        show(stage, editor, recall);
+        show(stage, editor, recall, new Dialogs(stage));
         stage.showingProperty().addListener((o, was, is) -> background.close());
         if (arguments.isEmpty()) {
             editor.session().openSample(FIRST_SAMPLE);
@@ -42,10 +42,16 @@ final class App {
     }
 
     /** Puts an editor into a window as it was last left. */
-    static void show(Stage stage, Editor editor, Recall recall) {
+    static void show(Stage stage, Editor editor, Recall recall, Asks asks) {
         Settings settings = recall.settings();
         editor.setTheme(settings.isDark() ? Theme.DARK : Theme.LIGHT);
-        Bars bars = new Bars(editor, recall);
+        Documents documents = new Documents(editor.session(), asks);
+        Bars bars = new Bars(editor, recall, documents);
+        editor.onDropped(documents::open);
+        stage.setOnCloseRequest(e -> {
+            e.consume();
+            documents.leave(stage::hide);
+        });
         editor.setBars(bars.menus(), bars.toolbar());
         editor.onTitle(stage::setTitle);
         editor.onOpened(file -> recall.change(s -> s.opened(file)));
@@ -54,6 +60,7 @@ final class App {
                 editor,
                 Math.min(settings.width(), screen.getWidth()),
                 Math.min(settings.height(), screen.getHeight())));
+        bars.addKeys(stage.getScene());
         stage.setMinWidth(Math.min(LEAST_WIDTH, screen.getWidth()));
         stage.setMinHeight(Math.min(LEAST_HEIGHT, screen.getHeight()));
         stage.setMaximized(settings.isMaximised());

@@ -1,12 +1,11 @@
 package twofold.window;
 
-import java.io.File;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
-import javafx.scene.control.Button;
+import javafx.scene.Scene;
 import javafx.scene.control.Menu;
 import javafx.scene.control.MenuBar;
 import javafx.scene.control.MenuButton;
@@ -14,13 +13,9 @@ import javafx.scene.control.MenuItem;
 import javafx.scene.control.RadioMenuItem;
 import javafx.scene.control.SeparatorMenuItem;
 import javafx.scene.control.ToggleGroup;
-import javafx.scene.control.Tooltip;
-import javafx.scene.input.KeyCode;
-import javafx.scene.input.KeyCodeCombination;
-import javafx.scene.input.KeyCombination;
 import javafx.scene.layout.HBox;
-import javafx.stage.FileChooser;
 import javafx.stage.Window;
+import twofold.layout.Follow;
 import twofold.picture.Theme;
 import twofold.session.Samples;
 
@@ -30,90 +25,122 @@ final class Bars {
 
     private final Editor editor;
     private final Recall recall;
+    private final Documents documents;
+    private final EditActions edits;
+    private final Action open;
+    private final Action save;
+    private final Action turnTheme;
+    private final Action showAll;
     private final Menu recent = new Menu("Open _recent");
-    private final MenuBar menus;
-    private final HBox toolbar;
 
-    Bars(Editor editor, Recall recall) {
+    Bars(Editor editor, Recall recall, Documents documents) {
         this.editor = editor;
         this.recall = recall;
-        menus = new MenuBar(file(), view(), help());
-        menus.setId("menus");
-        menus.setAccessibleText("Menus");
-        toolbar = toolbar();
+        this.documents = documents;
+        edits = new EditActions(editor);
+        open = Action.of("open", "Open…", "Shortcut+O", "Opens a design file", () -> documents.open());
+        save = Action.of("save", "Save", "Shortcut+S", "Saves the design in its file", documents::save)
+                .unless(edits::closed);
+        turnTheme = Action.of(
+                "theme",
+                "Light or dark",
+                "Shortcut+T",
+                "Changes between the light and the dark theme",
+                this::turnTheme);
+        showAll = Action.of(
+                "show-all", "Show all", "Shortcut+0", "Shows all of the bench and of the path", editor::showAll);
+    }
+
+    /** Keys beside those that menus show. */
+    void addKeys(Scene scene) {
+        scene.getAccelerators().put(edits.redoToo(), () -> edits.redo().perform(editor::say));
     }
 
     MenuBar menus() {
+        MenuBar menus = new MenuBar(file(), edit(), place(), plan(), view(), help());
+        menus.setId("menus");
+        menus.setAccessibleText("Menus");
         return menus;
     }
 
     HBox toolbar() {
-        if (toolbar != null) {
-            return toolbar;
-        }
-        Button open = button("open", "Open…", "Opens a design file (Ctrl+O)", this::open);
-        MenuButton sample = new MenuButton("Samples");
-        sample.setId("samples");
-        sample.setAccessibleHelp("Opens a sample that the program carries");
-        for (String name : Samples.names()) {
-            sample.getItems().add(item(name, () -> editor.session().openSample(name)));
-        }
-        Button all = button("show-all", "Show all", "Shows all of the bench and of the path (Home)", editor::showAll);
-        MenuButton width = new MenuButton("Beam width");
-        width.setId("beam-width");
-        width.setAccessibleHelp("How many times wider than true the beam is drawn on the bench");
+        MenuButton sample = menu("samples", "Samples", "Opens a sample that the program carries");
+        sample.getItems().setAll(samples());
+        MenuButton place = menu("place", "Place", "Hangs a new part at the pointer, to be put on a leg");
+        place.getItems().setAll(items(edits.placing()));
+        MenuButton width =
+                menu("beam-width", "Beam width", "How many times wider than true the beam is drawn on the bench");
         width.getItems().setAll(factors());
-        Button theme = button(
-                "theme", "Light or dark", "Changes between the light and the dark theme (Ctrl+D)", this::turnTheme);
-        HBox row = new HBox(open, sample, all, width, theme);
+        HBox row = new HBox(
+                open.button("Open…", editor::say),
+                save.button("Save", editor::say),
+                edits.undo().button("Undo", editor::say),
+                edits.redo().button("Redo", editor::say),
+                place,
+                showAll.button("Show all", editor::say),
+                width,
+                sample,
+                turnTheme.button("Light or dark", editor::say));
         row.getStyleClass().add("toolbar-row");
         return row;
     }
 
-    private static Button button(String id, String text, String tip, Runnable action) {
-        Button button = new Button(text);
-        button.setId(id);
-        button.setTooltip(new Tooltip(tip));
-        button.setAccessibleHelp(tip);
-        button.setOnAction(e -> action.run());
-        return button;
+    private static MenuButton menu(String id, String text, String help) {
+        MenuButton menu = new MenuButton(text);
+        menu.setId(id);
+        menu.setAccessibleHelp(help);
+        return menu;
     }
 
-    private static MenuItem item(String text, Runnable action) {
+    private List<MenuItem> items(List<Action> actions) {
+        return actions.stream().map(a -> a.item(editor::say)).toList();
+    }
+
+    private static MenuItem plain(String text, Runnable action) {
         MenuItem item = new MenuItem(text);
         item.setMnemonicParsing(false);
         item.setOnAction(e -> action.run());
         return item;
     }
 
-    private static MenuItem item(String text, KeyCombination keys, Runnable action) {
-        MenuItem item = item(text, action);
-        item.setAccelerator(keys);
-        return item;
-    }
-
-    private static KeyCombination shortcut(KeyCode key) {
-        return new KeyCodeCombination(key, KeyCombination.SHORTCUT_DOWN);
+    private List<MenuItem> samples() {
+        return Samples.names().stream()
+                .map(name -> plain(name, () -> documents.openSample(name)))
+                .toList();
     }
 
     private Menu file() {
         Menu samples = new Menu("Open _sample");
-        for (String name : Samples.names()) {
-            samples.getItems().add(item(name, () -> editor.session().openSample(name)));
-        }
+        samples.getItems().setAll(samples());
         Menu file = new Menu("_File");
+        file.getItems().addAll(items(List.of(open)));
+        file.getItems().addAll(samples, recent);
         file.getItems()
-                .addAll(
-                        item("Open…", shortcut(KeyCode.O), this::open),
-                        samples,
-                        recent,
-                        item(
+                .addAll(items(List.of(
+                        save,
+                        Action.of(
+                                        "save-as",
+                                        "Save as…",
+                                        "Shortcut+Shift+S",
+                                        "Saves the design in another file",
+                                        documents::saveAs)
+                                .unless(edits::closed),
+                        Action.of(
+                                "reload",
                                 "Reload",
-                                new KeyCodeCombination(KeyCode.F5),
-                                () -> editor.session().reload()),
-                        new SeparatorMenuItem(),
-                        item("Quit", shortcut(KeyCode.Q), () -> window().hide()));
-        file.setOnShowing(e -> fillRecent());
+                                "F5",
+                                "Reads the file from disk again",
+                                editor.session()::reload))));
+        file.getItems().add(new SeparatorMenuItem());
+        file.getItems()
+                .addAll(items(List.of(Action.of(
+                        "quit",
+                        "Quit",
+                        "Shortcut+Q",
+                        "Closes the window",
+                        () -> documents.leave(() -> window().hide())))));
+        Action.refresh(file);
+        recent.setOnShowing(e -> fillRecent());
         fillRecent();
         return file;
     }
@@ -121,7 +148,7 @@ final class Bars {
     private void fillRecent() {
         recent.getItems().clear();
         for (String name : recall.settings().recent()) {
-            MenuItem item = item(name, () -> editor.session().open(Path.of(name)));
+            MenuItem item = plain(name, () -> documents.open(Path.of(name)));
             if (!Files.isReadable(Path.of(name))) {
                 item.setText(name + " (is no longer there)");
                 item.setDisable(true);
@@ -129,10 +156,49 @@ final class Bars {
             recent.getItems().add(item);
         }
         if (recent.getItems().isEmpty()) {
-            MenuItem none = item("No file was opened yet", () -> {});
+            MenuItem none = plain("No file was opened yet", () -> {});
             none.setDisable(true);
             recent.getItems().add(none);
         }
+    }
+
+    private Menu edit() {
+        Menu edit = new Menu("_Edit");
+        edit.getItems().addAll(items(List.of(edits.undo(), edits.redo())));
+        edit.getItems().add(new SeparatorMenuItem());
+        edit.getItems().addAll(items(edits.parts()));
+        Action.refresh(edit);
+        return edit;
+    }
+
+    private Menu place() {
+        Menu place = new Menu("_Place");
+        place.getItems().addAll(items(edits.placing()));
+        Action.refresh(place);
+        return place;
+    }
+
+    private Menu plan() {
+        Menu follows = new Menu("What _follows");
+        Menu plan = new Menu("P_lan");
+        plan.getItems().add(follows);
+        Action.refresh(plan);
+        follows.getItems().setAll(follows());
+        follows.setOnShowing(e -> follows.getItems().setAll(follows()));
+        return plan;
+    }
+
+    private List<MenuItem> follows() {
+        ToggleGroup group = new ToggleGroup();
+        List<MenuItem> items = new ArrayList<>();
+        for (Follow follow : editor.following().allowed()) {
+            RadioMenuItem item = new RadioMenuItem(follow.words());
+            item.setToggleGroup(group);
+            item.setSelected(follow == editor.following().now());
+            item.setOnAction(e -> editor.following().choose(follow));
+            items.add(item);
+        }
+        return items;
     }
 
     private Menu view() {
@@ -140,24 +206,32 @@ final class Bars {
         width.getItems().setAll(factors());
         Menu view = new Menu("_View");
         view.getItems()
-                .addAll(
-                        item("Show all", shortcut(KeyCode.DIGIT0), editor::showAll),
-                        item("Zoom in", shortcut(KeyCode.PLUS), () -> editor.zoom(true)),
-                        item("Zoom out", shortcut(KeyCode.MINUS), () -> editor.zoom(false)),
-                        width,
-                        new SeparatorMenuItem(),
-                        item("Light or dark", shortcut(KeyCode.D), this::turnTheme),
-                        new SeparatorMenuItem(),
-                        item("Next pane", new KeyCodeCombination(KeyCode.F6), () -> editor.nextPane(false)),
-                        item(
+                .addAll(items(List.of(
+                        showAll,
+                        Action.of("zoom-in", "Zoom in", "Shortcut+Plus", "Zooms the bench in", () -> editor.zoom(true)),
+                        Action.of(
+                                "zoom-out",
+                                "Zoom out",
+                                "Shortcut+Minus",
+                                "Zooms the bench out",
+                                () -> editor.zoom(false)))));
+        view.getItems().addAll(width, new SeparatorMenuItem());
+        view.getItems()
+                .addAll(items(List.of(
+                        turnTheme,
+                        Action.of("next-pane", "Next pane", "F6", "The keyboard goes on", () -> editor.nextPane(false)),
+                        Action.of(
+                                "pane-before",
                                 "Pane before",
-                                new KeyCodeCombination(KeyCode.F6, KeyCombination.SHIFT_DOWN),
+                                "Shift+F6",
+                                "The keyboard goes back",
                                 () -> editor.nextPane(true)),
-                        item(
+                        Action.of(
+                                "copy-all",
                                 "Copy figures",
-                                new KeyCodeCombination(
-                                        KeyCode.C, KeyCombination.SHORTCUT_DOWN, KeyCombination.SHIFT_DOWN),
-                                editor::copyFigures));
+                                "Shortcut+Shift+C",
+                                "Copies the figures of the selected part in full precision",
+                                editor::copyFigures))));
         return view;
     }
 
@@ -167,7 +241,7 @@ final class Bars {
         auto.setToggleGroup(group);
         auto.setSelected(true);
         auto.setOnAction(e -> editor.magnify(OptionalDouble.empty()));
-        List<MenuItem> items = new java.util.ArrayList<>(List.of(auto));
+        List<MenuItem> items = new ArrayList<>(List.of(auto));
         for (int factor : FACTORS) {
             RadioMenuItem item = new RadioMenuItem(factor == 1 ? "True width" : factor + " times");
             item.setToggleGroup(group);
@@ -180,9 +254,9 @@ final class Bars {
     private Menu help() {
         Menu help = new Menu("_Help");
         help.getItems()
-                .addAll(
-                        item("Keys and mouse", new KeyCodeCombination(KeyCode.F1), () -> Words.keys(window())),
-                        item("About Twofold", () -> Words.about(window())));
+                .addAll(items(List.of(
+                        Action.of("keys", "Keys and mouse", "F1", "Lists keys and mouse", () -> Words.keys(window())),
+                        Action.of("about", "About Twofold", "", "What the program is", () -> Words.about(window())))));
         return help;
     }
 
@@ -194,26 +268,5 @@ final class Bars {
 
     private Window window() {
         return editor.getScene().getWindow();
-    }
-
-    private void open() {
-        FileChooser chooser = new FileChooser();
-        chooser.setTitle("Open a design");
-        chooser.getExtensionFilters().add(new FileChooser.ExtensionFilter("Designs", "*.json"));
-        folder().ifPresent(chooser::setInitialDirectory);
-        File file = chooser.showOpenDialog(window());
-        if (file != null) {
-            editor.session().open(file.toPath());
-        }
-    }
-
-    private Optional<File> folder() {
-        return editor.session()
-                .shown()
-                .source()
-                .flatMap(s -> s.file())
-                .map(f -> f.toAbsolutePath().getParent())
-                .filter(Files::isDirectory)
-                .map(Path::toFile);
     }
 }

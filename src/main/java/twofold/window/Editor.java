@@ -20,6 +20,7 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
+import twofold.design.Kind;
 import twofold.picture.Theme;
 import twofold.session.Runner;
 import twofold.session.Session;
@@ -39,6 +40,7 @@ import twofold.window.panel.ZonesPane;
 /** The editor's panes, wired to one session. A node: the application puts it into a window, a test into a stage. */
 public final class Editor extends BorderPane {
     private final Session session;
+    private final Following following;
     private final BenchPane bench;
     private final BeamPane beam;
     private final CloseUpPane closeUp = new CloseUpPane();
@@ -50,6 +52,7 @@ public final class Editor extends BorderPane {
     private final ZonesPane zones = new ZonesPane();
     private final RequirementsPane requirements = new RequirementsPane();
     private final Tab asked = new Tab("Requirements", requirements);
+    private final TabPane lists;
     private final Notice notice;
     private final Label said = new Label();
     private final Label facts = new Label();
@@ -58,6 +61,7 @@ public final class Editor extends BorderPane {
     private final SplitPane whole;
     private Consumer<String> titles = t -> {};
     private Consumer<Path> opened = p -> {};
+    private Consumer<Path> open;
     private Optional<Source> attended = Optional.empty();
     private int document;
     private Theme theme = Theme.LIGHT;
@@ -65,7 +69,9 @@ public final class Editor extends BorderPane {
     /** Makes the editor with nothing open. */
     public Editor(Runner runner) {
         session = new Session(runner, this::show);
-        bench = new BenchPane(session);
+        following = new Following(session);
+        bench = new BenchPane(session, following);
+        open = session::open;
         beam = new BeamPane(session);
         parts = new PartsPane(session);
         notice = new Notice(session::reload);
@@ -73,7 +79,7 @@ public final class Editor extends BorderPane {
         VBox benchAndProblems = new VBox(6, problems, bench);
         VBox.setVgrow(bench, Priority.ALWAYS);
         pictures = split(Orientation.VERTICAL, benchAndProblems, lower);
-        TabPane lists = tabs("lists", "Parts and requirements", new Tab("Parts", parts), asked);
+        lists = tabs("lists", "Parts and requirements", new Tab("Parts", parts), asked);
         TabPane looks = tabs(
                 "looks",
                 "The part, zones and astigmatism",
@@ -136,6 +142,27 @@ public final class Editor extends BorderPane {
         return session;
     }
 
+    /** What else moves when a mirror is moved. */
+    Following following() {
+        return following;
+    }
+
+    /** Says something in the status line until something else is shown. */
+    void say(String words) {
+        said.setText(words);
+    }
+
+    /** Hangs a new part at the pointer on the bench. */
+    void place(Kind kind) {
+        bench.place(kind);
+    }
+
+    /** Lets the selected part be renamed in the list. */
+    void rename() {
+        lists.getSelectionModel().select(0);
+        parts.rename();
+    }
+
     /** Puts menus and a toolbar on top. */
     void setBars(Node menus, Node toolbar) {
         setTop(new VBox(menus, toolbar, notice));
@@ -144,6 +171,11 @@ public final class Editor extends BorderPane {
     /** Is told what the window's title should be. */
     void onTitle(Consumer<String> listener) {
         titles = listener;
+    }
+
+    /** Opens a file that is dropped on the window. */
+    void onDropped(Consumer<Path> opener) {
+        open = opener;
     }
 
     /** Is told of every file that was opened, good or bad. */
@@ -268,7 +300,7 @@ public final class Editor extends BorderPane {
 
     private void dropped(DragEvent e) {
         Optional<Path> file = dragged(e.getDragboard().getFiles());
-        file.ifPresent(session::open);
+        file.ifPresent(open);
         e.setDropCompleted(file.isPresent());
         e.consume();
     }

@@ -23,6 +23,12 @@ final class StatusWords {
     }
 
     static String said(Shown shown) {
+        if (shown.trouble().isPresent()) {
+            return shown.trouble().get();
+        }
+        if (!shown.obstacles().isEmpty()) {
+            return "That cannot be done: " + shown.obstacles().get(0).message();
+        }
         if (shown.failure().isPresent()) {
             return name(shown) + " cannot be read: " + shown.failure().get();
         }

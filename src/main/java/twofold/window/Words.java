@@ -15,7 +15,7 @@ final class Words {
 
             Everywhere
               Ctrl+O: open;  F5: reload;  Ctrl+0: show all
-              Ctrl+D: light or dark;  F6: next pane;  Tab: next control
+              Ctrl+T: light or dark;  F6: next pane;  Tab: next control
               Ctrl+Shift+C: copy the figures of the selected part in full precision""";
 
     private static final String ABOUT = """

@@ -266,7 +266,7 @@ class EditorWindowTest {
     void theThemeAndTheRecentFilesAreRemembered() throws Exception {
         Path file = Files.copy(Path.of("samples", SAMPLE), folder.resolve("mine.json"));
         stage.open(file);
-        stage.press(KeyCode.CONTROL, KeyCode.D);
+        stage.press(KeyCode.CONTROL, KeyCode.T);
         assertThat(stage.editor().theme()).isEqualTo(Theme.DARK);
         stage.close();
         stage = Stagehand.open(folder.resolve("settings.json"), 1280, 800);

@@ -44,7 +44,11 @@ class JourneysWindowTest {
     @Start
     void start(Stage stage) {
         editor = new Editor(new Background());
-        App.show(stage, editor, new Recall(folder.resolve("settings-" + System.nanoTime() + ".json")));
+        App.show(
+                stage,
+                editor,
+                new Recall(folder.resolve("settings-" + System.nanoTime() + ".json")),
+                new Dialogs(stage));
         stage.setX(0);
         stage.setY(0);
         editor.session().openSample("z-fold-rod.json");
@@ -202,7 +206,7 @@ class JourneysWindowTest {
         untilOpen("z-fold-rod.json");
         robot.clickOn("#theme");
         until("it is dark", () -> editor.theme() == Theme.DARK);
-        robot.push(KeyCode.CONTROL, KeyCode.D);
+        robot.push(KeyCode.CONTROL, KeyCode.T);
         until("it is light", () -> editor.theme() == Theme.LIGHT);
     }
 

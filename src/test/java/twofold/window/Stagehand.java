@@ -36,6 +36,11 @@ final class Stagehand {
 
     /** A window of a size with nothing open, at the corner of the screen. */
     static Stagehand open(Path settings, double width, double height) throws Exception {
+        return open(settings, width, height, new Answers());
+    }
+
+    /** The same, with what a person would answer. */
+    static Stagehand open(Path settings, double width, double height, Asks asks) throws Exception {
         // TestFX must be the one that starts the toolkit: after another start its own robot gets no input.
         FxToolkit.registerPrimaryStage();
         Platform.setImplicitExit(false);
@@ -46,7 +51,7 @@ final class Stagehand {
             Editor editor = new Editor(Runner.onTheSpot());
             stage.setX(0);
             stage.setY(0);
-            App.show(stage, editor, recall);
+            App.show(stage, editor, recall, asks);
             return new Stagehand(stage, editor, new Robot());
         });
         hand.awaitKeyboard();
@@ -189,6 +194,24 @@ final class Stagehand {
     void wheel(int steps) throws Exception {
         fx(() -> {
             robot.mouseWheel(steps);
+            return true;
+        });
+        settle();
+    }
+
+    /** Presses a button of the mouse and keeps it down. */
+    void hold(MouseButton button) throws Exception {
+        fx(() -> {
+            robot.mousePress(button);
+            return true;
+        });
+        settle();
+    }
+
+    /** Lets a button of the mouse go. */
+    void release(MouseButton button) throws Exception {
+        fx(() -> {
+            robot.mouseRelease(button);
             return true;
         });
         settle();

@@ -38,11 +38,13 @@ public final class BeamPane extends ViewPane {
     /** Shows a moment of the session; another design is shown whole. */
     public void show(Shown shown, boolean isOther) {
         Cavity next = shown.cavity().orElse(null);
+        boolean isWhole =
+                drawing == null || (from == 0 && to == drawing.course().length());
         if (!Objects.equals(next, cavity)) {
             cavity = next;
             drawing = next == null ? null : new BeamDrawing(next);
         }
-        if (isOther || drawing == null || to > drawing.course().length()) {
+        if (isOther || isWhole || drawing == null || to > drawing.course().length()) {
             showAll();
         }
         selected = shown.selected().map(OptionalInt::of).orElse(OptionalInt.empty());

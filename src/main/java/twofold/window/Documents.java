@@ -1,0 +1,117 @@
+package twofold.window;
+
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Optional;
+import java.util.function.Consumer;
+import twofold.design.Design;
+import twofold.session.Saving;
+import twofold.session.Session;
+import twofold.session.Shown;
+import twofold.session.Source;
+
+/** Opening, saving and leaving documents, with the questions that have to be asked so that no work is lost. */
+final class Documents {
+    private static final String ENDING = ".json";
+
+    private final Session session;
+    private final Asks asks;
+
+    Documents(Session session, Asks asks) {
+        this.session = session;
+        this.asks = asks;
+    }
+
+    /** Does something that leaves the document, after its unsaved work was saved or given up; not, where the person stays. */
+    void leave(Runnable then) {
+        if (!session.shown().isUnsaved()) {
+            then.run();
+            return;
+        }
+        switch (asks.unsaved(name())) {
+            case SAVE -> save(done -> then.run());
+            case DISCARD -> then.run();
+            case STAY -> {}
+        }
+    }
+
+    /** Asks for a file and opens it. */
+    void open() {
+        asks.open(folder()).ifPresent(this::open);
+    }
+
+    /** Opens a file. */
+    void open(Path file) {
+        leave(() -> session.open(file));
+    }
+
+    /** Opens a sample. */
+    void openSample(String name) {
+        leave(() -> session.openSample(name));
+    }
+
+    /** Begins a new design. */
+    void create(Design design) {
+        leave(() -> session.create(design));
+    }
+
+    /** Saves in the document's file. */
+    void save() {
+        save(done -> {});
+    }
+
+    private void save(Consumer<Saving> done) {
+        session.save(end -> {
+            switch (end) {
+                case DONE -> done.accept(end);
+                case NEEDS_NAME -> saveAs(done);
+                case CHANGED_ON_DISK -> changed(done);
+                case FAILED -> {} // the session shows why
+            }
+        });
+    }
+
+    private void changed(Consumer<Saving> done) {
+        switch (asks.changed(name())) {
+            case WRITE_OVER -> session.saveOver(end -> ended(end, done));
+            case ELSEWHERE -> saveAs(done);
+            case STAY -> {}
+        }
+    }
+
+    /** Saves in another file. */
+    void saveAs() {
+        saveAs(done -> {});
+    }
+
+    private void saveAs(Consumer<Saving> done) {
+        String name = name();
+        asks.save(folder(), name.endsWith(ENDING) ? name : name + ENDING)
+                .map(Documents::ending)
+                .ifPresent(file -> session.saveAs(file, end -> ended(end, done)));
+    }
+
+    private static void ended(Saving end, Consumer<Saving> done) {
+        if (end == Saving.DONE) {
+            done.accept(end);
+        }
+    }
+
+    /** A file without an ending gets ours. */
+    private static Path ending(Path file) {
+        Path name = file.getFileName();
+        return name == null || name.toString().contains(".") ? file : file.resolveSibling(name + ENDING);
+    }
+
+    private String name() {
+        return session.shown().source().map(Source::name).orElse("The design");
+    }
+
+    private Optional<Path> folder() {
+        Shown shown = session.shown();
+        return shown.source()
+                .flatMap(Source::file)
+                .map(f -> f.toAbsolutePath().getParent())
+                .filter(Files::isDirectory);
+    }
+}

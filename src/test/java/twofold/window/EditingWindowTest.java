@@ -1,0 +1,280 @@
+package twofold.window;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Optional;
+import javafx.scene.control.Label;
+import javafx.scene.control.ListView;
+import javafx.scene.control.TextField;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.MouseButton;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Tag;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import twofold.design.Design;
+import twofold.design.Mirror;
+import twofold.design.Point;
+import twofold.file.DesignReader;
+import twofold.layout.Laid;
+import twofold.picture.BenchView;
+import twofold.session.Shown;
+import twofold.window.bench.BenchPane;
+
+/** A design changed by hand and by keyboard in a real window of the toolkit. */
+@Tag("headless-only")
+@SuppressWarnings("NullAway.Init") // set before each test
+class EditingWindowTest {
+    private static final String SAMPLE = "z-fold-rod.json";
+
+    @TempDir
+    Path folder;
+
+    private Answers answers;
+    private Stagehand stage;
+    private BenchPane bench;
+
+    @BeforeEach
+    void open() throws Exception {
+        answers = new Answers();
+        stage = Stagehand.open(folder.resolve("settings.json"), 1280, 800, answers);
+        stage.openSample(SAMPLE);
+        bench = stage.node("bench", BenchPane.class);
+    }
+
+    @AfterEach
+    void close() throws Exception {
+        stage.close();
+    }
+
+    private Shown shown() throws Exception {
+        return Stagehand.fx(() -> stage.editor().session().shown());
+    }
+
+    private Laid laid() throws Exception {
+        return shown().cavity().orElseThrow().laid();
+    }
+
+    private Design design() throws Exception {
+        return laid().design();
+    }
+
+    private Point at(String mirror) throws Exception {
+        return ((Mirror) design().parts().get(design().indexOf(mirror).orElseThrow())).at();
+    }
+
+    /** The pixel of a part's middle on the bench. */
+    private Point pixel(String part) throws Exception {
+        Laid laid = laid();
+        int index = laid.design().indexOf(part).orElseThrow();
+        Point on = laid.design().parts().get(index) instanceof Mirror m
+                ? m.at()
+                : laid.legs().stream()
+                        .flatMap(l -> l.parts().stream()
+                                .filter(s -> s.part() == index)
+                                .map(s -> l.at(s.middle())))
+                        .findFirst()
+                        .orElseThrow();
+        return pixel(on);
+    }
+
+    private Point pixel(Point on) throws Exception {
+        BenchView view = Stagehand.fx(() -> bench.view().orElseThrow());
+        return new Point(view.viewport().x(on.x()), view.viewport().y(on.y()));
+    }
+
+    private void select(String part) throws Exception {
+        int index = design().indexOf(part).orElseThrow();
+        Stagehand.fx(() -> {
+            stage.editor().session().select(Optional.of(index));
+            bench.requestFocus();
+            return true;
+        });
+        stage.settle();
+    }
+
+    @Test
+    void aMirrorIsDraggedAndItsArmFollowsInOneStep() throws Exception {
+        Point before = at("Fold 2");
+        Point end = at("Output coupler");
+        double scale = Stagehand.fx(() -> bench.view().orElseThrow()).viewport().scale();
+        Point p = pixel("Fold 2");
+        stage.drag(bench, MouseButton.PRIMARY, p.x(), p.y(), 12, -8);
+        assertThat(at("Fold 2").x() - before.x()).isCloseTo(12 / scale, within(1e-9));
+        assertThat(at("Fold 2").y() - before.y()).isCloseTo(8 / scale, within(1e-9));
+        assertThat(at("Output coupler").x() - end.x()).isCloseTo(12 / scale, within(1e-9));
+        assertThat(shown().undo()).contains("move Fold 2");
+        assertThat(shown().isUnsaved()).isTrue();
+        assertThat(stage.stage().getTitle()).startsWith("•");
+        stage.press(KeyCode.CONTROL, KeyCode.Z);
+        assertThat(at("Fold 2")).isEqualTo(before);
+        assertThat(shown().isUnsaved()).isFalse();
+        stage.press(KeyCode.CONTROL, KeyCode.Y);
+        assertThat(at("Fold 2").x() - before.x()).isCloseTo(12 / scale, within(1e-9));
+    }
+
+    @Test
+    void escapeAbandonsADrag() throws Exception {
+        Point before = at("Fold 2");
+        Point p = pixel("Fold 2");
+        stage.move(bench, p.x(), p.y());
+        stage.hold(MouseButton.PRIMARY);
+        stage.move(bench, p.x() + 30, p.y() + 30);
+        assertThat(at("Fold 2")).isNotEqualTo(before);
+        assertThat(shown().isPreview()).isTrue();
+        Label hint = Stagehand.fx(() -> (Label) bench.lookup("#hint"));
+        assertThat(hint.isVisible()).isTrue();
+        assertThat(hint.getText()).contains("Fold 2").contains("incidence");
+        stage.picture("dragging-light");
+        stage.press(KeyCode.ESCAPE);
+        assertThat(at("Fold 2")).isEqualTo(before);
+        assertThat(hint.isVisible()).isFalse();
+        stage.move(bench, p.x() + 60, p.y() + 30);
+        stage.release(MouseButton.PRIMARY);
+        assertThat(at("Fold 2")).isEqualTo(before);
+        assertThat(shown().undo()).isEmpty();
+    }
+
+    @Test
+    void tabChoosesWhatFollowsDuringADrag() throws Exception {
+        Point end = at("Output coupler");
+        Point p = pixel("Fold 2");
+        stage.move(bench, p.x(), p.y());
+        stage.hold(MouseButton.PRIMARY);
+        stage.move(bench, p.x() + 20, p.y());
+        assertThat(at("Output coupler")).isNotEqualTo(end);
+        Label hint = Stagehand.fx(() -> (Label) bench.lookup("#hint"));
+        for (int i = 0; i < 4 && !hint.getText().contains("others stay"); i++) {
+            stage.press(KeyCode.TAB);
+        }
+        assertThat(hint.getText()).contains("others stay");
+        assertThat(at("Output coupler")).isEqualTo(end);
+        stage.release(MouseButton.PRIMARY);
+        assertThat(at("Output coupler")).isEqualTo(end);
+    }
+
+    @Test
+    void aPartSlidesAlongItsLeg() throws Exception {
+        select("Rod");
+        Point p = pixel("Rod");
+        String before = design().parts().get(2).toString();
+        stage.drag(bench, MouseButton.PRIMARY, p.x(), p.y(), 10, 0);
+        assertThat(design().parts().get(2).toString()).isNotEqualTo(before);
+        assertThat(shown().undo()).contains("move Rod");
+    }
+
+    @Test
+    void arrowsNudgeAndARunIsOneStep() throws Exception {
+        select("Fold 2");
+        Point before = at("Fold 2");
+        stage.press(KeyCode.RIGHT);
+        stage.press(KeyCode.RIGHT);
+        stage.press(KeyCode.SHIFT, KeyCode.RIGHT);
+        stage.press(KeyCode.CONTROL, KeyCode.UP);
+        assertThat(at("Fold 2").x() - before.x()).isCloseTo(1.2e-3, within(1e-12));
+        assertThat(at("Fold 2").y() - before.y()).isCloseTo(1e-5, within(1e-12));
+        stage.press(KeyCode.CONTROL, KeyCode.Z);
+        assertThat(at("Fold 2")).isEqualTo(before);
+        double incidence = laid().incidence().getOrDefault(3, 0.0);
+        stage.press(KeyCode.PERIOD);
+        assertThat(Math.toDegrees(laid().incidence().getOrDefault(3, 0.0) - incidence))
+                .isCloseTo(0.1, within(1e-9));
+        stage.press(KeyCode.CONTROL, KeyCode.COMMA);
+        assertThat(Math.toDegrees(laid().incidence().getOrDefault(3, 0.0) - incidence))
+                .isCloseTo(0.09, within(1e-9));
+    }
+
+    @Test
+    void aPlateIsPlacedAtThePointer() throws Exception {
+        stage.press(KeyCode.CONTROL, KeyCode.DIGIT3);
+        assertThat(shown().isPreview()).isTrue();
+        Point a = at("End A");
+        Point b = at("Fold 1");
+        Point p = pixel(new Point((2 * a.x() + b.x()) / 3, (2 * a.y() + b.y()) / 3));
+        stage.move(bench, p.x(), p.y() + 10);
+        stage.picture("placing-light");
+        stage.click(bench, p.x(), p.y() + 10);
+        assertThat(shown().isPreview()).isFalse();
+        assertThat(design().parts().get(1).name()).isEqualTo("Plate 1");
+        assertThat(laid().legs().get(0).parts().get(0).middle()).isCloseTo(0.5 / 3, within(5e-3));
+        assertThat(shown().undo()).contains("place plate");
+        // A second click selects again and places nothing.
+        stage.click(bench, 30, bench.getHeight() - 60);
+        assertThat(design().parts()).hasSize(6);
+    }
+
+    @Test
+    void aLensIsPlacedFromTheKeyboardBehindTheSelectedPart() throws Exception {
+        select("End A");
+        stage.press(KeyCode.CONTROL, KeyCode.DIGIT2);
+        stage.press(KeyCode.ENTER);
+        assertThat(design().parts().get(1).name()).isEqualTo("Lens 1");
+        assertThat(shown().selected()).contains(1);
+        stage.press(KeyCode.CONTROL, KeyCode.DIGIT2);
+        stage.press(KeyCode.ESCAPE);
+        assertThat(design().parts()).hasSize(6);
+    }
+
+    @Test
+    void deletingUndoingAndRenamingByKeyboard() throws Exception {
+        select("Rod");
+        stage.press(KeyCode.DELETE);
+        assertThat(design().indexOf("Rod")).isEmpty();
+        stage.press(KeyCode.CONTROL, KeyCode.Z);
+        assertThat(design().indexOf("Rod")).isPresent();
+        select("Rod");
+        stage.press(KeyCode.F2);
+        TextField field =
+                Stagehand.fx(() -> (TextField) stage.editor().getScene().getFocusOwner());
+        Stagehand.fx(() -> {
+            field.setText("End A");
+            return true;
+        });
+        stage.press(KeyCode.ENTER);
+        assertThat(design().indexOf("Rod")).isPresent();
+        assertThat(stage.node("said", Label.class).getText()).contains("a second time");
+        Stagehand.fx(() -> {
+            field.setText("Ruby");
+            return true;
+        });
+        stage.press(KeyCode.ENTER);
+        assertThat(design().indexOf("Ruby")).isPresent();
+        ListView<?> list = stage.node("parts", ListView.class);
+        assertThat(list.isFocused()).isTrue();
+    }
+
+    @Test
+    void savingAsksForANameOnceAndThenSavesThere() throws Exception {
+        Path file = folder.resolve("mine.json");
+        answers.save = Optional.of(file);
+        select("Fold 2");
+        stage.press(KeyCode.RIGHT);
+        stage.press(KeyCode.CONTROL, KeyCode.S);
+        assertThat(shown().isUnsaved()).isFalse();
+        assertThat(DesignReader.read(Files.readAllBytes(file)).design()).contains(design());
+        assertThat(answers.asked).isEqualTo(1);
+        stage.press(KeyCode.RIGHT);
+        stage.press(KeyCode.CONTROL, KeyCode.S);
+        assertThat(answers.asked).isEqualTo(1);
+        assertThat(DesignReader.read(Files.readAllBytes(file)).design()).contains(design());
+    }
+
+    @Test
+    void leavingUnsavedWorkAsks() throws Exception {
+        select("Fold 2");
+        stage.press(KeyCode.RIGHT);
+        Design mine = design();
+        Path other = folder.resolve("other.json");
+        Files.copy(Path.of("samples", "bow-tie-doubler.json"), other);
+        answers.open = Optional.of(other);
+        stage.press(KeyCode.CONTROL, KeyCode.O);
+        assertThat(design()).isEqualTo(mine);
+        answers.unsaved = Asks.Unsaved.DISCARD;
+        stage.press(KeyCode.CONTROL, KeyCode.O);
+        assertThat(design()).isNotEqualTo(mine);
+    }
+}
