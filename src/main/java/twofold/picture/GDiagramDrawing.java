@@ -8,12 +8,14 @@ import twofold.optics.Plane;
  * filled for the tangential and hollow for the sagittal, and the way that it came.
  */
 public final class GDiagramDrawing {
+    private static final String TITLE = "G1 and G2";
     private static final double RIM = 8;
 
     /** Half the width of the diagram in G, at the least. */
     private static final double LEAST = 1.5;
 
-    private static final double TINT = 0.3;
+    /** Opacity of the stable regions. */
+    static final double TINT = 0.3;
 
     private final List<GPair> tangential;
     private final List<GPair> sagittal;
@@ -38,8 +40,8 @@ public final class GDiagramDrawing {
     public void draw(Painter painter, double width, double height) {
         painter.push(0, 0, width, height);
         Pane.paper(painter, width, height, points);
-        painter.text("G1 and G2", 14, 18, Type.TITLE, Ink.TEXT, Anchor.START);
         if (tangential.isEmpty() || sagittal.isEmpty()) {
+            title(painter);
             double y = 42;
             for (String line :
                     List.of("Only a standing wave has", "this diagram; a ring is", "judged by its half traces.")) {
@@ -78,7 +80,7 @@ public final class GDiagramDrawing {
         painter.pop();
         Pane.rectangle(points, left, top, side, side);
         painter.polyline(points, true, Stroke.of(Ink.RULE, 1));
-        key(painter, Math.max(left + side, width - RIM));
+        key(painter, left + side);
     }
 
     private static GPair now(List<GPair> trail) {
@@ -144,7 +146,7 @@ public final class GDiagramDrawing {
     }
 
     private void axes(Painter painter, double left, double top, double side, double reach) {
-        Ticks ticks = Ticks.within(-reach, reach, (int) Math.max(2, side / 45));
+        Ticks ticks = Ticks.along(new Scale(-reach, reach, 0, side));
         Scale x = new Scale(-reach, reach, left, left + side);
         Scale y = new Scale(-reach, reach, top + side, top);
         for (double value : ticks.values()) {
@@ -163,19 +165,16 @@ public final class GDiagramDrawing {
         painter.text("G2", left - 5, top + 9, Type.SMALL, Ink.TEXT, Anchor.END);
     }
 
-    /** "● tangential ○ sagittal", as much as there is room. */
+    private static void title(Painter painter) {
+        painter.text(TITLE, 14, 18, Type.TITLE, Ink.TEXT, Anchor.START);
+    }
+
+    /** "● tangential ○ sagittal", and the title where there is room beside: the axes say it too. */
     private void key(Painter painter, double right) {
         double x = right;
-        boolean room = right
-                > 14
-                        + Lettering.width("G1 and G2", Type.TITLE)
-                        + 10
-                        + Lettering.width("tangentialsagittal", Type.SMALL)
-                        + 50;
         for (Plane plane : new Plane[] {Plane.SAGITTAL, Plane.TANGENTIAL}) {
-            String word = room ? plane.word() : plane.word().substring(0, 3) + ".";
-            x -= Lettering.width(word, Type.SMALL);
-            painter.text(word, x, 18, Type.SMALL, Ink.TEXT, Anchor.START);
+            x -= Lettering.width(plane.word(), Type.SMALL);
+            painter.text(plane.word(), x, 18, Type.SMALL, Ink.TEXT, Anchor.START);
             x -= 9;
             boolean filled = plane == Plane.TANGENTIAL;
             Pane.circle(points, x, 14, filled ? 3.6 : 4.6);
@@ -184,6 +183,9 @@ public final class GDiagramDrawing {
             }
             painter.polyline(points, true, Stroke.of(Pane.ink(plane), 1.8));
             x -= 16;
+        }
+        if (14 + Lettering.width(TITLE, Type.TITLE) < x) {
+            title(painter);
         }
     }
 }

@@ -53,6 +53,40 @@ public enum Hatch {
         return lines;
     }
 
+    /** Which places are hatched. */
+    interface Region {
+        /** Whether a pixel is. */
+        boolean holds(double x, double y);
+    }
+
+    /** The lines inside a region within a rectangle, to a pixel, in pairs of begin and end. */
+    Points lines(double left, double top, double width, double height, Region region) {
+        Points lines = new Points();
+        double one = left + sign * top;
+        double other = left + width + sign * (top + height);
+        double third = left + sign * (top + height);
+        double fourth = left + width + sign * top;
+        double low = Math.min(Math.min(one, other), Math.min(third, fourth)) / SPACING;
+        double high = Math.max(Math.max(one, other), Math.max(third, fourth)) / SPACING;
+        for (double line = Math.ceil(low); line <= high; line++) {
+            double begin = Double.NaN;
+            for (double x = left; x <= left + width + 1; x++) {
+                double y = sign * (line * SPACING - x);
+                boolean inside = x <= left + width && y >= top && y <= top + height && region.holds(x, y);
+                if (inside && Double.isNaN(begin)) {
+                    begin = x;
+                } else if (!inside && !Double.isNaN(begin)) {
+                    if (x - 1 > begin) {
+                        add(lines, begin, line);
+                        add(lines, x - 1, line);
+                    }
+                    begin = Double.NaN;
+                }
+            }
+        }
+        return lines;
+    }
+
     private void add(Points lines, double x, double line) {
         lines.add(x, sign * (line * SPACING - x));
     }

@@ -189,6 +189,16 @@ public final class ImagePainter implements Painter {
     }
 
     @Override
+    public void image(double x, double y, double width, double height, int columns, int rows, int[] argb) {
+        BufferedImage cells = new BufferedImage(columns, rows, BufferedImage.TYPE_INT_ARGB);
+        cells.setRGB(0, 0, columns, rows, argb, 0, columns);
+        AffineTransform onto = AffineTransform.getTranslateInstance(x, y);
+        onto.scale(width / columns, height / rows);
+        g.setRenderingHint(RenderingHints.KEY_INTERPOLATION, RenderingHints.VALUE_INTERPOLATION_NEAREST_NEIGHBOR);
+        g.drawImage(cells, onto, null);
+    }
+
+    @Override
     public void push(double x, double y, double width, double height) {
         panes.push(new Pane(g.getTransform(), g.getClip()));
         g.translate(x, y);

@@ -1,6 +1,7 @@
 package twofold.picture;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import twofold.cavity.Ledger;
@@ -14,6 +15,9 @@ import twofold.layout.Laid;
  * left, with its length in words; below them the sum, the true split and what the shares leave of it.
  */
 public final class LedgerDrawing {
+    /** Opacity of a bar within its outline. */
+    static final double TINT = 0.45;
+
     private static final double RIM = 14;
     private static final double ROW = 20;
     private static final double BAR = 11;
@@ -42,20 +46,20 @@ public final class LedgerDrawing {
         return FIRST + ROW * (ledger.map(l -> l.shares().size()).orElse(0) + 3);
     }
 
-    private record Row(String name, double length, Ink ink) {}
+    private record Row(String name, double length, Ink ink) {
+        Type type() {
+            return ink == Ink.TEXT ? Type.STRONG : Type.BODY;
+        }
+    }
 
     /** Draws it in a pane, px. In less height than it takes, the smallest shares are drawn as one. */
     public void draw(Painter painter, double width, double height) {
         painter.push(0, 0, width, height);
         Pane.paper(painter, width, height, points);
         double room = width - 2 * RIM;
-        painter.text(
-                Lettering.cut("Where the astigmatism comes from", Type.TITLE, room),
-                RIM,
-                Pane.BASE,
-                Type.TITLE,
-                Ink.TEXT,
-                Anchor.START);
+        String title = "Where the astigmatism comes from";
+        String fits = Lettering.width(title, Type.TITLE) <= room ? title : "Astigmatism ledger";
+        painter.text(Lettering.cut(fits, Type.TITLE, room), RIM, Pane.BASE, Type.TITLE, Ink.TEXT, Anchor.START);
         if (ledger.isEmpty()) {
             none(painter, room);
         } else {
@@ -99,8 +103,8 @@ public final class LedgerDrawing {
         double names = 0;
         double largest = 0;
         for (Row row : all) {
-            figures = Math.max(figures, Lettering.width(said(row.length()), Type.BODY));
-            names = Math.max(names, Lettering.width(row.name(), Type.BODY));
+            figures = Math.max(figures, Lettering.width(said(row.length()), row.type()));
+            names = Math.max(names, Lettering.width(row.name(), row.type()));
             largest = Math.max(largest, Double.isNaN(row.length()) ? 0 : Math.abs(row.length()));
         }
         double right = width - RIM - figures - 10;
@@ -113,9 +117,9 @@ public final class LedgerDrawing {
             if (i == shares.size()) {
                 painter.line(RIM, y - 14.5, width - RIM, y - 14.5, Stroke.of(Ink.RULE, 1));
             }
-            Type type = row.ink() == Ink.TEXT ? Type.STRONG : Type.BODY;
-            painter.text(Lettering.cut(row.name(), type, left - RIM - 6), RIM, y, type, Ink.TEXT, Anchor.START);
-            painter.text(said(row.length()), width - RIM, y, type, Ink.TEXT, Anchor.END);
+            painter.text(
+                    Lettering.cut(row.name(), row.type(), left - RIM - 6), RIM, y, row.type(), Ink.TEXT, Anchor.START);
+            painter.text(said(row.length()), width - RIM, y, row.type(), Ink.TEXT, Anchor.END);
             bar(painter, row, zero, y - 4.5, scale);
             y += ROW;
         }
@@ -126,7 +130,7 @@ public final class LedgerDrawing {
         double length = Double.isNaN(row.length()) ? 0 : row.length() * scale;
         if (Math.abs(length) >= 0.5) {
             Pane.rectangle(points, Math.min(zero, zero + length), middle - BAR / 2, Math.abs(length), BAR);
-            painter.polygon(points, row.ink(), 0.45);
+            painter.polygon(points, row.ink(), TINT);
             painter.polyline(points, true, Stroke.of(row.ink(), 1.2));
         }
     }
@@ -147,7 +151,7 @@ public final class LedgerDrawing {
             return shares.stream().map(s -> row(s, parts)).toList();
         }
         List<Ledger.Share> kept = shares.stream()
-                .sorted(java.util.Comparator.comparingDouble((Ledger.Share s) -> -Math.abs(s.length())))
+                .sorted(Comparator.comparingDouble((Ledger.Share s) -> -Math.abs(s.length())))
                 .limit(most - 1L)
                 .toList();
         List<Row> rows = new ArrayList<>(
@@ -156,7 +160,8 @@ public final class LedgerDrawing {
                 .filter(s -> !kept.contains(s))
                 .mapToDouble(Ledger.Share::length)
                 .sum();
-        rows.add(new Row(shares.size() - kept.size() + " more parts", rest, Ink.QUIET));
+        int others = shares.size() - kept.size();
+        rows.add(new Row(others + (kept.isEmpty() ? " parts together" : " more parts"), rest, Ink.QUIET));
         return rows;
     }
 

@@ -64,6 +64,19 @@ public interface Painter {
     }
 
     /**
+     * A rectangle of cells with hard edges, each of one colour whatever the theme.
+     *
+     * @param x of its upper left corner
+     * @param y of its upper left corner
+     * @param width px
+     * @param height px
+     * @param columns of cells
+     * @param rows of cells
+     * @param argb 0xAARRGGBB, row by row from the top; with alpha 0 nothing is painted
+     */
+    void image(double x, double y, double width, double height, int columns, int rows, int[] argb);
+
+    /**
      * Begins a pane: until {@link #pop}, (0, 0) is its upper left corner, and nothing is painted outside. Panes nest.
      *
      * @param x of its upper left corner

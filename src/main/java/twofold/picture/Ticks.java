@@ -32,6 +32,28 @@ record Ticks(double step, List<Double> values) {
         return new Ticks(step, values);
     }
 
+    /** As many ticks as have room for their numbers side by side. */
+    static Ticks along(Scale scale) {
+        double length = Math.abs(scale.end() - scale.begin());
+        for (int most = (int) (length / 24); most > 1; most--) {
+            Ticks ticks = within(scale.from(), scale.to(), most);
+            double widest = ticks.values().stream()
+                    .mapToDouble(v -> Lettering.width(ticks.label(v), Type.SMALL))
+                    .max()
+                    .orElse(0);
+            if (ticks.step() / (scale.to() - scale.from()) * length >= widest + 16) {
+                return ticks;
+            }
+        }
+        return within(scale.from(), scale.to(), 1);
+    }
+
+    /** As many ticks as have room for their numbers one above the other. */
+    static Ticks up(Scale scale) {
+        double length = Math.abs(scale.end() - scale.begin());
+        return within(scale.from(), scale.to(), (int) Math.max(1, length / 24));
+    }
+
     /** A tick's number, as short as all of them allow. */
     String label(double value) {
         double size = values.stream().mapToDouble(Math::abs).max().orElse(0);
@@ -48,6 +70,11 @@ record Ticks(double step, List<Double> values) {
             return scientific(value, fine);
         }
         return Figures.fixed(value, Nice.decimals(fine));
+    }
+
+    /** The same with its unit behind. */
+    String between(double value, String unit) {
+        return between(value) + (unit.isEmpty() || unit.equals("°") ? "" : " ") + unit;
     }
 
     private static String scientific(double value, double step) {

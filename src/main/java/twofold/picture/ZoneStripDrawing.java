@@ -25,7 +25,7 @@ public final class ZoneStripDrawing {
     private static final double BELOW = 38;
 
     /** A lane is not made taller than this, px. */
-    private static final double TALLEST = 30;
+    private static final double TALLEST = 44;
 
     /** How far from an edge the pointer may be, px. */
     private static final double REACH = 6;
@@ -33,7 +33,11 @@ public final class ZoneStripDrawing {
     /** What is shown on either side of the zones that matter, in their width. */
     private static final double MARGIN = 0.5;
 
-    private static final double TINT = 0.16;
+    /** Opacity of a plane's tint. */
+    static final double TINT = 0.16;
+
+    /** Opacity of what lies over both where both planes are stable. */
+    static final double BOTH = 0.16;
 
     private final Zones tangential;
     private final Zones sagittal;
@@ -210,14 +214,16 @@ public final class ZoneStripDrawing {
             double to = Math.min(scale.end(), pixel(scale, o.to()));
             if (to - from > 1) {
                 Pane.rectangle(points, from, ABOVE, to - from, 2 * lane);
-                painter.polygon(points, Ink.GOOD, 0.22);
+                painter.polygon(points, Ink.GOOD, BOTH);
                 painter.polyline(points, true, Stroke.of(Ink.TEXT, 1.8));
             }
         }
-        return nearest.map(o -> o.length() < Double.POSITIVE_INFINITY
-                        ? "both stable over " + Figures.mm(o.length())
-                        : "both stable without end")
-                .orElse("nowhere both stable");
+        boolean narrow = scale.end() - scale.begin() < 360;
+        return nearest.map(o -> (narrow ? "both " : "both stable ")
+                        + (o.length() < Double.POSITIVE_INFINITY
+                                ? (narrow ? "" : "over ") + Figures.mm(o.length())
+                                : "without end"))
+                .orElse("nowhere both");
     }
 
     private void names(Painter painter, Scale scale, Plane plane, double lane, double width) {
@@ -235,18 +241,18 @@ public final class ZoneStripDrawing {
 
     private static void axis(Painter painter, Scale scale, double under, double height, String overlap, double width) {
         double base = Math.min(height - 4, under + 32);
-        Ticks ticks = Ticks.within(scale.from() * 1e3, scale.to() * 1e3, (int) ((scale.end() - scale.begin()) / 70));
-        double words = Lettering.width(overlap, Type.SMALL);
         painter.text(overlap, width - RIM, base, Type.SMALL, Ink.TEXT, Anchor.END);
-        double end = width - RIM - words - 12;
-        for (int i = 0; i < ticks.values().size(); i++) {
-            double value = ticks.values().get(i);
+        double end = width - RIM - Lettering.width(overlap, Type.SMALL) - 12;
+        Ticks ticks = Ticks.along(new Scale(scale.from() * 1e3, scale.to() * 1e3, scale.begin(), scale.end()));
+        boolean isFirst = true;
+        for (double value : ticks.values()) {
             double x = scale.px(value * 1e-3);
-            String label = ticks.label(value) + (i == 0 ? " mm" : "");
+            String label = ticks.label(value) + (isFirst ? " mm" : "");
             double half = Lettering.width(label, Type.SMALL) / 2;
             painter.line(x, under, x, under + 3, Stroke.of(Ink.AXIS, 1));
             if (x + half < end && x - half > 0) {
                 painter.text(label, x, base, Type.SMALL, Ink.QUIET, Anchor.MIDDLE);
+                isFirst = false;
             }
         }
     }
@@ -278,7 +284,7 @@ public final class ZoneStripDrawing {
             if (zone.isPresent()) {
                 for (double end : new double[] {zone.get().from(), zone.get().to()}) {
                     if (Double.isFinite(end)) {
-                        low = Math.min(low, end);
+                        low = Math.min(low, Math.max(0, end));
                         high = Math.max(high, end);
                         any = true;
                     }
@@ -289,13 +295,14 @@ public final class ZoneStripDrawing {
             return Optional.empty();
         }
         double span = Math.max(high - low, 1e-6 * path);
-        double from = Math.max(Math.min(0, low), low - MARGIN * span);
+        // No leg is shorter than nothing, though a zone may begin there.
+        double from = Math.max(0, low - MARGIN * span);
         double to = high + MARGIN * span;
         for (Plane plane : Plane.values()) {
             for (ZoneEdge edge : zones(plane).edges()) {
                 // The next zone's near edge, where it is not far off.
                 if (edge.path() > from - span && edge.path() < from) {
-                    from = Math.max(Math.min(0, low), edge.path() - 0.1 * span);
+                    from = Math.max(0, edge.path() - 0.1 * span);
                 }
                 if (edge.path() < to + span && edge.path() > to) {
                     to = edge.path() + 0.1 * span;

@@ -3,7 +3,10 @@
  *
  * <p>A drawing is a class that draws a {@link twofold.cavity.Cavity} onto a painter: {@link twofold.picture.BenchDrawing},
  * {@link twofold.picture.BeamDrawing}, {@link twofold.picture.CloseUpDrawing}, {@link twofold.picture.StabilityDrawing};
- * {@link twofold.picture.Sheet} puts bench and beam on one page. Painters: {@link twofold.picture.SvgPainter} and
+ * {@link twofold.picture.Sheet} puts bench and beam on one page. What a cavity is worth is drawn by
+ * {@link twofold.picture.ZoneStripDrawing}, {@link twofold.picture.GDiagramDrawing} and
+ * {@link twofold.picture.LedgerDrawing}; studies by {@link twofold.picture.SweepDrawing} and
+ * {@link twofold.picture.MapDrawing}, from plain records in the units that they show. Painters: {@link twofold.picture.SvgPainter} and
  * {@link twofold.picture.ImagePainter} here, the window's canvas there. No toolkit is needed; java.awt is used to paint PNG
  * and for nothing else.
  *

@@ -3,6 +3,8 @@ package twofold.window;
 import java.util.EnumMap;
 import java.util.Map;
 import javafx.scene.canvas.GraphicsContext;
+import javafx.scene.image.PixelFormat;
+import javafx.scene.image.WritableImage;
 import javafx.scene.paint.Color;
 import javafx.scene.shape.StrokeLineCap;
 import javafx.scene.shape.StrokeLineJoin;
@@ -108,6 +110,15 @@ final class CanvasPainter implements Painter {
         g.rotate(degrees);
         g.fillText(text, 0, 0);
         g.restore();
+    }
+
+    @Override
+    public void image(double x, double y, double width, double height, int columns, int rows, int[] argb) {
+        WritableImage cells = new WritableImage(columns, rows);
+        cells.getPixelWriter().setPixels(0, 0, columns, rows, PixelFormat.getIntArgbInstance(), argb, 0, columns);
+        g.setGlobalAlpha(1);
+        g.setImageSmoothing(false);
+        g.drawImage(cells, x, y, width, height);
     }
 
     @Override

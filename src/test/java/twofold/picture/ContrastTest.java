@@ -38,6 +38,9 @@ class ContrastTest {
     private static final Coat TINT_T = new Coat(Ink.TANGENTIAL, Halves.TINT);
     private static final Coat TINT_S = new Coat(Ink.SAGITTAL, Halves.TINT);
 
+    private static final Coat BAND_T = new Coat(Ink.TANGENTIAL, SweepPanel.TINT);
+    private static final Coat BAND_S = new Coat(Ink.SAGITTAL, SweepPanel.TINT);
+
     private static List<Pair> inUse() {
         List<Pair> pairs = new ArrayList<>();
         // Text on paper, and on the veil that lies over crossing beams, mounts and crystals behind it.
@@ -90,6 +93,32 @@ class ContrastTest {
         add(pairs, Ink.TANGENTIAL, LINE, MOUNT);
         add(pairs, Ink.SAGITTAL, LINE, MOUNT);
         add(pairs, Ink.AXIS, LINE, MOUNT);
+        // Zones on their strip and in a sweep's panels, with both planes' tints over one another.
+        for (Coat ground : List.of(PAPER, MOUNT)) {
+            for (Ink ink : List.of(Ink.TANGENTIAL, Ink.SAGITTAL, Ink.AXIS, Ink.TEXT, Ink.SELECTED, Ink.CROSSHAIR)) {
+                add(pairs, ink, LINE, ground);
+            }
+        }
+        Coat both = new Coat(Ink.GOOD, ZoneStripDrawing.BOTH);
+        for (Ink own : List.of(Ink.TANGENTIAL, Ink.SAGITTAL)) {
+            Coat tint = new Coat(own, ZoneStripDrawing.TINT);
+            for (Ink ink : List.of(own, Ink.TEXT, Ink.AXIS)) {
+                add(pairs, ink, LINE, MOUNT, tint);
+                add(pairs, ink, LINE, MOUNT, tint, both);
+            }
+        }
+        for (Ink ink : List.of(Ink.TANGENTIAL, Ink.SAGITTAL, Ink.TEXT, Ink.SELECTED, Ink.CROSSHAIR, Ink.AXIS)) {
+            add(pairs, ink, LINE, PAPER, BAND_T, BAND_S);
+        }
+        for (Ink ink : List.of(Ink.TANGENTIAL, Ink.SAGITTAL, Ink.TEXT)) {
+            add(pairs, ink, TEXT, PAPER, BAND_T, BAND_S, VEIL);
+        }
+        // The stable regions of the diagram of standing waves.
+        for (Ink ink : List.of(Ink.TANGENTIAL, Ink.SAGITTAL, Ink.AXIS)) {
+            add(pairs, ink, LINE, MOUNT, new Coat(Ink.GOOD, GDiagramDrawing.TINT));
+        }
+        // Outlines of the ledger's bars.
+        add(pairs, Ink.TEXT, LINE, PAPER, new Coat(Ink.TEXT, LedgerDrawing.TINT));
         // Outlines of parts, on table and mount, with the beam over them.
         add(pairs, Ink.OPTIC_EDGE, LINE, PAPER, RIBBON, RIBBON);
         add(pairs, Ink.OPTIC_EDGE, LINE, PAPER);
@@ -131,6 +160,41 @@ class ContrastTest {
 
     @ParameterizedTest
     @EnumSource(Theme.class)
+    void numbersOnAMapsColoursHaveContrastOnTheirPlates(Theme theme) {
+        double text = linear(theme, List.of(new Coat(Ink.TEXT, 1)));
+        for (int colour = 0; colour < ColourMap.SIZE; colour++) {
+            double[] rgb = new double[3];
+            for (int i = 0; i < 3; i++) {
+                int under = ColourMap.rgb(colour) >> (16 - 8 * i) & 0xff;
+                int paper = theme.rgb(Ink.PAPER) >> (16 - 8 * i) & 0xff;
+                rgb[i] = under + Pane.VEIL * (paper - under);
+            }
+            assertThat(ratio(text, luminance(rgb))).as("colour %d", colour).isGreaterThanOrEqualTo(TEXT);
+        }
+    }
+
+    @ParameterizedTest
+    @EnumSource(Theme.class)
+    void linesOverAMapsColoursHaveContrastToTheirCasing(Theme theme) {
+        // The casing's opacity over whichever colour is the worst.
+        for (Ink ink : List.of(Ink.TANGENTIAL, Ink.SAGITTAL, Ink.TEXT, Ink.SELECTED, Ink.CROSSHAIR)) {
+            double line = linear(theme, List.of(new Coat(ink, 1)));
+            for (int colour = 0; colour < ColourMap.SIZE; colour++) {
+                double[] rgb = new double[3];
+                for (int i = 0; i < 3; i++) {
+                    int under = ColourMap.rgb(colour) >> (16 - 8 * i) & 0xff;
+                    int paper = theme.rgb(Ink.PAPER) >> (16 - 8 * i) & 0xff;
+                    rgb[i] = under + MapOutlines.CASING * (paper - under);
+                }
+                assertThat(ratio(line, luminance(rgb)))
+                        .as("%s on colour %d", ink, colour)
+                        .isGreaterThanOrEqualTo(LINE);
+            }
+        }
+    }
+
+    @ParameterizedTest
+    @EnumSource(Theme.class)
     void theFormulaGivesItsKnownEnds(Theme theme) {
         // WCAG 2.2, definition of contrast ratio: 21 for black on white, 1 for a colour on itself.
         assertThat(ratio(luminance(new double[] {0, 0, 0}), luminance(new double[] {255, 255, 255})))
@@ -152,11 +216,14 @@ class ContrastTest {
             bench.draw(r, bench.all(800, 400).selecting(OptionalInt.of(1)).crossing(OptionalDouble.of(0.1)));
             BeamDrawing beam = new BeamDrawing(cavity);
             beam.draw(r, beam.all(800, 400).selecting(OptionalInt.of(1)).crossing(OptionalDouble.of(0.1)));
+            Plots.drawings(cavity).forEach(d -> d.draw(r, 560, 420));
             r.drawn(Recorder.Mark.TEXT).forEach(t -> texts.add(t.stroke().ink()));
             r.drawn(Recorder.Mark.LINE).forEach(t -> lines.add(t.stroke().ink()));
         }
         // Rules between panes and along axis numbers carry no meaning that the numbers do not.
         lines.remove(Ink.RULE);
+        // Casings set lines off from a map's colours.
+        lines.remove(Ink.PAPER);
         assertThat(listed(TEXT, theme)).containsAll(texts);
         assertThat(listed(LINE, theme)).containsAll(lines);
     }

@@ -67,30 +67,34 @@ class ReadableTest {
     @ParameterizedTest
     @MethodSource("designs")
     void everyTextLiesWithinItsPane(Design design) {
-        for (Recorder drawing : drawings(design)) {
-            drawing.drawn(Recorder.Mark.TEXT)
-                    .forEach(t -> assertThat(t.points())
-                            .as("the box of \"%s\" within %s", t.text(), t.pane())
-                            .allMatch(t.pane()::holds));
-        }
+        drawings(design).forEach(ReadableTest::assertWithin);
+    }
+
+    static void assertWithin(Recorder drawing) {
+        drawing.drawn(Recorder.Mark.TEXT)
+                .forEach(t -> assertThat(t.points())
+                        .as("the box of \"%s\" within %s", t.text(), t.pane())
+                        .allMatch(t.pane()::holds));
     }
 
     @ParameterizedTest
     @MethodSource("designs")
     void noTextCoversAnother(Design design) {
-        for (Recorder drawing : drawings(design)) {
-            List<Recorder.Thing> texts = drawing.drawn(Recorder.Mark.TEXT).toList();
-            for (int i = 0; i < texts.size(); i++) {
-                for (int j = 0; j < i; j++) {
-                    Area both = area(texts.get(i));
-                    both.intersect(area(texts.get(j)));
-                    Rectangle2D common = both.getBounds2D();
-                    assertThat(common.getWidth() * common.getHeight())
-                            .as(
-                                    "\"%s\" on \"%s\"",
-                                    texts.get(i).text(), texts.get(j).text())
-                            .isZero();
-                }
+        drawings(design).forEach(ReadableTest::assertApart);
+    }
+
+    static void assertApart(Recorder drawing) {
+        List<Recorder.Thing> texts = drawing.drawn(Recorder.Mark.TEXT).toList();
+        for (int i = 0; i < texts.size(); i++) {
+            for (int j = 0; j < i; j++) {
+                Area both = area(texts.get(i));
+                both.intersect(area(texts.get(j)));
+                Rectangle2D common = both.getBounds2D();
+                assertThat(common.getWidth() * common.getHeight())
+                        .as(
+                                "\"%s\" on \"%s\"",
+                                texts.get(i).text(), texts.get(j).text())
+                        .isZero();
             }
         }
     }

@@ -12,6 +12,7 @@ final class Recorder implements Painter {
     enum Mark {
         LINE,
         AREA,
+        IMAGE,
         TEXT
     }
 
@@ -125,6 +126,16 @@ final class Recorder implements Painter {
             box.add(new Spot(x + atX + c[0] * cos - c[1] * sin, y + atY + c[0] * sin + c[1] * cos));
         }
         add(Mark.TEXT, box, Stroke.of(ink, 1), text, type);
+    }
+
+    @Override
+    public void image(double left, double top, double width, double height, int columns, int rows, int[] argb) {
+        List<Spot> corners = List.of(
+                new Spot(x + left, y + top),
+                new Spot(x + left + width, y + top),
+                new Spot(x + left + width, y + top + height),
+                new Spot(x + left, y + top + height));
+        add(Mark.IMAGE, corners, Stroke.of(Ink.PAPER, 0), columns + " × " + rows, Type.SMALL);
     }
 
     @Override

@@ -117,8 +117,7 @@ public final class ZonesPane extends DrawingPane {
                 ? Optional.empty()
                 : strip.edgeAt(e.getX(), e.getY(), Math.floor(getWidth()), stripHeight(Math.floor(getHeight())));
         if (hit.isPresent()) {
-            words.setText(
-                    hit.get().plane().word() + ": " + hit.get().edge().cause().words());
+            words.setText(hit.get().words());
             words.show(this, e.getScreenX() + 14, e.getScreenY() + 14);
         } else {
             words.hide();
