@@ -84,7 +84,8 @@ public record Judgement(Requirement requirement, double value, double margin, Ve
         return Reading.of(r.what(), r.at(), plane, r.edge(), chain);
     }
 
-    private static List<Optional<Plane>> planes(Requirement r) {
+    /** The planes in which a requirement must hold; one without a plane where its quantity has none. */
+    public static List<Optional<Plane>> planes(Requirement r) {
         return r.plane()
                 .map(p -> switch (p) {
                     case TANGENTIAL -> List.of(Optional.of(Plane.TANGENTIAL));

@@ -4,6 +4,7 @@ import java.io.PrintStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine;
@@ -12,6 +13,7 @@ import picocli.CommandLine.Help.Ansi;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 import twofold.design.Names;
+import twofold.study.Progress;
 
 /** The command line as a whole; without a command, the way to the editor. */
 @Command(
@@ -114,6 +116,19 @@ public final class Commands implements Callable<Integer> {
             return FILE;
         }
         return ended || stopped ? DONE : FILE;
+    }
+
+    /** Something long that can be stopped. */
+    interface Study<T> {
+        /** What it comes to; empty where it was stopped. */
+        Optional<T> run(int threads, Progress progress);
+    }
+
+    /** Runs a study for a picture; empty where the program was told to end. */
+    static <T> Optional<T> study(Study<T> study, Streams streams, String what, boolean withProgress) {
+        try (ProgressLine progress = new ProgressLine(streams, what, withProgress)) {
+            return study.run(Runtime.getRuntime().availableProcessors(), progress);
+        }
     }
 
     @Override

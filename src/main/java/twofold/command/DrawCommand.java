@@ -1,24 +1,13 @@
 package twofold.command;
 
-import java.io.IOException;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.InvalidPathException;
-import java.nio.file.Path;
-import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import twofold.cavity.Cavity;
-import twofold.design.Names;
-import twofold.design.Unit;
-import twofold.file.SafeFile;
 import twofold.picture.Sheet;
 import twofold.picture.Theme;
 
@@ -29,8 +18,6 @@ import twofold.picture.Theme;
         description = "The bench and the beam as a picture.",
         footer = {"", "Example:", "  twofold draw samples/z-fold-rod.json --to z-fold.svg --size 1280x800"})
 final class DrawCommand implements Callable<Integer> {
-    private static final Pattern SIZE = Pattern.compile("(\\d{1,5})x(\\d{1,5})");
-    private static final double LARGEST = 10_000;
     private static final double LARGEST_FACTOR = 10_000;
 
     private final Streams streams;
@@ -63,64 +50,37 @@ final class DrawCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        String ending = to.substring(to.lastIndexOf('.') + 1).toLowerCase(Locale.ROOT);
-        if (ending.equals("pdf")) {
-            return usage("--to", to, "a name that ends in .svg or .png; PDF is to come");
+        if (!Pictures.accepts("--to", to, streams)) {
+            return Commands.USAGE;
         }
-        if (!List.of("svg", "png").contains(ending)) {
-            return usage("--to", to, "a name that ends in .svg or .png");
-        }
-        Matcher pixels = SIZE.matcher(size);
-        if (!pixels.matches() || !fits(pixels)) {
-            return usage(
-                    "--size",
-                    size,
-                    "width x height in px, from " + Unit.ONE.text(Sheet.LEAST_WIDTH) + "x"
-                            + Unit.ONE.text(Sheet.LEAST_HEIGHT) + " to 10000x10000");
+        Optional<Pictures.Size> pixels =
+                Pictures.size("--size", size, new Pictures.Size(Sheet.LEAST_WIDTH, Sheet.LEAST_HEIGHT), streams);
+        if (pixels.isEmpty()) {
+            return Commands.USAGE;
         }
         if (magnify != null && !(magnify >= 1 && magnify <= LARGEST_FACTOR)) {
-            return usage("--magnify", String.valueOf(magnify), "a number from 1 to 10000");
+            streams.refuse("--magnify", String.valueOf(magnify), "a number from 1 to 10000");
+            return Commands.USAGE;
         }
-        Optional<Theme> inks = List.of(Theme.values()).stream()
-                .filter(t -> t.word().equals(theme))
-                .findFirst();
+        Optional<Theme> inks = Pictures.theme(theme, streams);
         if (inks.isEmpty()) {
-            return usage("--theme", theme, "light or dark");
+            return Commands.USAGE;
         }
         Optional<Cavity> cavity = Opened.solve(file, streams);
         if (cavity.isEmpty()) {
             return Commands.FILE;
         }
-        Pictures pictures = new Pictures(
-                Double.parseDouble(pixels.group(1)),
-                Double.parseDouble(pixels.group(2)),
-                inks.get(),
-                magnify == null ? OptionalDouble.empty() : OptionalDouble.of(magnify));
-        byte[] bytes = ending.equals("svg")
-                ? pictures.svg(cavity.get()).getBytes(StandardCharsets.UTF_8)
-                : pictures.png(cavity.get(), 1);
-        return save(bytes);
+        OptionalDouble factor = magnify == null ? OptionalDouble.empty() : OptionalDouble.of(magnify);
+        return page(cavity.get(), pixels.get(), inks.get(), factor).save(to, streams);
     }
 
-    private static boolean fits(Matcher pixels) {
-        double width = Double.parseDouble(pixels.group(1));
-        double height = Double.parseDouble(pixels.group(2));
-        return width >= Sheet.LEAST_WIDTH && height >= Sheet.LEAST_HEIGHT && width <= LARGEST && height <= LARGEST;
-    }
-
-    private int usage(String option, String found, String accepted) {
-        streams.complain(option + ": found \"" + Names.escaped(found) + "\"; accepted: " + accepted);
-        return Commands.USAGE;
-    }
-
-    private int save(byte[] bytes) {
-        try {
-            SafeFile.write(Path.of(to), bytes);
-            streams.out().println(to);
-            return Commands.DONE;
-        } catch (IOException | InvalidPathException e) {
-            streams.err().println(Unreadable.line(to, e));
-            return Commands.FILE;
-        }
+    /** The page of a cavity, its beam so many times wider than true, or by itself. */
+    static Pictures page(Cavity cavity, Pictures.Size size, Theme theme, OptionalDouble factor) {
+        return new Pictures(
+                size.width(),
+                size.height(),
+                theme,
+                cavity.laid().design().title(),
+                painter -> Sheet.draw(cavity, painter, size.width(), size.height(), factor));
     }
 }

@@ -12,6 +12,7 @@ import twofold.layout.Laid;
 import twofold.layout.Outcome;
 import twofold.layout.Target;
 import twofold.study.Asked;
+import twofold.study.Axis;
 import twofold.study.Question;
 
 /** What a sweep or map asks, from its arguments; what cannot be understood goes to the error stream, a line each. */
@@ -47,6 +48,15 @@ final class Levers {
         }
         complaints.forEach(streams::complain);
         return complaints.isEmpty() ? Optional.of(new Question(laid, known, asked)) : Optional.empty();
+    }
+
+    /** Whether an axis has no more values than can be shown; complains if not. */
+    static boolean fits(Axis axis, long most, Streams streams) {
+        if (axis.size() > most) {
+            streams.complain("--lever: found " + axis.size() + " values of \""
+                    + axis.lever().name() + "\"; accepted: up to " + most);
+        }
+        return axis.size() <= most;
     }
 
     /** What is wrong with two levers that set the same number. */

@@ -2,11 +2,9 @@ package twofold.command;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import twofold.design.Unit;
 import twofold.file.Csv;
-import twofold.optics.Plane;
 import twofold.study.Asked;
 import twofold.study.Axis;
 import twofold.study.Survey;
@@ -109,15 +107,5 @@ final class SurveyCsv {
         double margin = piece.answer(point, quantities() + number);
         double value = survey.axes().get(0).value(survey.index(0, piece.first() + point));
         return margin > 0 ? Csv.cell(zones.get(number).zone(value)) : "";
-    }
-
-    /** The quantity that tells whether a plane is stable. */
-    static Asked margin(Plane plane) {
-        return new Asked(
-                "stability_margin:" + plane.word(),
-                twofold.design.Quantity.STABILITY_MARGIN,
-                Optional.empty(),
-                Optional.of(plane),
-                Optional.empty());
     }
 }

@@ -2,7 +2,6 @@ package twofold.command;
 
 import java.io.IOException;
 import java.io.PrintStream;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
@@ -13,8 +12,7 @@ import twofold.picture.Theme;
 
 /** The main job where no window can be opened: the text answer and the pictures, with the reason. */
 public final class WithoutWindow {
-    private static final double WIDTH = 1280;
-    private static final double HEIGHT = 800;
+    private static final Pictures.Size SIZE = new Pictures.Size(1280, 800);
 
     private WithoutWindow() {}
 
@@ -42,13 +40,13 @@ public final class WithoutWindow {
     private static int pictures(String file, Cavity cavity, Streams streams) {
         String last = String.valueOf(Path.of(file).getFileName());
         String name = last.endsWith(".json") ? last.substring(0, last.length() - ".json".length()) : last;
-        Pictures page = new Pictures(WIDTH, HEIGHT, Theme.LIGHT, OptionalDouble.empty());
+        Pictures page = DrawCommand.page(cavity, SIZE, Theme.LIGHT, OptionalDouble.empty());
         try {
             Path folder = Files.createTempDirectory("twofold-");
             Path svg = folder.resolve(name + ".svg");
             Path png = folder.resolve(name + ".png");
-            SafeFile.write(svg, page.svg(cavity).getBytes(StandardCharsets.UTF_8));
-            SafeFile.write(png, page.png(cavity, 2));
+            SafeFile.write(svg, page.svg());
+            SafeFile.write(png, page.png(2));
             streams.out().println();
             streams.out().println(svg);
             streams.out().println(png);

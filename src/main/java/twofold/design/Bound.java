@@ -1,7 +1,29 @@
 package twofold.design;
 
+import java.util.OptionalDouble;
+
 /** What a requirement asks of its quantity, in the quantity's SI unit. */
 public sealed interface Bound {
+    /** The least value that it allows, where there is one. */
+    default OptionalDouble least() {
+        if (this instanceof AtLeast b) {
+            return OptionalDouble.of(b.value());
+        } else if (this instanceof Between b) {
+            return OptionalDouble.of(b.low());
+        }
+        return this instanceof Equal b ? OptionalDouble.of(b.value() - b.within()) : OptionalDouble.empty();
+    }
+
+    /** The largest value that it allows, where there is one. */
+    default OptionalDouble most() {
+        if (this instanceof AtMost b) {
+            return OptionalDouble.of(b.value());
+        } else if (this instanceof Between b) {
+            return OptionalDouble.of(b.high());
+        }
+        return this instanceof Equal b ? OptionalDouble.of(b.value() + b.within()) : OptionalDouble.empty();
+    }
+
     /** At least a value. */
     record AtLeast(double value) implements Bound {}
 

@@ -10,9 +10,12 @@ import java.util.Map;
 /**
  * Lines of equal value through a grid, by marching squares: along each side of a square of four neighbours the value is
  * taken as linear, and where two lines could be joined in two ways, the mean of the four decides. A square with an undefined
- * corner has no line.
+ * corner has no line, nor has one that is thinner than anybody sees: it is the border of two bands of a list.
  */
 final class Contours {
+    /** What is thinner is no square but a border, px. */
+    private static final double THIN = 1e-3;
+
     private final int columns;
     private final int rows;
     private final double[] xs;
@@ -36,11 +39,24 @@ final class Contours {
 
     /** The lines of a value, px; a closed one ends where it begins. */
     List<Points> at(double level) {
+        return at(level, false);
+    }
+
+    /** The same, along the borders of bands too: the outline of where values are above or below one. */
+    List<Points> outline(double level) {
+        return at(level, true);
+    }
+
+    private List<Points> at(double level, boolean withBorders) {
         // By the side of a square that a line crosses: the one or two sides that it goes on to.
         Map<Integer, int[]> next = new HashMap<>();
         for (int row = 0; row + 1 < rows; row++) {
             for (int column = 0; column + 1 < columns; column++) {
-                square(row, column, level, next);
+                boolean isBorder =
+                        Math.abs(xs[column + 1] - xs[column]) < THIN || Math.abs(ys[row + 1] - ys[row]) < THIN;
+                if (withBorders || !isBorder) {
+                    square(row, column, level, next);
+                }
             }
         }
         List<Points> lines = new ArrayList<>();

@@ -153,7 +153,8 @@ public final class MapDrawing {
             });
         }
         if (plot.margins().isPresent()) {
-            legend.add("all requirements hold", "met", (painter, x, y) -> {
+            String where = metWords();
+            legend.add("all requirements hold" + where, "met" + where, (painter, x, y) -> {
                 Pane.rectangle(points, x, y, Legend.WIDE, Legend.HIGH);
                 painter.polyline(points, true, Stroke.of(Ink.TEXT, 2.6));
             });
@@ -171,6 +172,13 @@ public final class MapDrawing {
             legend.add("colours end, values go on", "beyond", (painter, x, y) -> arrow(painter, x + 12, y + 10, -1));
         }
         return legend;
+    }
+
+    /** Where no outline tells, words do. */
+    private String metWords() {
+        double[] margins = plot.margins().map(m -> MapGrid.shown(plot, m)).orElse(new double[0]);
+        long met = Arrays.stream(margins).filter(m -> m >= 0).count();
+        return met == 0 ? ": nowhere here" : met == margins.length ? ": everywhere here" : "";
     }
 
     private void head(

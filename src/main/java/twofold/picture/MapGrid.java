@@ -1,5 +1,8 @@
 package twofold.picture;
 
+import java.util.Arrays;
+import java.util.stream.IntStream;
+
 /**
  * A map's grid laid onto px, thinned to what a picture can show: px of columns and rows, and numbers there. Values between
  * neighbours are bilinear.
@@ -22,16 +25,39 @@ final class MapGrid {
      */
     MapGrid(MapPlot plot, Scale x, Scale y) {
         stride = plot.x().values().size();
-        columnOf = thinned(stride);
-        rowOf = thinned(plot.y().values().size());
-        xs = new double[columnOf.length];
-        ys = new double[rowOf.length];
-        for (int i = 0; i < xs.length; i++) {
-            xs[i] = x.px(plot.x().values().at(columnOf[i]));
+        columnOf = placed(plot.x());
+        rowOf = placed(plot.y());
+        xs = places(plot.x(), columnOf, x);
+        ys = places(plot.y(), rowOf, y);
+    }
+
+    /** Which values are shown; of a list each twice, at both borders of its band. */
+    private static int[] placed(MapPlot.Axis axis) {
+        int[] shown = thinned(axis.values().size());
+        return axis.isList()
+                ? Arrays.stream(shown).flatMap(i -> IntStream.of(i, i)).toArray()
+                : shown;
+    }
+
+    /** Of a list, bands that reach half way to their neighbours: a lever that has no value between has no line there. */
+    private static double[] places(MapPlot.Axis axis, int[] shown, Scale scale) {
+        double[] places = new double[shown.length];
+        for (int i = 0; i < places.length; i++) {
+            double here = axis.values().at(shown[i]);
+            if (axis.isList()) {
+                boolean isBegin = i % 2 == 0;
+                int beside = i + (isBegin ? -1 : 1);
+                double border = beside < 0
+                        ? scale.from()
+                        : beside == places.length
+                                ? scale.to()
+                                : (here + axis.values().at(shown[beside])) / 2;
+                // A hair inside, so that the places ascend.
+                here += (border - here) * (1 - 1e-6);
+            }
+            places[i] = scale.px(here);
         }
-        for (int i = 0; i < ys.length; i++) {
-            ys[i] = y.px(plot.y().values().at(rowOf[i]));
-        }
+        return places;
     }
 
     private static int[] thinned(int size) {

@@ -184,7 +184,7 @@ final class MapOutlines {
             if (column.isPresent()) {
                 Contours contours = new Contours(grid.xs, grid.ys, grid.numbers(column.get()));
                 for (double edge : new double[] {-1, 1}) {
-                    for (Points line : contours.at(edge)) {
+                    for (Points line : contours.outline(edge)) {
                         painter.polyline(line, false, new Stroke(Ink.PAPER, 4.6, Dash.SOLID, CASING));
                         painter.polyline(line, false, Pane.line(plane, 2));
                     }
@@ -199,7 +199,7 @@ final class MapOutlines {
         for (int i = 0; i < numbers.length; i++) {
             numbers[i] = Double.isNaN(numbers[i]) ? -1 : numbers[i];
         }
-        for (Points line : new Contours(grid.xs, grid.ys, numbers).at(0)) {
+        for (Points line : new Contours(grid.xs, grid.ys, numbers).outline(0)) {
             painter.polyline(line, false, new Stroke(Ink.PAPER, 5.6, Dash.SOLID, CASING));
             painter.polyline(line, false, Stroke.of(Ink.TEXT, 2.6));
         }

@@ -8,7 +8,7 @@ import java.util.OptionalDouble;
 import twofold.optics.Plane;
 
 /**
- * Quantities over one lever: a panel for each unit, one above the other; where each plane is stable as two hatched lanes on
+ * Quantities over one lever: panels one above the other; where each plane is stable as two hatched lanes on
  * top, whose edges are named and run down through the panels; a mark where the design stands.
  */
 public final class SweepDrawing {
@@ -76,16 +76,16 @@ public final class SweepDrawing {
     }
 
     private Plan plan(double width, double height) {
-        Map<String, List<SweepPlot.Line>> units = new LinkedHashMap<>();
+        Map<String, List<SweepPlot.Line>> panels = new LinkedHashMap<>();
         for (SweepPlot.Line line : plot.lines()) {
-            units.computeIfAbsent(line.unit(), u -> new ArrayList<>()).add(line);
+            panels.computeIfAbsent(line.panel(), p -> new ArrayList<>()).add(line);
         }
         boolean zones = !plot.bands().isEmpty();
         Legend legend = legend(zones);
         double top = HEAD + (zones ? 2 * (NAMES + LANE) + 4 : 0);
         double bottom = height - 36 - legend.height(width - 2 * RIM) - 4;
         int room = (int) Math.max(1, Math.min(MOST, (bottom - top + GAP) / (LOWEST + GAP)));
-        int shown = Math.min(room, units.size());
+        int shown = Math.min(room, panels.size());
         double each = shown == 0 ? 0 : Math.max(20, (bottom - top + GAP) / shown - GAP);
         double labels = plot.lines().stream()
                 .mapToDouble(l -> SweepPanel.labelWidth(l.label()))
@@ -95,9 +95,9 @@ public final class SweepDrawing {
         List<SweepPanel> all = new ArrayList<>();
         double left = RIM;
         double y = top;
-        for (Map.Entry<String, List<SweepPlot.Line>> unit : units.entrySet()) {
+        for (List<SweepPlot.Line> lines : panels.values()) {
             if (all.size() < shown) {
-                SweepPanel panel = new SweepPanel(unit.getKey(), unit.getValue(), plot.values(), y, each);
+                SweepPanel panel = new SweepPanel(lines.get(0).unit(), lines, plot.values(), y, each);
                 left = Math.max(left, RIM + panel.numbersWidth() + 8);
                 all.add(panel);
                 y += each + GAP;
@@ -105,7 +105,7 @@ public final class SweepDrawing {
         }
         Scale x = scale(left, Math.max(left + 40, right));
         all.forEach(p -> p.along(x, width - RIM));
-        int rest = units.values().stream().skip(shown).mapToInt(List::size).sum();
+        int rest = panels.values().stream().skip(shown).mapToInt(List::size).sum();
         return new Plan(x, all, rest, top, bottom, legend);
     }
 

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 import twofold.cavity.Chain;
+import twofold.cavity.Judgement;
 import twofold.cavity.Reading;
 import twofold.design.Bound;
 import twofold.design.Design;
@@ -33,6 +34,43 @@ import twofold.optics.Plane;
 public record Asked(String text, Quantity what, Optional<Place> at, Optional<Plane> plane, Optional<Edge> edge) {
     /** How a quantity is written. */
     public static final String FORM = "what[@place[:plane-or-edge]]";
+
+    /** A quantity of the whole cavity in a plane. */
+    public static Asked of(Quantity what, Plane plane) {
+        return new Asked(
+                what.json() + ":" + plane.word(), what, Optional.empty(), Optional.of(plane), Optional.empty());
+    }
+
+    /** What a requirement asks for, in a plane where its quantity has planes. */
+    static Asked of(Requirement requirement, Optional<Plane> plane) {
+        String place = requirement.at().map(p -> "@" + p).orElse("");
+        String way = plane.map(Plane::word)
+                .or(() -> requirement.edge().map(Edge::word))
+                .map(w -> ":" + w)
+                .orElse("");
+        return new Asked(
+                requirement.what().json() + place + way,
+                requirement.what(),
+                requirement.at(),
+                plane,
+                requirement.edge());
+    }
+
+    /** Whether a requirement asks for this quantity, in this plane where it has one. */
+    public boolean isOf(Requirement requirement) {
+        return requirement.what() == what
+                && requirement.at().equals(at)
+                && requirement.edge().equals(edge)
+                && Judgement.planes(requirement).contains(plane);
+    }
+
+    /** "Radius at Rod, sagittal": in words, without its unit. */
+    public String words() {
+        return what.title()
+                + at.map(p -> " at " + p).orElse("")
+                + plane.map(p -> ", " + p.word()).orElse("")
+                + edge.map(e -> ", " + e.word() + " edge").orElse("");
+    }
 
     /** Compiles it against a chain of the design that it was parsed for. */
     public Reading reading(Chain chain) {

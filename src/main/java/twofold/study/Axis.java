@@ -2,6 +2,7 @@ package twofold.study;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.util.Arrays;
 import twofold.design.Field;
 import twofold.design.Lever;
 import twofold.design.Unit;
@@ -40,9 +41,19 @@ public final class Axis {
         return new Axis(lever, values);
     }
 
+    /** The same values from the smallest to the largest, each once. */
+    public Axis ascending() {
+        return new Axis(lever, Arrays.stream(values).sorted().distinct().toArray());
+    }
+
     /** The lever. */
     public Lever lever() {
         return lever;
+    }
+
+    /** Whether the lever has these values and none between. */
+    public boolean isList() {
+        return lever.range() instanceof Lever.Range.Among;
     }
 
     /** The unit of the lever's values in files. */
@@ -50,7 +61,8 @@ public final class Axis {
         return unit(lever);
     }
 
-    private static Unit unit(Lever lever) {
+    /** The unit of a lever's values in files. */
+    public static Unit unit(Lever lever) {
         return Field.settableUnit(lever.set()).orElse(Unit.ONE);
     }
 

@@ -3,7 +3,10 @@ package twofold.study;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
+import twofold.cavity.Chain;
 import twofold.design.Along;
+import twofold.design.Crystal;
 import twofold.design.Design;
 import twofold.design.FaceAngle;
 import twofold.design.Field;
@@ -20,10 +23,14 @@ import twofold.layout.Layout;
 import twofold.layout.Move;
 import twofold.layout.Mover;
 import twofold.layout.Outcome;
+import twofold.layout.Plan;
 import twofold.layout.Target;
 
 /** The design that levers set to values make: what a {@link Setting} does to a trial, as a design of its own. */
 public final class Levered {
+    /** Values that differ by less than this share of a lever's range are one to the eye. */
+    private static final double ALIKE = 1e-3;
+
     private Levered() {}
 
     /**
@@ -72,6 +79,52 @@ public final class Levered {
                     "other values of " + String.join(", ", names) + ", or fewer holds")));
         }
         return Layout.of(set.withParts(placed(parts, ((Move.Moved) move).places())));
+    }
+
+    /**
+     * Where a lever stands in a design: the value of all that it sets, in SI; empty where they differ by more than a
+     * thousandth of the lever's range, so that no one value is the design's.
+     */
+    public static OptionalDouble now(Laid laid, Lever lever) {
+        double least = Double.POSITIVE_INFINITY;
+        double most = Double.NEGATIVE_INFINITY;
+        for (Place place : lever.of()) {
+            double value = now(laid, lever.set(), place);
+            if (!Double.isFinite(value)) {
+                return OptionalDouble.empty();
+            }
+            least = Math.min(least, value);
+            most = Math.max(most, value);
+        }
+        return most - least <= ALIKE * extent(lever) ? OptionalDouble.of((least + most) / 2) : OptionalDouble.empty();
+    }
+
+    private static double now(Laid laid, String set, Place place) {
+        Optional<Target> target = Target.of(laid.design(), set, place);
+        if (target.isPresent()) {
+            return target.get().value(Plan.of(laid));
+        }
+        int index = laid.design().indexOf(place.first()).orElseThrow();
+        Part part = laid.design().parts().get(index);
+        Field field = part.kind().field(set).orElseThrow();
+        Chain chain = Chain.of(laid);
+        if (part instanceof Mirror mirror && field == Field.CLEAR_DIAMETER) {
+            return mirror.clearDiameter();
+        } else if (part instanceof Crystal crystal && field == Field.THERMAL_POWER) {
+            TwoPowers powers = crystal.thermalPower();
+            return powers.tangential() == powers.sagittal() ? powers.tangential() : Double.NaN;
+        } else if (chain.has(index, field)) {
+            return chain.trial().get(chain.slot(index, field));
+        }
+        return part.values()
+                .find(field)
+                .map(v -> v instanceof Double d ? d : Double.NaN)
+                .orElse(Double.NaN);
+    }
+
+    private static double extent(Lever lever) {
+        Axis axis = Axis.of(lever, 2).ascending();
+        return axis.value(axis.size() - 1) - axis.value(0);
     }
 
     private static List<Part> placed(List<Part> parts, List<Point> places) {

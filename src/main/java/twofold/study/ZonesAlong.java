@@ -10,6 +10,7 @@ import twofold.cavity.Chain;
 import twofold.cavity.EdgeCause;
 import twofold.cavity.Reading;
 import twofold.design.Lever;
+import twofold.design.Quantity;
 import twofold.layout.Laid;
 import twofold.optics.Plane;
 
@@ -120,5 +121,75 @@ public record ZonesAlong(Plane plane, List<Edge> edges) {
         return java.util.stream.Stream.of(lower, upper)
                 .map(e -> e.map(Edge::name).orElse("-"))
                 .collect(Collectors.joining(" to "));
+    }
+
+    /**
+     * A stretch of the lever on which a plane is stable.
+     *
+     * @param plane which
+     * @param from where it begins, in SI
+     * @param to where it ends, in SI
+     * @param lower the edge where it begins; empty where that is the range's end, or where there is no such layout beyond
+     * @param upper the edge where it ends, likewise
+     */
+    public record Stretch(Plane plane, double from, double to, Optional<Edge> lower, Optional<Edge> upper) {}
+
+    /**
+     * Where the plane is stable.
+     *
+     * @param samples that the edges were found between, ascending
+     * @param margins the plane's stability margin at each of them, NaN where there is no such layout
+     */
+    List<Stretch> stable(Laid laid, Axis samples, double[] margins) {
+        Asker asker = new Question(laid, List.of(samples.lever()), List.of(Asked.of(Quantity.STABILITY_MARGIN, plane)))
+                .asker();
+        List<Stretch> stretches = new ArrayList<>();
+        int sample = 0;
+        for (int i = 0; i <= edges.size(); i++) {
+            Optional<Edge> lower = i == 0 ? Optional.empty() : Optional.of(edges.get(i - 1));
+            Optional<Edge> upper = i == edges.size() ? Optional.empty() : Optional.of(edges.get(i));
+            double from = lower.map(Edge::value).orElse(samples.value(0));
+            double to = upper.map(Edge::value).orElse(samples.value(samples.size() - 1));
+            while (lower.isPresent() && sample < samples.size() && samples.value(sample) <= from) {
+                // On the edge itself the margin is 0.
+                sample++;
+            }
+            int first = sample;
+            while (sample < samples.size() && samples.value(sample) < to) {
+                sample++;
+            }
+            if (first == sample && from < to) {
+                double[] margin = new double[1];
+                asker.ask(new double[] {from + (to - from) / 2}, margin, 0);
+                if (margin[0] > 0) {
+                    stretches.add(new Stretch(plane, from, to, lower, upper));
+                }
+            } else if (first < sample) {
+                runs(new Stretch(plane, from, to, lower, upper), samples, first, sample, margins, stretches);
+            }
+        }
+        return stretches;
+    }
+
+    /** The runs of stable samples between two edges: one, but where there is no layout in between. */
+    private static void runs(
+            Stretch between, Axis samples, int first, int end, double[] margins, List<Stretch> stretches) {
+        for (int i = first; i < end; i++) {
+            if (!(margins[i] > 0)) {
+                continue;
+            }
+            int begin = i;
+            while (i + 1 < end && margins[i + 1] > 0) {
+                i++;
+            }
+            boolean fromEdge = begin == first;
+            boolean toEdge = i == end - 1;
+            stretches.add(new Stretch(
+                    between.plane(),
+                    fromEdge ? between.from() : samples.value(begin),
+                    toEdge ? between.to() : samples.value(i),
+                    fromEdge ? between.lower() : Optional.empty(),
+                    toEdge ? between.upper() : Optional.empty()));
+        }
     }
 }

@@ -5,9 +5,12 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
@@ -76,19 +79,50 @@ class DocsTest {
 
     @ParameterizedTest
     @MethodSource("commands")
-    void everyCommandShownRuns(String command) {
+    void everyCommandShownRunsAndMakesThePictureShown(String command) throws IOException {
         List<String> arguments = words(command);
         arguments.remove(0);
-        for (String option : List.of("--write", "--to")) {
+        Map<Path, Path> shown = new HashMap<>();
+        for (String option : List.of("--write", "--to", "--picture")) {
             int at = arguments.indexOf(option) + 1;
             if (at > 0) {
-                Path name = Path.of(arguments.get(at)).getFileName();
-                arguments.set(at, folder.resolve(name.toString()).toString());
+                Path written = Path.of(arguments.get(at));
+                Path here = folder.resolve(written.getFileName().toString());
+                arguments.set(at, here.toString());
+                if (written.startsWith("docs")) {
+                    shown.put(written, here);
+                }
             }
         }
         Run run = Run.of(arguments.toArray(String[]::new));
         assertThat(run.status()).as(run.err()).isZero();
         assertThat(run.out()).isNotEmpty();
+        for (Map.Entry<Path, Path> picture : shown.entrySet()) {
+            if ("update".equals(System.getProperty("twofold.golden"))) {
+                Files.copy(picture.getValue(), picture.getKey(), StandardCopyOption.REPLACE_EXISTING);
+            }
+            assertThat(picture.getValue())
+                    .as(
+                            "%s is another picture than `%s` makes; -Dtwofold.golden=update writes it anew",
+                            picture.getKey(), command)
+                    .hasSameBinaryContentAs(picture.getKey());
+        }
+    }
+
+    @Test
+    void everyPictureShownIsThere() throws IOException {
+        List<String> pictures = new ArrayList<>();
+        for (Path page : pages()) {
+            Matcher shown = Pattern.compile("!\\[([^]]*)]\\(([^)]*)\\)").matcher(Files.readString(page));
+            while (shown.find()) {
+                assertThat(shown.group(1))
+                        .as("what %s shows, in words", shown.group(2))
+                        .isNotBlank();
+                assertThat(page.resolveSibling(shown.group(2))).isNotEmptyFile();
+                pictures.add(shown.group(2));
+            }
+        }
+        assertThat(pictures).hasSizeGreaterThan(4);
     }
 
     /** As a shell parts a line: at spaces outside double quotes. */

@@ -78,4 +78,22 @@ class ContoursTest {
         assertThat(of(5, 5, (x, y) -> x).at(99)).isEmpty();
         assertThat(of(1, 1, (x, y) -> x).at(0)).isEmpty();
     }
+
+    @Test
+    void bandsHaveLinesOfTheirOwnAndOneOutline() {
+        double[] xs = Plots.steps(-10, 10, 21);
+        // Two bands, each 10 px high, whose values differ by 4 px.
+        double[] ys = {0, 10 - 1e-6, 10 + 1e-6, 20};
+        double[] values = new double[xs.length * ys.length];
+        for (int i = 0; i < values.length; i++) {
+            values[i] = xs[i % xs.length] + (i / xs.length < 2 ? 0 : 4);
+        }
+        Contours contours = new Contours(xs, ys, values);
+        List<Points> lines = contours.at(0.5);
+        assertThat(lines).hasSize(2);
+        for (Points line : lines) {
+            assertThat(line.x(0)).isEqualTo(line.x(1), within(1e-12));
+        }
+        assertThat(contours.outline(0.5)).hasSize(1);
+    }
 }

@@ -15,8 +15,8 @@ import twofold.optics.Plane;
 class MapDrawingTest {
     private static MapPlot plain(double[] xs, double[] ys, double... values) {
         return new MapPlot(
-                new MapPlot.Axis("gap", "mm", Column.of(xs)),
-                new MapPlot.Axis("angle", "°", Column.of(ys)),
+                new MapPlot.Axis("gap", "mm", Column.of(xs), false),
+                new MapPlot.Axis("angle", "°", Column.of(ys), false),
                 "radius",
                 "µm",
                 Column.of(values),
@@ -116,8 +116,8 @@ class MapDrawingTest {
             margins[i] = 3 - Math.hypot(axis[i % 41], axis[i / 41]);
         }
         MapPlot plot = new MapPlot(
-                new MapPlot.Axis("a", "mm", Column.of(axis)),
-                new MapPlot.Axis("b", "mm", Column.of(axis)),
+                new MapPlot.Axis("a", "mm", Column.of(axis), false),
+                new MapPlot.Axis("b", "mm", Column.of(axis), false),
                 "q",
                 "",
                 new Column(margins.length, i -> axis[i % 41]),
@@ -179,8 +179,8 @@ class MapDrawingTest {
     void aMapOfMoreCellsThanCanBeSeenIsThinned() {
         int side = 3000;
         MapPlot plot = new MapPlot(
-                new MapPlot.Axis("a", "mm", new Column(side, i -> i)),
-                new MapPlot.Axis("b", "mm", new Column(side, i -> i)),
+                new MapPlot.Axis("a", "mm", new Column(side, i -> i), false),
+                new MapPlot.Axis("b", "mm", new Column(side, i -> i), false),
                 "q",
                 "",
                 new Column(side * side, i -> i % side),
@@ -205,5 +205,66 @@ class MapDrawingTest {
                 .hasMessageContaining("a grid of 3 numbers; accepted: 4");
         assertThatThrownBy(() -> plain(new double[] {1, 1}, new double[] {1}, 1, 2))
                 .hasMessageContaining("ascending");
+    }
+
+    /** A list of values 1, 2 and 4 upwards, over 0 to 10 to the right; all holds from 5 on, but in the middle band. */
+    private static MapPlot listed(double whereMet) {
+        double[] xs = Plots.steps(0, 10, 11);
+        double[] margins = new double[33];
+        for (int i = 0; i < margins.length; i++) {
+            margins[i] = i / 11 == 1 ? -1 : xs[i % 11] - whereMet;
+        }
+        return new MapPlot(
+                new MapPlot.Axis("gap", "mm", Column.of(xs), false),
+                new MapPlot.Axis("radius", "mm", Column.of(1, 2, 4), true),
+                "q",
+                "",
+                new Column(33, i -> i % 11),
+                Optional.empty(),
+                Optional.empty(),
+                Optional.of(Column.of(margins)),
+                Optional.empty());
+    }
+
+    @Test
+    void aListsBandsAreOutlinedAlongTheirBorders() {
+        MapDrawing drawing = new MapDrawing(listed(5));
+        Recorder recorder = new Recorder();
+        drawing.draw(recorder, 700, 600);
+        List<Recorder.Thing> outlines = recorder.lines(Ink.TEXT, Dash.SOLID).stream()
+                .filter(l -> l.stroke().width() == 2.6 && l.points().size() > 4)
+                .toList();
+        // The lowest band reaches to 1.5 and the highest begins at 3: half way to their neighbours.
+        assertThat(outlines).hasSize(2);
+        for (Recorder.Thing outline : outlines) {
+            for (Recorder.Spot spot : outline.points()) {
+                MapPlot.Place p = drawing.pointAt(spot.x(), spot.y(), 700, 600).orElseThrow();
+                // The borders lie a millionth of a band inside.
+                boolean onBorder = Math.abs(p.y() - 1.5) < 1e-4 || Math.abs(p.y() - 3) < 1e-4;
+                boolean onEdge = Math.abs(p.x() - 5) < 1e-9;
+                assertThat(onBorder || onEdge).as("%s", p).isTrue();
+            }
+        }
+    }
+
+    @Test
+    void wordsTellWhereNoOutlineCan() {
+        Recorder nowhere = new Recorder();
+        new MapDrawing(listed(11)).draw(nowhere, 700, 600);
+        assertThat(nowhere.texts()).contains("all requirements hold: nowhere here");
+        MapPlot met = listed(5);
+        Recorder everywhere = new Recorder();
+        new MapDrawing(new MapPlot(
+                        met.x(),
+                        met.y(),
+                        "q",
+                        "",
+                        met.values(),
+                        Optional.empty(),
+                        Optional.empty(),
+                        Optional.of(new Column(33, i -> 0)),
+                        Optional.empty()))
+                .draw(everywhere, 700, 600);
+        assertThat(everywhere.texts()).contains("all requirements hold: everywhere here");
     }
 }

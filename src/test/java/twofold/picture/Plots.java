@@ -77,6 +77,7 @@ final class Plots {
         List<SweepPlot.Line> lines = new ArrayList<>();
         for (Plane plane : Plane.values()) {
             lines.add(new SweepPlot.Line(
+                    "radius",
                     "radius@End A:" + plane.word(),
                     "µm",
                     Optional.of(plane),
@@ -85,6 +86,7 @@ final class Plots {
                     plane == Plane.TANGENTIAL ? OptionalDouble.of(700) : OptionalDouble.empty()));
         }
         lines.add(new SweepPlot.Line(
+                "",
                 "roundness@End A",
                 "",
                 Optional.empty(),
@@ -130,8 +132,8 @@ final class Plots {
             margins[i] = both ? (roundness(gap, angle) - 0.9) / 0.9 : Double.NaN;
         }
         return new MapPlot(
-                new MapPlot.Axis("gap", "mm", Column.of(gaps)),
-                new MapPlot.Axis("fold angle", "°", Column.of(angles)),
+                new MapPlot.Axis("gap", "mm", Column.of(gaps), false),
+                new MapPlot.Axis("fold angle", "°", Column.of(angles), false),
                 "radius@End A:tangential",
                 "µm",
                 Column.of(radii),

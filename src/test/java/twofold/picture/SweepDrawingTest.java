@@ -125,6 +125,16 @@ class SweepDrawingTest {
         assertThatThrownBy(() -> new SweepPlot(
                         "gap", "mm", Column.of(1, 2), List.of(line("mm", 1)), List.of(), OptionalDouble.empty()))
                 .hasMessageContaining("1 values for 2 of gap");
+        SweepPlot.Line stray = new SweepPlot.Line(
+                "mm", "q", "µm", Optional.empty(), Column.of(1, 2), OptionalDouble.empty(), OptionalDouble.empty());
+        assertThatThrownBy(() -> new SweepPlot(
+                        "gap",
+                        "mm",
+                        Column.of(1, 2),
+                        List.of(line("mm", 1, 2), stray),
+                        List.of(),
+                        OptionalDouble.empty()))
+                .hasMessageContaining("q is in µm on a panel in mm");
         assertThatThrownBy(
                         () -> new SweepPlot("gap", "mm", Column.of(2, 1), List.of(), List.of(), OptionalDouble.empty()))
                 .hasMessageContaining("ascending");
