@@ -42,10 +42,28 @@ public final class DesignWriter {
 
     /** A design as the text of a file. */
     public static String text(Design design) {
+        return text(w -> w.design(design));
+    }
+
+    /** Parts as a text: an object with the same list of parts as a design. */
+    static String text(List<Part> parts) {
+        return text(w -> {
+            w.json.writeStartObject();
+            w.parts(parts);
+            w.json.writeEndObject();
+        });
+    }
+
+    /** Something that a writer writes. */
+    private interface Content {
+        void on(DesignWriter writer) throws IOException;
+    }
+
+    private static String text(Content content) {
         StringWriter text = new StringWriter();
         try (JsonGenerator json = FACTORY.createGenerator(text)) {
             json.setPrettyPrinter(new ElementALine());
-            new DesignWriter(json).design(design);
+            content.on(new DesignWriter(json));
         } catch (IOException e) {
             throw new UncheckedIOException("writing to memory failed", e);
         }
@@ -64,16 +82,20 @@ public final class DesignWriter {
         words("notes", design.notes());
         number("wavelength_nm", Unit.NM, design.wavelength());
         json.writeStringField("shape", design.shape().word());
-        json.writeArrayFieldStart("parts");
-        for (Part part : design.parts()) {
-            part(part);
-        }
-        json.writeEndArray();
+        parts(design.parts());
         list("holds", design.holds(), this::hold);
         list("levers", design.levers(), this::lever);
         list("requirements", design.requirements(), this::requirement);
         list("tolerances", design.tolerances(), this::tolerance);
         json.writeEndObject();
+    }
+
+    private void parts(List<Part> parts) throws IOException {
+        json.writeArrayFieldStart("parts");
+        for (Part part : parts) {
+            part(part);
+        }
+        json.writeEndArray();
     }
 
     private void words(String key, String text) throws IOException {

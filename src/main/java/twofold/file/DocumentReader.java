@@ -131,6 +131,11 @@ final class DocumentReader {
                 .orElse("");
     }
 
+    /** The parts of an object that has a list of them. */
+    static List<PartReader.Draft> parts(Members members, Faults faults) {
+        return new DocumentReader(faults).parts(members);
+    }
+
     private List<PartReader.Draft> parts(Members members) {
         Subject where = Subject.DOCUMENT.at("parts");
         Optional<Json> value = members.need("parts", "a list of parts");

@@ -21,7 +21,7 @@ import twofold.layout.Typed;
  * which mirrors lack a position.
  */
 final class TypingForm {
-    private static final List<Field> FIELDS = List.of(Field.LEG, Field.INCIDENCE, Field.TURN, Field.HEADING);
+    static final List<Field> FIELDS = List.of(Field.LEG, Field.INCIDENCE, Field.TURN, Field.HEADING);
     private static final String AT = Field.AT.json();
 
     private final List<PartReader.Draft> drafts;

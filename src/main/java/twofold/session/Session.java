@@ -1,6 +1,5 @@
 package twofold.session;
 
-import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -17,12 +16,14 @@ import twofold.design.Subject;
 import twofold.edit.Edit;
 import twofold.file.DesignReader;
 import twofold.file.Fingerprint;
-import twofold.file.ReadDesign;
+import twofold.file.Journal;
+import twofold.file.JournalEntry;
+import twofold.file.Located;
 import twofold.file.SafeFile;
+import twofold.file.UnsavedWork;
 import twofold.layout.Laid;
 import twofold.layout.Layout;
 import twofold.layout.Outcome;
-import twofold.study.WorstOver;
 
 /**
  * One open document: opened or made, edited with undo and redo, saved. Confined to the thread that made it; the listener
@@ -37,6 +38,7 @@ public final class Session {
     private final Consumer<Shown> listener;
     private final Newest<Cavity, Cavity> judge;
     private final Saver saver;
+    private final Optional<Keeper> keeper;
     private Shown shown = Shown.NOTHING;
     private Optional<Document> document = Optional.empty();
     private Optional<Preview> preview = Optional.empty();
@@ -54,16 +56,33 @@ public final class Session {
     private record Preview(Edit edit, Cavity cavity, Optional<Selection> home) {}
 
     /**
-     * Makes a session with nothing open.
+     * Makes a session with nothing open and no journal.
      *
      * @param runner for reading, writing and judging
      * @param listener told of every change
      */
     public Session(Runner runner, Consumer<Shown> listener) {
+        this(runner, Optional.empty(), runner, listener);
+    }
+
+    /**
+     * Makes a session with nothing open that keeps a journal of unsaved work.
+     *
+     * @param runner for reading, writing and judging
+     * @param journal empty, and this session's alone
+     * @param scribe for the journal, on another thread than the runner's, so that no other work keeps it waiting
+     * @param listener told of every change
+     */
+    public Session(Runner runner, Journal journal, Runner scribe, Consumer<Shown> listener) {
+        this(runner, Optional.of(journal), scribe, listener);
+    }
+
+    private Session(Runner runner, Optional<Journal> journal, Runner scribe, Consumer<Shown> listener) {
         this.runner = runner;
         this.listener = listener;
-        this.judge = new Newest<>(runner, c -> c.judgedOver(new WorstOver(c.laid())), this::judged);
+        this.judge = new Newest<>(runner, Opened::judged, this::judged);
         this.saver = new Saver(runner);
+        this.keeper = journal.map(j -> new Keeper(scribe, j, this::say));
     }
 
     /** What is shown now. */
@@ -111,50 +130,29 @@ public final class Session {
 
     // Opening
 
-    /** What reading a source came to. */
-    private record Opened(Fingerprint print, ReadDesign read, Optional<Cavity> cavity) {}
-
-    /** Where a document's bytes come from. */
-    private interface Bytes {
-        byte[] read() throws IOException;
-    }
-
     /**
      * Opens a file. Where it is bad, the open document stays as it is, and the file's problems are shown beside it. The
      * document's own file, opened again, is one step of its history.
      */
     public void open(Path file) {
-        open(Source.of(file), () -> SafeFile.read(file, DesignReader.MOST_BYTES + 1));
+        open(Source.of(file));
     }
 
     /** Opens a sample carried in the program; it can be saved in another file only. */
     public void openSample(String name) {
-        open(Source.sample(name), () -> Samples.bytes(name));
+        open(Source.sample(name));
     }
 
     /** Opens; a newer request makes an older one's answer void. */
-    private void open(Source source, Bytes bytes) {
+    private void open(Source source) {
         int mine = ++newest;
         Optional<Design> asked = document.map(d -> d.history().now());
-        runner.run(
-                () -> {
-                    byte[] all = bytes.read();
-                    ReadDesign read = DesignReader.read(all);
-                    return new Opened(Fingerprint.of(all), read, read.design().map(d -> judgedWhole(Document.lay(d))));
-                },
-                ended -> {
-                    if (mine == newest) {
-                        opened(
-                                source,
-                                ended,
-                                asked.equals(document.map(d -> d.history().now())));
-                        settle();
-                    }
-                });
-    }
-
-    private static Cavity judgedWhole(Laid laid) {
-        return Cavity.solve(laid).judgedOver(new WorstOver(laid));
+        runner.run(() -> Opened.of(source), ended -> {
+            if (mine == newest) {
+                opened(source, ended, asked.equals(document.map(d -> d.history().now())));
+                settle();
+            }
+        });
     }
 
     private void opened(Source source, Runner.Ended<Opened> ended, boolean isUntouched) {
@@ -179,7 +177,7 @@ public final class Session {
         }
     }
 
-    private void refuse(Source source, List<twofold.file.Located> wrong, Optional<String> why, Set<Fingerprint> bytes) {
+    private void refuse(Source source, List<Located> wrong, Optional<String> why, Set<Fingerprint> bytes) {
         refused = Optional.of(new Refused(source, wrong, why));
         refusedBytes = bytes;
     }
@@ -237,12 +235,7 @@ public final class Session {
 
     /** Reads again what was last asked for. */
     public void reload() {
-        shown.attended()
-                .ifPresent(s -> s.file().ifPresentOrElse(this::open, () -> {
-                    if (!s.equals(Source.UNTITLED)) {
-                        openSample(s.name());
-                    }
-                }));
+        shown.attended().filter(s -> !s.equals(Source.UNTITLED)).ifPresent(this::open);
     }
 
     /** Compares the file on disk with what was read or saved; a change is shown, not acted on. */
@@ -386,8 +379,9 @@ public final class Session {
         });
     }
 
-    /** Has judged what is still open, and shows the state. */
+    /** Has the journal kept, has judged what is still open, and shows the state. */
     private void settle() {
+        keeper.ifPresent(k -> k.keep(document));
         cavity().filter(Shown::isPending).ifPresent(judge::ask);
         show();
     }
@@ -448,10 +442,42 @@ public final class Session {
                 trouble = end.why()
                         .map(why -> Source.of(file).name() + " could not be saved: " + why
                                 + ". The design is still open here, unsaved.");
-                show();
+                settle();
             }
             then.accept(end.saving());
         });
+    }
+
+    // After a crash
+
+    /**
+     * Opens work that an earlier run of the program left unsaved, as unsaved as it was. It is deleted where it was left once
+     * this session's own journal holds it.
+     */
+    public void recover(UnsavedWork work) {
+        JournalEntry entry = work.entry();
+        newest++;
+        isChangedOnDisk = false;
+        Source source = entry.file().map(Source::of).orElseGet(() -> new Source(entry.name(), Optional.empty()));
+        begin(source, History.ofUnsaved(entry.design()), Cavity.solve(Document.lay(entry.design())));
+        entry.known().forEach(document.orElseThrow()::mayHold);
+        keeper.ifPresent(k -> k.adopt(work));
+        settle();
+    }
+
+    private void say(String words) {
+        trouble = Optional.of(words);
+        show();
+    }
+
+    /**
+     * Ends the session as the person asked: nothing of it will be offered again, saved or not.
+     *
+     * @param then told once the journal is gone, or cannot be removed
+     */
+    public void close(Runnable then) {
+        newest++;
+        keeper.ifPresentOrElse(k -> k.close(then), then);
     }
 
     // Selecting and pointing

@@ -8,11 +8,17 @@ import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.attribute.FileTime;
 import java.nio.file.attribute.PosixFilePermissions;
+import java.time.Instant;
+import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
 
 class SafeFileTest {
     private static final byte[] OLD = "old".getBytes(StandardCharsets.UTF_8);
@@ -113,7 +119,8 @@ class SafeFileTest {
         Path file = folder.resolve("design.json");
         Files.write(file, OLD);
         for (int i = 0; i < 100; i++) {
-            Files.createFile(folder.resolve(".design.json." + i + ".part"));
+            Files.createFile(
+                    folder.resolve(".design.json." + ProcessHandle.current().pid() + "-" + i + ".part"));
         }
         assertThatThrownBy(() -> SafeFile.write(file, NEW))
                 .isInstanceOf(IOException.class)
@@ -138,5 +145,78 @@ class SafeFileTest {
         assertThatThrownBy(() -> SafeFile.write(full, NEW))
                 .isInstanceOf(IOException.class)
                 .hasMessage("No space left on device");
+    }
+
+    @Test
+    void whatAKilledProgramLeftBesideIsTidiedAway() throws IOException {
+        Path file = folder.resolve("design.json");
+        // No process has the number, for none has one so large.
+        Path dead = Files.createFile(folder.resolve(".design.json.999999999999-0.part"));
+        // Older than this process, which has the number now.
+        Path old = Files.createFile(
+                folder.resolve(".design.json." + ProcessHandle.current().pid() + "-0.part"));
+        Files.setLastModifiedTime(old, FileTime.from(Instant.parse("2001-01-01T00:00:00Z")));
+        Path live = Files.createFile(
+                folder.resolve(".design.json." + ProcessHandle.current().pid() + "-1.part"));
+        Path other = Files.createFile(folder.resolve(".other.json.999999999999-0.part"));
+        SafeFile.write(file, NEW);
+        assertThat(dead).doesNotExist();
+        assertThat(old).doesNotExist();
+        assertThat(inFolder()).containsExactlyInAnyOrder(file, live, other);
+    }
+
+    @ParameterizedTest
+    @EnumSource
+    void whicheverOperationFailsAFileIsWhole(FaultyDisk.Fault fault) throws IOException {
+        Path file = folder.resolve("design.json");
+        Path link = Files.createSymbolicLink(folder.resolve("link"), file);
+        int failed = 0;
+        for (boolean isThere : List.of(true, false)) {
+            for (int operation = 0; ; operation++) {
+                for (Path each : inFolder()) {
+                    if (!each.equals(link)) {
+                        Files.delete(each);
+                    }
+                }
+                if (isThere) {
+                    Files.write(file, OLD);
+                }
+                FaultyDisk disk = new FaultyDisk(operation, fault);
+                Optional<String> said = Optional.empty();
+                try {
+                    SafeFile.write(disk, link, NEW);
+                } catch (IOException e) {
+                    said = Optional.of(e.getMessage());
+                }
+                if (!disk.hasFailed()) {
+                    assertThat(file).hasBinaryContent(NEW);
+                    break;
+                }
+                String what = fault + " at operation " + operation;
+                boolean isNew = Files.exists(file) && Arrays.equals(Files.readAllBytes(file), NEW);
+                if (said.isEmpty()) {
+                    assertThat(isNew).as(what + ", which does not matter").isTrue();
+                } else {
+                    failed++;
+                    assertThat(said.get()).as(what).contains(FaultyDisk.WORDS);
+                    if (!isNew && isThere) {
+                        assertThat(file).as(what).hasBinaryContent(OLD);
+                    } else if (!isNew) {
+                        assertThat(file).as(what).doesNotExist();
+                    } else {
+                        assertThat(fault == FaultyDisk.Fault.AFTER || said.get().startsWith("it was written"))
+                                .as("%s: only what failed once it was in its place may leave it new", what)
+                                .isTrue();
+                    }
+                }
+                if (fault != FaultyDisk.Fault.FROM_HERE_ON && fault != FaultyDisk.Fault.AFTER) {
+                    assertThat(inFolder()).as(what + ": nothing is left beside").isSubsetOf(file, link);
+                }
+                // A disk that works again has the file.
+                SafeFile.write(link, NEW);
+                assertThat(file).hasBinaryContent(NEW);
+            }
+        }
+        assertThat(failed).as("operations that failed the writing").isGreaterThanOrEqualTo(9);
     }
 }
