@@ -145,7 +145,7 @@ final class StartingSearch {
     private StableStretches along(Laid laid) {
         return shape == StartingShape.TRIANGLE
                 ? StableStretches.alongLever(laid, height(), SAMPLES)
-                : StableStretches.alongLeg(run(laid), plan.gapLeg());
+                : StableStretches.alongLeg(laid, plan.gapLeg());
     }
 
     /** A triangle's apex of radius R closes round trips up to 2R, to first order, so its height stays below R. */

@@ -6,12 +6,19 @@ import java.util.List;
 import java.util.TreeSet;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
+import twofold.cavity.Chain;
 import twofold.cavity.Reading;
 import twofold.cavity.Trial;
+import twofold.cavity.ZoneEdge;
 import twofold.cavity.Zones;
+import twofold.design.Along;
+import twofold.design.Field;
 import twofold.design.Lever;
 import twofold.design.Unit;
 import twofold.layout.Laid;
+import twofold.layout.Leg;
+import twofold.layout.Standing;
 import twofold.optics.Plane;
 
 /**
@@ -48,32 +55,56 @@ public record StableStretches(
     }
 
     /**
-     * Along the path of a leg in the chain alone, see {@link Zones}; from what its parts take. A zone without an upper edge
+     * Along the path of a leg in the chain alone, see {@link Zones}, as far as its parts fit it. A zone without an upper edge
      * counts up to twice the path of now, or to twice its lower edge if that is further.
      *
-     * @param trial that has run
      * @param leg its number
      */
-    public static StableStretches alongLeg(Trial trial, int leg) {
+    public static StableStretches alongLeg(Laid laid, int leg) {
+        Trial trial = Chain.of(laid).trial();
+        trial.run();
         Zones tangential = Zones.of(trial, leg, Plane.TANGENTIAL);
         Zones sagittal = Zones.of(trial, leg, Plane.SAGITTAL);
-        List<Stretch> t = reachable(tangential);
-        List<Stretch> s = reachable(sagittal);
-        double most = java.util.stream.Stream.concat(t.stream(), s.stream())
-                .mapToDouble(Stretch::to)
+        Stretch fits = fits(laid, laid.legs().get(leg));
+        double far = Stream.of(tangential, sagittal)
+                .flatMap(z -> z.edges().stream())
+                .mapToDouble(ZoneEdge::path)
                 .max()
                 .orElse(0);
-        Stretch range = new Stretch(tangential.least(), Math.max(most, 2 * tangential.path()));
-        return of(Unit.MM, range, t, s);
+        Stretch range = new Stretch(fits.from(), Math.min(fits.to(), 2 * Math.max(far, tangential.path())));
+        return of(Unit.MM, range, within(range, tangential), within(range, sagittal));
     }
 
-    private static List<Stretch> reachable(Zones zones) {
+    private static List<Stretch> within(Stretch range, Zones zones) {
         return zones.zones().stream()
-                .map(z -> new Stretch(
-                        Math.max(z.from(), zones.least()),
-                        z.upper().isPresent() ? z.to() : Math.max(2 * zones.path(), 2 * z.from())))
+                .map(z -> new Stretch(Math.max(z.from(), range.from()), Math.min(z.to(), range.to())))
                 .filter(s -> s.from() < s.to())
                 .toList();
+    }
+
+    /** The paths of a leg at which its parts fit it: they keep their place from the mirror before, or stay in the middle. */
+    private static Stretch fits(Laid laid, Leg leg) {
+        double least = 0;
+        double most = Double.POSITIVE_INFINITY;
+        double before = 0;
+        double insideInMiddle = -1;
+        for (Standing s : leg.parts()) {
+            Object along = laid.design()
+                    .parts()
+                    .get(s.part())
+                    .values()
+                    .find(Field.ALONG)
+                    .orElseThrow();
+            if (((Along) along).inMiddle()) {
+                least = Math.max(least, 2 * before + s.length());
+                insideInMiddle = s.length();
+            } else {
+                least = Math.max(least, s.end());
+                most = insideInMiddle >= 0 ? Math.min(most, 2 * s.start() - insideInMiddle) : most;
+                before = s.end();
+            }
+        }
+        return new Stretch(least, most);
     }
 
     /**
