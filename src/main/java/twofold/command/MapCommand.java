@@ -130,8 +130,8 @@ final class MapCommand implements Callable<Integer> {
                 .map(mapped -> {
                     MapDrawing drawing = new MapDrawing(MapPlot.of(mapped));
                     Pictures.Size size = wanted.size();
-                    String title = question.laid().design().title() + ", " + mapped.quantity().words() + " over " + levers.get(0)
-                            + " and " + levers.get(1);
+                    String title = question.laid().design().title() + ", "
+                            + mapped.quantity().words() + " over " + levers.get(0) + " and " + levers.get(1);
                     return new Pictures(
                                     size.width(),
                                     size.height(),

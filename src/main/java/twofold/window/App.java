@@ -1,5 +1,6 @@
 package twofold.window;
 
+import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import javafx.animation.Animation;
@@ -11,7 +12,10 @@ import javafx.scene.Scene;
 import javafx.stage.Screen;
 import javafx.stage.Stage;
 import javafx.util.Duration;
+import twofold.file.Folders;
+import twofold.file.Journal;
 import twofold.file.Settings;
+import twofold.file.UnsavedWork;
 import twofold.picture.Theme;
 
 /** The one window with the editor, on a file or on the first sample. */
@@ -30,9 +34,15 @@ final class App {
         Stage stage = new Stage();
         Recall recall = new Recall(Settings.usualFile(System.getenv(), System.getProperty("user.home")));
         Background background = new Background();
-        Editor editor = new Editor(background);
-        show(stage, editor, recall, new Dialogs(stage));
-        stage.showingProperty().addListener((o, was, is) -> background.close());
+        Background scribe = new Background();
+        Path journals = Folders.state(System.getenv(), System.getProperty("user.home"), System.getProperty("os.name"))
+                .resolve("journals");
+        Editor editor = new Editor(background, new Journal(journals), scribe);
+        show(stage, editor, recall, new Dialogs(stage), journals);
+        stage.showingProperty().addListener((o, was, is) -> {
+            background.close();
+            scribe.close();
+        });
         if (arguments.isEmpty()) {
             editor.session().openSample(FIRST_SAMPLE);
         } else {
@@ -41,8 +51,8 @@ final class App {
         return stage;
     }
 
-    /** Puts an editor into a window as it was last left. */
-    static void show(Stage stage, Editor editor, Recall recall, Asks asks) {
+    /** Puts an editor into a window as it was last left, and offers what an earlier run left unsaved in a folder. */
+    static void show(Stage stage, Editor editor, Recall recall, Asks asks, Path journals) {
         Settings settings = recall.settings();
         editor.setTheme(settings.isDark() ? Theme.DARK : Theme.LIGHT);
         Documents documents = new Documents(editor.session(), asks);
@@ -50,7 +60,7 @@ final class App {
         editor.onDropped(documents::open);
         stage.setOnCloseRequest(e -> {
             e.consume();
-            documents.leave(stage::hide);
+            documents.close(stage::hide);
         });
         editor.setBars(bars.menus(), bars.toolbar());
         editor.onTitle(stage::setTitle);
@@ -68,11 +78,24 @@ final class App {
         stage.setOnHiding(e -> recall.change(s -> s.sized(
                 editor.getScene().getWidth(), editor.getScene().getHeight(), stage.isMaximized(), editor.dividers())));
         stage.show();
+        offer(editor, documents, journals);
         // Dividers have their places once the window has its size.
         Platform.runLater(() -> editor.setDividers(settings.splits()));
         Timeline look = new Timeline(new KeyFrame(LOOK, e -> editor.session().look()));
         look.setCycleCount(Animation.INDEFINITE);
         look.play();
-        stage.showingProperty().addListener((o, was, is) -> look.stop());
+        stage.showingProperty().addListener((o, was, is) -> {
+            look.stop();
+            editor.recovery().close();
+        });
+    }
+
+    private static void offer(Editor editor, Documents documents, Path journals) {
+        Recovery recovery = editor.recovery();
+        try {
+            recovery.offer(UnsavedWork.in(journals), work -> documents.recover(work, recovery::opened), editor::say);
+        } catch (IOException e) {
+            editor.say("What was left unsaved cannot be looked for: " + e.getMessage());
+        }
     }
 }

@@ -77,6 +77,7 @@ final class Bars {
                 edits.undo().button("Undo", editor::say),
                 edits.redo().button("Redo", editor::say),
                 place,
+                edits.nearestStable().button("Nearest stable place", editor::say),
                 showAll.button("Show all", editor::say),
                 width,
                 sample,
@@ -138,7 +139,7 @@ final class Bars {
                         "Quit",
                         "Shortcut+Q",
                         "Closes the window",
-                        () -> documents.leave(() -> window().hide())))));
+                        () -> documents.close(() -> window().hide())))));
         Action.refresh(file);
         recent.setOnShowing(e -> fillRecent());
         fillRecent();
@@ -181,6 +182,7 @@ final class Bars {
     private Menu plan() {
         Menu follows = new Menu("What _follows");
         Menu plan = new Menu("P_lan");
+        plan.getItems().add(edits.nearestStable().item(editor::say));
         plan.getItems().add(follows);
         Action.refresh(plan);
         follows.getItems().setAll(follows());

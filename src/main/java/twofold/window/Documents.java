@@ -5,6 +5,7 @@ import java.nio.file.Path;
 import java.util.Optional;
 import java.util.function.Consumer;
 import twofold.design.Design;
+import twofold.file.UnsavedWork;
 import twofold.session.Saving;
 import twofold.session.Session;
 import twofold.session.Shown;
@@ -48,6 +49,19 @@ final class Documents {
     /** Opens a sample. */
     void openSample(String name) {
         leave(() -> session.openSample(name));
+    }
+
+    /** Opens what an earlier run left unsaved. */
+    void recover(UnsavedWork work, Consumer<UnsavedWork> opened) {
+        leave(() -> {
+            session.recover(work);
+            opened.accept(work);
+        });
+    }
+
+    /** Ends the session as the person asked. */
+    void close(Runnable then) {
+        leave(() -> session.close(then));
     }
 
     /** Begins a new design. */

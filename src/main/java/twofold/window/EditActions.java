@@ -9,6 +9,7 @@ import twofold.design.Kind;
 import twofold.design.Part;
 import twofold.design.Problem;
 import twofold.edit.Edit;
+import twofold.edit.NearestStable;
 import twofold.edit.PartEdits;
 import twofold.layout.Laid;
 import twofold.layout.Outcome;
@@ -22,10 +23,12 @@ final class EditActions {
 
     private final Session session;
     private final Editor editor;
+    private final PartClipboard clipboard;
 
     EditActions(Editor editor) {
         this.editor = editor;
         this.session = editor.session();
+        this.clipboard = new PartClipboard(session);
     }
 
     Action undo() {
@@ -47,6 +50,22 @@ final class EditActions {
 
     List<Action> parts() {
         return List.of(
+                Action.of(
+                                "cut",
+                                "Cut",
+                                "Shortcut+X",
+                                "Takes the selected parts off the beam, to paste them",
+                                clipboard::cut)
+                        .unless(() -> whyNot(PartEdits::delete)),
+                Action.of("copy", "Copy", "Shortcut+C", "Copies the selected parts as text", clipboard::copy)
+                        .unless(this::selectedNone),
+                Action.of(
+                                "paste",
+                                "Paste",
+                                "Shortcut+V",
+                                "Places copied parts behind the selected one",
+                                () -> editor.pasted(clipboard.paste()))
+                        .unless(this::closed),
                 Action.of(
                                 "duplicate",
                                 "Duplicate",
@@ -79,6 +98,17 @@ final class EditActions {
                         .unless(() -> whyNot(n -> PartEdits.reorder(n, true))),
                 Action.of("select-all", "Select all", "Shortcut+A", "Selects every part", session::selectAll)
                         .unless(this::closed));
+    }
+
+    Action nearestStable() {
+        return Action.of(
+                        "nearest-stable",
+                        "Nearest stable place",
+                        "Shortcut+M",
+                        "Slides the selected part along its leg to the middle of the nearest stretch in which both planes"
+                                + " are stable",
+                        () -> edit(n -> NearestStable.edit(n.get(n.size() - 1))))
+                .unless(this::selectedNone);
     }
 
     /** Placing a part of each kind. */

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Consumer;
+import java.util.function.Function;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
@@ -21,6 +22,8 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import twofold.design.Kind;
+import twofold.file.Journal;
+import twofold.file.Located;
 import twofold.picture.Theme;
 import twofold.session.Runner;
 import twofold.session.Session;
@@ -47,13 +50,14 @@ public final class Editor extends BorderPane {
     private final StabilityPane stability = new StabilityPane();
     private final PartPane part = new PartPane();
     private final PartsPane parts;
-    private final ProblemsPane problems = new ProblemsPane();
+    private final ProblemsPane problems;
     private final LedgerPane ledger = new LedgerPane();
     private final ZonesPane zones = new ZonesPane();
     private final RequirementsPane requirements = new RequirementsPane();
     private final Tab asked = new Tab("Requirements", requirements);
     private final TabPane lists;
     private final Notice notice;
+    private final Recovery recovery = new Recovery();
     private final Label said = new Label();
     private final Label facts = new Label();
     private final SplitPane pictures;
@@ -68,7 +72,17 @@ public final class Editor extends BorderPane {
 
     /** Makes the editor with nothing open. */
     public Editor(Runner runner) {
-        session = new Session(runner, this::show);
+        this(listener -> new Session(runner, listener));
+    }
+
+    /** Makes the editor with nothing open, which keeps a journal of unsaved work. */
+    Editor(Runner runner, Journal journal, Runner scribe) {
+        this(listener -> new Session(runner, journal, scribe, listener));
+    }
+
+    private Editor(Function<Consumer<Shown>, Session> sessions) {
+        session = sessions.apply(this::show);
+        problems = new ProblemsPane(session::dismiss);
         following = new Following(session);
         bench = new BenchPane(session, following);
         open = session::open;
@@ -101,7 +115,7 @@ public final class Editor extends BorderPane {
         whole = split(Orientation.HORIZONTAL, pictures, side);
         SplitPane.setResizableWithParent(side, false);
         setCenter(whole);
-        setTop(new VBox(notice));
+        setTop(new VBox(recovery, notice));
         setBottom(status());
         addEventFilter(KeyEvent.KEY_PRESSED, this::paneKey);
         addEventHandler(DragEvent.DRAG_OVER, this::dragged);
@@ -152,6 +166,16 @@ public final class Editor extends BorderPane {
         said.setText(words);
     }
 
+    /** Says what is wrong with a text that was to be pasted. */
+    void pasted(List<Located> wrong) {
+        problems.pasted(wrong);
+    }
+
+    /** What an earlier run left unsaved. */
+    Recovery recovery() {
+        return recovery;
+    }
+
     /** Hangs a new part at the pointer on the bench. */
     void place(Kind kind) {
         bench.place(kind);
@@ -165,7 +189,7 @@ public final class Editor extends BorderPane {
 
     /** Puts menus and a toolbar on top. */
     void setBars(Node menus, Node toolbar) {
-        setTop(new VBox(menus, toolbar, notice));
+        setTop(new VBox(menus, toolbar, recovery, notice));
     }
 
     /** Is told what the window's title should be. */

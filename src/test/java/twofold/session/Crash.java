@@ -8,8 +8,8 @@ import twofold.file.DesignWriter;
 import twofold.file.Journal;
 
 /** A program that edits a sample and does not end by itself: for tests that kill it. */
-final class Crash {
-    static final String SAMPLE = "z-fold-rod";
+public final class Crash {
+    public static final String SAMPLE = "z-fold-rod";
 
     private Crash() {}
 
@@ -38,7 +38,7 @@ final class Crash {
     }
 
     /** The bytes of the sample after some edits. */
-    static byte[] after(int edits) {
+    public static byte[] after(int edits) {
         Session session = new Session(Runner.onTheSpot(), shown -> {});
         session.create(Samples.design(SAMPLE));
         for (int n = 1; n <= edits; n++) {

@@ -6,22 +6,30 @@ import static org.assertj.core.api.Assertions.within;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
+import javafx.scene.Parent;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListView;
 import javafx.scene.control.TextField;
+import javafx.scene.input.Clipboard;
+import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
+import javafx.stage.WindowEvent;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import twofold.Child;
 import twofold.design.Design;
 import twofold.design.Mirror;
 import twofold.design.Point;
 import twofold.file.DesignReader;
+import twofold.file.DesignWriter;
 import twofold.layout.Laid;
 import twofold.picture.BenchView;
+import twofold.session.Crash;
 import twofold.session.Shown;
 import twofold.window.bench.BenchPane;
 
@@ -276,5 +284,120 @@ class EditingWindowTest {
         answers.unsaved = Asks.Unsaved.DISCARD;
         stage.press(KeyCode.CONTROL, KeyCode.O);
         assertThat(design()).isNotEqualTo(mine);
+    }
+
+    @Test
+    void partsAreCutAndPastedAsText() throws Exception {
+        select("Rod");
+        stage.press(KeyCode.CONTROL, KeyCode.X);
+        assertThat(design().indexOf("Rod")).isEmpty();
+        String text = Stagehand.fx(() -> Clipboard.getSystemClipboard().getString());
+        assertThat(text).contains("\"kind\": \"crystal\"");
+        select("End A");
+        stage.press(KeyCode.CONTROL, KeyCode.V);
+        assertThat(design().parts().get(1).name()).isEqualTo("Rod");
+        stage.press(KeyCode.CONTROL, KeyCode.Z);
+        stage.press(KeyCode.CONTROL, KeyCode.Z);
+        assertThat(design().parts().get(2).name()).isEqualTo("Rod");
+    }
+
+    @Test
+    void aBrokenPartIsNotPastedAndSaysWhere() throws Exception {
+        Design before = design();
+        Stagehand.fx(() -> {
+            ClipboardContent content = new ClipboardContent();
+            content.putString(
+                    "{ \"parts\": [\n  { \"name\": \"L\", \"kind\": \"lens\", \"along_mm\": 5, \"focal_lenght_mm\": 3 } ] }");
+            return Clipboard.getSystemClipboard().setContent(content);
+        });
+        select("End A");
+        stage.press(KeyCode.CONTROL, KeyCode.V);
+        assertThat(design()).isEqualTo(before);
+        ListView<?> problems = stage.node("problems", ListView.class);
+        assertThat(problems.isVisible()).isTrue();
+        assertThat(problems.getItems().toString())
+                .contains("line 2")
+                .contains("focal_lenght_mm")
+                .contains("nearest is \"focal_length_mm\"");
+        stage.picture("broken-paste-light");
+        Button dismiss = stage.node("dismiss", Button.class);
+        stage.click(dismiss, 10, 10);
+        assertThat(problems.getParent().isVisible()).isFalse();
+    }
+
+    @Test
+    void aMirrorGoesToTheNearestStablePlace() throws Exception {
+        select("Fold 2");
+        for (int i = 0; i < 4; i++) {
+            stage.press(KeyCode.SHIFT, KeyCode.RIGHT);
+        }
+        assertThat(stage.node("said", Label.class).getText()).startsWith("Neither plane is stable");
+        stage.press(KeyCode.CONTROL, KeyCode.M);
+        assertThat(stage.node("said", Label.class).getText()).startsWith("Both planes are stable");
+        assertThat(shown().undo()).contains("move Fold 2 to the nearest stable place");
+    }
+
+    @Test
+    void workLeftByAKilledProgramIsOfferedAndOpened() throws Exception {
+        Path journals = folder.resolve("crash").resolve("journals");
+        try (Child child = Child.start(Crash.class, journals.toString(), "20")) {
+            String line = child.line();
+            while (line != null && !line.equals("20")) {
+                line = child.line();
+            }
+            child.kill();
+        }
+        stage.close();
+        stage = Stagehand.open(folder.resolve("crash").resolve("settings.json"), 1280, 800, answers);
+        stage.openSample(SAMPLE);
+        Parent offered = stage.node("recovery", Parent.class);
+        assertThat(offered.isVisible()).isTrue();
+        stage.picture("recovery-light");
+        Button open = (Button) offered.lookup(".button");
+        stage.click(open, 10, 10);
+        assertThat(DesignWriter.bytes(design())).isEqualTo(Crash.after(20));
+        assertThat(shown().isUnsaved()).isTrue();
+        assertThat(offered.isVisible()).isFalse();
+    }
+
+    @Test
+    void aBrokenFileLeavesTheEditedDesignAsItIs() throws Exception {
+        select("Fold 2");
+        stage.press(KeyCode.RIGHT);
+        Design mine = design();
+        Path bad = folder.resolve("bad.json");
+        Files.writeString(bad, Files.readString(Path.of("samples", SAMPLE)).replace("roc_mm", "rock_mm"));
+        answers.open = Optional.of(bad);
+        answers.unsaved = Asks.Unsaved.DISCARD;
+        stage.press(KeyCode.CONTROL, KeyCode.O);
+        assertThat(design()).isEqualTo(mine);
+        assertThat(shown().isUnsaved()).isTrue();
+        assertThat(stage.node("problems", ListView.class).getItems().toString()).contains("rock_mm");
+        stage.picture("broken-beside-light");
+        stage.press(KeyCode.CONTROL, KeyCode.Z);
+        assertThat(shown().isUnsaved()).isFalse();
+    }
+
+    @Test
+    void closingWithUnsavedWorkAsks() throws Exception {
+        select("Fold 2");
+        stage.press(KeyCode.RIGHT);
+        Stagehand.fx(() -> {
+            stage.stage().fireEvent(new WindowEvent(stage.stage(), WindowEvent.WINDOW_CLOSE_REQUEST));
+            return true;
+        });
+        assertThat(answers.asked).isEqualTo(1);
+        assertThat(Stagehand.fx(() -> stage.stage().isShowing())).isTrue();
+        answers.unsaved = Asks.Unsaved.SAVE;
+        answers.save = Optional.of(folder.resolve("kept.json"));
+        Design mine = design();
+        Stagehand.fx(() -> {
+            stage.stage().fireEvent(new WindowEvent(stage.stage(), WindowEvent.WINDOW_CLOSE_REQUEST));
+            return true;
+        });
+        assertThat(Stagehand.fx(() -> stage.stage().isShowing())).isFalse();
+        assertThat(DesignReader.read(Files.readAllBytes(folder.resolve("kept.json")))
+                        .design())
+                .contains(mine);
     }
 }

@@ -48,7 +48,8 @@ class JourneysWindowTest {
                 stage,
                 editor,
                 new Recall(folder.resolve("settings-" + System.nanoTime() + ".json")),
-                new Dialogs(stage));
+                new Dialogs(stage),
+                folder.resolve("journals"));
         stage.setX(0);
         stage.setY(0);
         editor.session().openSample("z-fold-rod.json");

@@ -51,7 +51,7 @@ final class Stagehand {
             Editor editor = new Editor(Runner.onTheSpot());
             stage.setX(0);
             stage.setY(0);
-            App.show(stage, editor, recall, asks);
+            App.show(stage, editor, recall, asks, settings.resolveSibling("journals"));
             return new Stagehand(stage, editor, new Robot());
         });
         hand.awaitKeyboard();

@@ -1,10 +1,13 @@
 package twofold.window.panel;
 
 import java.util.List;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListCell;
 import javafx.scene.control.ListView;
+import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import twofold.file.Located;
 import twofold.session.Shown;
@@ -13,9 +16,14 @@ import twofold.session.Shown;
 public final class ProblemsPane extends VBox {
     private final Label title = new Label();
     private final ListView<String> list = new ListView<>();
+    private boolean isPasted;
 
-    /** Makes the pane, hidden. */
-    public ProblemsPane() {
+    /**
+     * Makes the pane, hidden.
+     *
+     * @param dismiss forgets a refused file
+     */
+    public ProblemsPane(Runnable dismiss) {
         getStyleClass().addAll("card", "problems");
         title.getStyleClass().addAll("title", "bad");
         title.setWrapText(true);
@@ -25,14 +33,37 @@ public final class ProblemsPane extends VBox {
         list.setCellFactory(view -> new Row());
         list.setPrefHeight(150);
         VBox.setVgrow(list, Priority.ALWAYS);
-        getChildren().addAll(title, list);
+        Button close = new Button("Dismiss");
+        close.setId("dismiss");
+        close.setMinWidth(Region.USE_PREF_SIZE);
+        close.setAccessibleHelp("Takes these problems away; the open design stays as it is");
+        close.setOnAction(e -> {
+            pasted(List.of());
+            dismiss.run();
+        });
+        title.setMaxWidth(Double.MAX_VALUE);
+        HBox.setHgrow(title, Priority.ALWAYS);
+        getChildren().addAll(new HBox(8, title, close), list);
         setVisible(false);
         setManaged(false);
+    }
+
+    /** Shows what is wrong with a text that was to be pasted, until it is taken away or a document's problems come. */
+    public void pasted(List<Located> problems) {
+        setVisible(!problems.isEmpty());
+        setManaged(!problems.isEmpty());
+        title.setText("! The clipboard's text cannot be pasted.");
+        list.getItems().setAll(problems.stream().map(ProblemsPane::line).toList());
+        isPasted = !problems.isEmpty();
     }
 
     /** Shows the problems of the file that is shown. */
     public void show(Shown shown) {
         boolean isBad = !shown.problems().isEmpty() || shown.failure().isPresent();
+        if (isPasted && !isBad) {
+            return;
+        }
+        isPasted = false;
         setVisible(isBad);
         setManaged(isBad);
         if (!isBad) {
