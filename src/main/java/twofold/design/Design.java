@@ -55,6 +55,26 @@ public record Design(
         return new Design(title, notes, wavelength, shape, other, holds, levers, requirements, tolerances);
     }
 
+    /** This design with other holds. */
+    public Design withHolds(List<Hold> other) {
+        return new Design(title, notes, wavelength, shape, parts, other, levers, requirements, tolerances);
+    }
+
+    /** This design with other levers. */
+    public Design withLevers(List<Lever> other) {
+        return new Design(title, notes, wavelength, shape, parts, holds, other, requirements, tolerances);
+    }
+
+    /** This design with other requirements. */
+    public Design withRequirements(List<Requirement> other) {
+        return new Design(title, notes, wavelength, shape, parts, holds, levers, other, tolerances);
+    }
+
+    /** This design with other tolerances. */
+    public Design withTolerances(List<Tolerance> other) {
+        return new Design(title, notes, wavelength, shape, parts, holds, levers, requirements, other);
+    }
+
     /** The index of the part with a name. */
     public Optional<Integer> indexOf(String name) {
         for (int i = 0; i < parts.size(); i++) {

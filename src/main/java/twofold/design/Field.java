@@ -363,6 +363,13 @@ public enum Field {
         return json;
     }
 
+    /** Its name for a person: the JSON name without its unit, "clear diameter"; of a position, "position". */
+    public String title() {
+        return this == AT
+                ? "position"
+                : json.replaceFirst("(_per)?_(mm|deg|m)$", "").replace('_', ' ');
+    }
+
     /** The unit in a file. */
     public Unit unit() {
         return unit;

@@ -2,7 +2,9 @@ package twofold.edit;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.DoubleFunction;
 import twofold.design.Design;
+import twofold.design.Entry;
 import twofold.design.Kind;
 import twofold.design.Mirror;
 import twofold.design.Place;
@@ -83,7 +85,11 @@ public final class MirrorEdits {
     }
 
     private static Outcome<Design> placed(Laid laid, String mirror, Point at, Follow follow) {
-        return dragged(laid, mirror, at, follow).then(m -> reached(laid, m, mirror + " at " + Moves.words(at)));
+        boolean there = laid.design().mirrors().stream().anyMatch(m -> m.name().equals(mirror) && m.at().equals(at));
+        // A held place may be typed again as it is.
+        return there
+                ? Outcome.of(laid.design())
+                : dragged(laid, mirror, at, follow).then(m -> reached(laid, m, mirror + " at " + Moves.words(at)));
     }
 
     static Outcome<Move.Moved> dragged(Laid laid, String mirror, Point to, Follow follow) {
@@ -155,10 +161,39 @@ public final class MirrorEdits {
         return Edit.of("set incidence at " + mirror, laid -> incident(laid, mirror, angle, follow));
     }
 
+    /** A leg of a path as typed, in mm where it says nothing else. */
+    public static Edit leg(Place leg, String path, Optional<Follow> follow) {
+        return typed("leg_mm", path, Unit.MM, "set leg " + leg, p -> leg(leg, p, follow));
+    }
+
+    /** An incidence as typed, in degrees where it says nothing else. */
+    public static Edit incidence(String mirror, String angle, Optional<Follow> follow) {
+        return typed("incidence_deg", angle, Unit.DEG, "set incidence at " + mirror, a -> incidence(mirror, a, follow));
+    }
+
+    /** A mirror at an x as typed, in mm where it says nothing else. */
+    public static Edit x(String mirror, String x, Follow follow) {
+        return typed("x_mm", x, Unit.MM, "move " + mirror, v -> x(mirror, v, follow));
+    }
+
+    /** A mirror at a y as typed, in mm where it says nothing else. */
+    public static Edit y(String mirror, String y, Follow follow) {
+        return typed("y_mm", y, Unit.MM, "move " + mirror, v -> y(mirror, v, follow));
+    }
+
+    private static Edit typed(String field, String text, Unit unit, String name, DoubleFunction<Edit> edit) {
+        return Edit.of(name, laid -> {
+            Entry<Double> entry = Entry.number(Subject.DOCUMENT.at(field), text, unit);
+            return entry.problem().isPresent()
+                    ? Outcome.failed(entry.problem().get())
+                    : edit.apply(entry.value().orElseThrow()).change().apply(laid);
+        });
+    }
+
     static Outcome<Design> incident(Laid laid, String mirror, double angle, Optional<Follow> follow) {
         return Moves.folding(laid, mirror)
                 .then(m -> follow.equals(Optional.of(Follow.ARM_FOLLOWS))
-                        ? parallel(laid, m, angle)
+                        ? Moves.allowed(laid, Follow.ARM_FOLLOWS).then(f -> parallel(laid, m, angle))
                         : Moves.incidence(laid, m, angle, follow));
     }
 

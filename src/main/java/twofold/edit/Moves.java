@@ -161,16 +161,7 @@ final class Moves {
                 .mapToObj(m -> new Hold.Position(design.mirrors().get(m).name()))
                 .filter(h -> !pinned.contains(h))
                 .forEach(pinned::add);
-        Design held = new Design(
-                design.title(),
-                design.notes(),
-                design.wavelength(),
-                design.shape(),
-                design.parts(),
-                pinned,
-                design.levers(),
-                design.requirements(),
-                design.tolerances());
+        Design held = design.withHolds(pinned);
         Move move = Mover.of(new Laid(held, laid.legs(), laid.incidence()), List.of(List.of(target)))
                 .explain(value);
         if (move instanceof Move.Moved moved) {

@@ -24,21 +24,17 @@ final class References {
         UnaryOperator<String> name = n -> n.equals(before) ? after : n;
         UnaryOperator<Place> place =
                 p -> new Place(name.apply(p.first()), p.second().map(name));
-        return new Design(
-                design.title(),
-                design.notes(),
-                design.wavelength(),
-                design.shape(),
-                design.parts(),
-                design.holds().stream().map(h -> renamed(h, name, place)).toList(),
-                design.levers().stream()
+        return design.withHolds(design.holds().stream()
+                        .map(h -> renamed(h, name, place))
+                        .toList())
+                .withLevers(design.levers().stream()
                         .map(l -> with(l, l.of().stream().map(place).toList()))
-                        .toList(),
-                design.requirements().stream()
+                        .toList())
+                .withRequirements(design.requirements().stream()
                         .map(r ->
                                 new Requirement(r.what(), r.at().map(place), r.plane(), r.edge(), r.bound(), r.over()))
-                        .toList(),
-                design.tolerances().stream()
+                        .toList())
+                .withTolerances(design.tolerances().stream()
                         .map(t -> with(t, t.of().stream().map(place).toList()))
                         .toList());
     }
@@ -100,16 +96,10 @@ final class References {
             good(bad, Subject.DOCUMENT.at("tolerances").at(i), tolerance.of())
                     .ifPresent(of -> tolerances.add(with(tolerance, of)));
         }
-        return new Design(
-                design.title(),
-                design.notes(),
-                design.wavelength(),
-                design.shape(),
-                design.parts(),
-                good(bad, "holds", design.holds()),
-                levers,
-                good(bad, "requirements", design.requirements()),
-                tolerances);
+        return design.withHolds(good(bad, "holds", design.holds()))
+                .withLevers(levers)
+                .withRequirements(good(bad, "requirements", design.requirements()))
+                .withTolerances(tolerances);
     }
 
     private static <T> List<T> good(Set<String> bad, String list, List<T> all) {

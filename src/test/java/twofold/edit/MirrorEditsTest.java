@@ -30,17 +30,7 @@ class MirrorEditsTest {
     private final Laid z = sample("z-fold-rod");
 
     static Laid holding(Laid laid, Hold... holds) {
-        Design d = laid.design();
-        return Edited.laid(new Design(
-                d.title(),
-                d.notes(),
-                d.wavelength(),
-                d.shape(),
-                d.parts(),
-                List.of(holds),
-                d.levers(),
-                d.requirements(),
-                d.tolerances()));
+        return Edited.laid(laid.design().withHolds(List.of(holds)));
     }
 
     private static double wrapped(double angle) {
