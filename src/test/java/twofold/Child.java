@@ -42,14 +42,14 @@ public final class Child implements AutoCloseable {
     }
 
     /** Kills the program where it stands; what it said until then can still be read. */
-    public void kill() throws InterruptedException {
+    public void kill() {
         // Of the process itself, this would close its output too.
         process.toHandle().destroyForcibly();
-        process.waitFor();
+        process.onExit().join();
     }
 
     @Override
-    public void close() throws IOException, InterruptedException {
+    public void close() throws IOException {
         kill();
         out.close();
     }

@@ -1,7 +1,9 @@
 package twofold.session;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import twofold.design.Design;
 import twofold.design.Part;
@@ -17,6 +19,9 @@ public final class History {
 
     private final Design first;
     private final List<Step> steps = new ArrayList<>();
+    /** Each name once, however many steps have it. */
+    private final Map<String, String> names = new HashMap<>();
+
     private int done;
     private boolean isRunning;
     private Optional<Design> saved;
@@ -95,7 +100,7 @@ public final class History {
         // A run that came back to where it began is no step.
         isRunning = !joins || !kept.equals(now());
         if (isRunning) {
-            steps.add(new Step(edit.name(), edit.joins(), kept));
+            steps.add(new Step(names.computeIfAbsent(edit.name(), n -> n), edit.joins(), kept));
             done++;
         }
         return true;

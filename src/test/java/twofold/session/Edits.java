@@ -2,11 +2,14 @@ package twofold.session;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import twofold.design.Design;
 import twofold.design.Field;
 import twofold.design.Mirror;
 import twofold.design.Part;
 import twofold.design.Point;
+import twofold.design.Problem;
+import twofold.design.Subject;
 import twofold.edit.Edit;
 import twofold.layout.Outcome;
 
@@ -22,12 +25,12 @@ final class Edits {
 
     /** A mirror a little elsewhere, m; joins its like. */
     static Edit nudge(String mirror, double dx, double dy) {
-        return Edit.nudge("move " + mirror, now -> Outcome.of(moved(now.design(), mirror, dx, dy)));
+        return Edit.nudge("move " + mirror, now -> moved(now.design(), mirror, dx, dy));
     }
 
     /** A mirror a little elsewhere, m; a step of its own. */
     static Edit move(String mirror, double dx, double dy) {
-        return Edit.of("move " + mirror, now -> Outcome.of(moved(now.design(), mirror, dx, dy)));
+        return Edit.of("move " + mirror, now -> moved(now.design(), mirror, dx, dy));
     }
 
     /** A part under another name. */
@@ -57,10 +60,14 @@ final class Edits {
         });
     }
 
-    private static Design moved(Design design, String mirror, double dx, double dy) {
-        Mirror is = (Mirror) design.parts().get(design.indexOf(mirror).orElseThrow());
-        return with(
-                design, mirror, Field.AT, new Point(is.at().x() + dx, is.at().y() + dy));
+    private static Outcome<Design> moved(Design design, String mirror, double dx, double dy) {
+        Optional<Point> at = design.mirrors().stream()
+                .filter(m -> m.name().equals(mirror))
+                .map(Mirror::at)
+                .findFirst();
+        return at.map(p -> Outcome.of(with(design, mirror, Field.AT, new Point(p.x() + dx, p.y() + dy))))
+                .orElseGet(() -> Outcome.failed(
+                        List.of(new Problem(Subject.DOCUMENT.at("parts"), "found no " + mirror, "a mirror's name"))));
     }
 
     private static Design with(Design design, String part, Field field, Object value) {
