@@ -186,7 +186,7 @@ class SafeFileTest {
                 try {
                     SafeFile.write(disk, link, NEW);
                 } catch (IOException e) {
-                    said = Optional.of(e.getMessage());
+                    said = Optional.ofNullable(e.getMessage());
                 }
                 if (!disk.hasFailed()) {
                     assertThat(file).hasBinaryContent(NEW);

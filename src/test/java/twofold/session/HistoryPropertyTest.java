@@ -86,7 +86,10 @@ class HistoryPropertyTest {
                 preview(edits, random);
             }
             assertThat(session.shown().undo())
-                    .isEqualTo(done == 0 ? Optional.empty() : Optional.of(steps.get(done - 1).name()));
+                    .isEqualTo(
+                            done == 0
+                                    ? Optional.empty()
+                                    : Optional.of(steps.get(done - 1).name()));
         }
         assertThat(refused).as("refused edits, of %d", EDITS).isLessThan(EDITS * 2 / 3);
         assertThat(names).as("kinds of edits").hasSizeGreaterThanOrEqualTo(6);

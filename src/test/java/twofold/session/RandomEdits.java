@@ -61,7 +61,8 @@ final class RandomEdits {
         Mirror mirror = one(design.mirrors());
         Leg leg = one(laid.legs());
         Place place = Place.of(
-                design.parts().get(leg.from()).name(), design.parts().get(leg.to()).name());
+                design.parts().get(leg.from()).name(),
+                design.parts().get(leg.to()).name());
         Follow follow = one(List.of(Follow.values()));
         Turn side = one(List.of(Turn.values()));
         boolean isFull = design.parts().size() > MANY;
@@ -74,12 +75,15 @@ final class RandomEdits {
             case 4 -> Nudges.turn(name, any(2e-3));
             case 5 ->
                 MirrorEdits.moveTo(
-                        mirror.name(), new Point(mirror.at().x() + any(1e-3), mirror.at().y() + any(1e-3)), follow);
+                        mirror.name(),
+                        new Point(mirror.at().x() + any(1e-3), mirror.at().y() + any(1e-3)),
+                        follow);
             case 6 -> MirrorEdits.x(mirror.name(), mirror.at().x() + any(1e-4), follow);
             case 7 -> MirrorEdits.leg(place, leg.path() + any(1e-4));
             case 8 ->
                 MirrorEdits.incidence(
-                        mirror.name(), Math.toRadians(random.nextDouble(3, 20)),
+                        mirror.name(),
+                        Math.toRadians(random.nextDouble(3, 20)),
                         // In a ring no arm follows parallel to itself.
                         design.shape() == Shape.RING ? Optional.empty() : Optional.of(follow));
             case 9 ->
@@ -97,7 +101,8 @@ final class RandomEdits {
             case 16 ->
                 isFull
                         ? PartEdits.delete(List.of(name))
-                        : PartEdits.paste(PartText.read(PartText.of(List.of(part))).parts(), behind);
+                        : PartEdits.paste(
+                                PartText.read(PartText.of(List.of(part))).parts(), behind);
             default -> number(part);
         };
     }

@@ -45,6 +45,9 @@ public final class BenchPane extends ViewPane {
         super("Bench, the plan seen from above", session);
         setId("bench");
         hands = new Hands(session, following, this);
+        // What is in the middle stays there when the pane grows or shrinks.
+        widthProperty().addListener((o, was, is) -> resized(is.doubleValue() - was.doubleValue(), 0));
+        heightProperty().addListener((o, was, is) -> resized(0, is.doubleValue() - was.doubleValue()));
     }
 
     /** Shows a moment of the session; another design is shown whole. */
@@ -108,6 +111,12 @@ public final class BenchPane extends ViewPane {
             Empty.draw(on, width, height);
         } else {
             drawing.draw(on, view(drawing, width, height));
+        }
+    }
+
+    private void resized(double wider, double higher) {
+        if (viewport != null) {
+            viewport = viewport.panned(wider / 2, higher / 2);
         }
     }
 
