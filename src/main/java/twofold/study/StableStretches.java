@@ -142,24 +142,31 @@ public record StableStretches(
         return answers[answer];
     }
 
+    private static boolean hasNone(Asker asker, double value) {
+        return Double.isNaN(ask(asker, value, 0));
+    }
+
     /** Where layouts begin and end along the axis, its ends among them. */
     private static List<Double> limits(Asker asker, Axis axis) {
         List<Double> limits = new ArrayList<>();
         limits.add(axis.value(0));
+        boolean before = hasNone(asker, axis.value(0));
         for (int i = 1; i < axis.size(); i++) {
-            boolean before = Double.isNaN(ask(asker, axis.value(i - 1), 0));
-            if (Double.isNaN(ask(asker, axis.value(i), 0)) != before) {
+            boolean here = hasNone(asker, axis.value(i));
+            if (here != before) {
                 double a = axis.value(i - 1);
                 double b = axis.value(i);
-                for (double m = a + (b - a) / 2; m > a && m < b; m = a + (b - a) / 2) {
-                    if (Double.isNaN(ask(asker, m, 0)) == before) {
-                        a = m;
+                while (a + (b - a) / 2 > a && a + (b - a) / 2 < b) {
+                    double middle = a + (b - a) / 2;
+                    if (hasNone(asker, middle) == before) {
+                        a = middle;
                     } else {
-                        b = m;
+                        b = middle;
                     }
                 }
                 limits.add(b);
             }
+            before = here;
         }
         limits.add(axis.value(axis.size() - 1));
         return limits;

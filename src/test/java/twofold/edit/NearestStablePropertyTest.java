@@ -27,7 +27,7 @@ class NearestStablePropertyTest {
     /** Displacements, m. */
     private static final double FAR = 20e-3;
 
-    private static final int DRAWS = 6;
+    private static final int DRAWS = 3;
 
     static Stream<Path> samples() {
         return Samples.files().stream();
