@@ -48,11 +48,11 @@ record BowTiePlan(StartingValues values, String title, double sideways, double e
         double first = (diagonals + sideways / sin) / 2;
         double second = (diagonals - sideways / sin) / 2;
         if (!(diagonals * cos > 2 * half) || !(Math.min(first, second) > 0)) {
-            return Outcome.failed(List.of(new Problem(
+            return Outcome.failed(new Problem(
                     Subject.DOCUMENT.at(StartingInput.ROUND_TRIP.words()),
                     "found " + StartingInput.ROUND_TRIP.shown(roundTrip) + ", too short for a bow-tie with a gap of "
                             + Unit.MM.shown(gap) + " mm and an incidence of " + Unit.DEG.shown(incidence) + "°",
-                    "a longer round trip, smaller radii or a smaller incidence")));
+                    "a longer round trip, smaller radii or a smaller incidence"));
         }
         Point one = new Point(-half, -sideways / 2);
         Point two = new Point(half, sideways / 2);

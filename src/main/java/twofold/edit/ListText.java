@@ -6,12 +6,11 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import twofold.design.Entry;
 import twofold.design.Field;
 import twofold.design.Names;
-import twofold.design.Problem;
 import twofold.design.Subject;
 import twofold.design.Turn;
-import twofold.layout.Outcome;
 
 /**
  * The numbers of a typed list with their places in the text; see {@link FromList} for its grammar.
@@ -50,7 +49,7 @@ record ListText(List<Entered> legs, List<Entered> angles, List<Entered> radii, L
         }
         List<Entered> legs = new ArrayList<>();
         for (Piece piece : elements(text, groups, 0)) {
-            number(piece, Field.LEG, faults).ifPresent(legs::add);
+            number(piece, piece.text(), Field.LEG, Optional.empty(), faults).ifPresent(legs::add);
         }
         List<Entered> angles = new ArrayList<>();
         for (Piece piece : elements(text, groups, 1)) {
@@ -58,11 +57,7 @@ record ListText(List<Entered> legs, List<Entered> angles, List<Entered> radii, L
         }
         List<Entered> radii = new ArrayList<>();
         for (Piece piece : elements(text, groups, 2)) {
-            if (piece.text().equalsIgnoreCase("flat")) {
-                radii.add(new Entered(piece.from(), piece.to(), Double.POSITIVE_INFINITY, Optional.empty()));
-            } else {
-                number(piece, Field.ROC, faults).ifPresent(radii::add);
-            }
+            number(piece, piece.text(), Field.ROC, Optional.empty(), faults).ifPresent(radii::add);
         }
         if (faults.isEmpty()) {
             counts(text, groups, legs, angles, radii, faults);
@@ -140,21 +135,12 @@ record ListText(List<Entered> legs, List<Entered> angles, List<Entered> radii, L
         return new Piece(a, b, text.substring(a, b));
     }
 
-    private static Optional<Entered> number(Piece piece, Field field, List<FromList.Fault> faults) {
-        Outcome<Double> number = ListNumber.read(Subject.DOCUMENT, piece.text(), field.unit());
-        Outcome<Double> limited = number.then(n -> field.accepts(n) ? number : Outcome.failed(refused(piece, field)));
-        return taken(piece, limited, Optional.empty(), faults);
-    }
-
-    private static Problem refused(Piece piece, Field field) {
-        return new Problem(Subject.DOCUMENT, "found " + Names.shown(piece.text()), field.accepted());
-    }
-
-    private static Optional<Entered> taken(
-            Piece piece, Outcome<Double> number, Optional<Turn> turn, List<FromList.Fault> faults) {
-        number.problems()
-                .forEach(p -> faults.add(new FromList.Fault(piece.from(), piece.to(), p.found(), p.accepted())));
-        return number.value().map(n -> new Entered(piece.from(), piece.to(), n, turn));
+    private static Optional<Entered> number(
+            Piece piece, String text, Field field, Optional<Turn> turn, List<FromList.Fault> faults) {
+        Entry<Object> entry = Entry.field(Subject.DOCUMENT, text, field);
+        entry.problem()
+                .ifPresent(p -> faults.add(new FromList.Fault(piece.from(), piece.to(), p.found(), p.accepted())));
+        return entry.value().map(n -> new Entered(piece.from(), piece.to(), (Double) n, turn));
     }
 
     private static Optional<Entered> angle(Piece piece, List<FromList.Fault> faults) {
@@ -177,11 +163,8 @@ record ListText(List<Entered> legs, List<Entered> angles, List<Entered> radii, L
                     "a sign, L or R"));
             return Optional.empty();
         }
-        Outcome<Double> number = ListNumber.read(Subject.DOCUMENT, bare, Field.INCIDENCE.unit());
-        Outcome<Double> limited = number.then(n -> Field.INCIDENCE.accepts(Math.abs(n))
-                ? Outcome.of(Math.abs(n))
-                : Outcome.failed(refused(piece, Field.INCIDENCE)));
-        return taken(piece, limited, turns.stream().findFirst(), faults);
+        String unsigned = bare.replaceFirst("^[-+−]", "");
+        return number(piece, unsigned, Field.INCIDENCE, turns.stream().findFirst(), faults);
     }
 
     private static Optional<Turn> word(@org.jspecify.annotations.Nullable String word) {

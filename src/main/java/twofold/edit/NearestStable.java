@@ -14,7 +14,6 @@ import twofold.design.Field;
 import twofold.design.Hold;
 import twofold.design.Lever;
 import twofold.design.Mirror;
-import twofold.design.Names;
 import twofold.design.Part;
 import twofold.design.Place;
 import twofold.design.Point;
@@ -93,10 +92,9 @@ public final class NearestStable {
 
     /** The edit that moves a part to the nearest stable place. */
     public static Edit edit(String part) {
-        return Edit.of("move " + part + " to the nearest stable place", laid -> {
-            Outcome<Found> found = of(laid, part);
-            return found.value().map(f -> Outcome.of(f.design())).orElseGet(() -> Outcome.failed(found.problems()));
-        });
+        return Edit.of(
+                "move " + part + " to the nearest stable place",
+                laid -> of(laid, part).then(found -> Outcome.of(found.design())));
     }
 
     /**
@@ -105,14 +103,10 @@ public final class NearestStable {
      * @param part its name
      */
     public static Outcome<Found> of(Laid laid, String part) {
-        List<String> names = laid.design().parts().stream().map(Part::name).toList();
-        int index = names.indexOf(part);
-        if (index < 0) {
-            return Outcome.failed(List.of(
-                    new Problem(Subject.DOCUMENT, "found no part \"" + Names.shown(part) + "\"", Names.listed(names))));
-        }
-        NearestStable search = new NearestStable(laid, index);
-        return laid.design().parts().get(index) instanceof Mirror ? search.mirror() : search.onLeg();
+        return Named.part(laid.design(), part).then(index -> {
+            NearestStable search = new NearestStable(laid, index);
+            return laid.design().parts().get(index) instanceof Mirror ? search.mirror() : search.onLeg();
+        });
     }
 
     private String name() {
@@ -167,10 +161,10 @@ public final class NearestStable {
     }
 
     private Outcome<Found> refused(String why) {
-        return Outcome.failed(List.of(new Problem(
+        return Outcome.failed(new Problem(
                 Subject.part(part),
                 "found no stable place for " + name() + ": " + why,
-                "another part, or first another radius or incidence")));
+                "another part, or first another radius or incidence"));
     }
 
     private Mover mover(int leg) {
@@ -204,12 +198,7 @@ public final class NearestStable {
             return Optional.empty();
         }
         List<Point> places = anchored(leg, ((Move.Moved) move).places(), mover.isClosedForm());
-        List<Part> parts = new ArrayList<>();
-        int mirror = 0;
-        for (Part p : design.parts()) {
-            parts.add(p instanceof Mirror m ? m.at(places.get(mirror++)) : p);
-        }
-        return checked(design.withParts(parts), "a leg " + place(leg) + " of " + Unit.MM.shown(path) + " mm");
+        return checked(Moves.at(design, places), "a leg " + place(leg) + " of " + Unit.MM.shown(path) + " mm");
     }
 
     private Optional<Design> checked(Design changed, String what) {

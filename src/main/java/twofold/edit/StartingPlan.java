@@ -103,8 +103,7 @@ interface StartingPlan {
                 Optional.empty(),
                 OptionalDouble.empty());
         Design alone = Design.of(CRYSTAL, values.number(StartingInput.WAVELENGTH), Shape.STANDING_WAVE, parts);
-        Outcome<Design> placed = Layout.typed(alone, Map.of(2, leg));
-        Outcome<Laid> laid = placed.value().map(Layout::of).orElseGet(() -> Outcome.failed(placed.problems()));
+        Outcome<Laid> laid = Layout.typed(alone, Map.of(2, leg)).then(Layout::of);
         return laid.value()
                 .map(l -> Outcome.of(l.legs().get(0).parts().get(0)))
                 .orElseGet(() -> Outcome.failed(laid.problems().stream()

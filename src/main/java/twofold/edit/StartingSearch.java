@@ -7,7 +7,6 @@ import java.util.function.DoubleFunction;
 import twofold.cavity.Chain;
 import twofold.cavity.Fit;
 import twofold.cavity.Trial;
-import twofold.design.Design;
 import twofold.design.Lever;
 import twofold.design.Problem;
 import twofold.design.Subject;
@@ -85,8 +84,7 @@ final class StartingSearch {
     }
 
     private Outcome<Laid> laid(double incidence, double gap) {
-        Outcome<Design> design = plan.at(incidence, gap);
-        return design.value().map(Layout::of).orElseGet(() -> Outcome.failed(design.problems()));
+        return plan.at(incidence, gap).then(Layout::of);
     }
 
     /** Goes to the middle of the stretch, by secants: what follows the gap may move the stretch. */
@@ -190,11 +188,11 @@ final class StartingSearch {
                 .filter(s -> s.distance(gap) == 0 && isStable(laid.value().get()))
                 .findFirst()
                 .map(s -> Outcome.of(new Found(laid.value().get(), 0, s)))
-                .orElseGet(() -> Outcome.failed(List.of(new Problem(
+                .orElseGet(() -> Outcome.failed(new Problem(
                         Subject.DOCUMENT.at(input.words()),
                         "found " + input.shown(values.number(input)) + ", where not both planes are stable: "
                                 + stretches.words(),
-                        "a stable one"))));
+                        "a stable one")));
     }
 
     private Outcome<Found> triangle() {
@@ -207,6 +205,6 @@ final class StartingSearch {
     }
 
     private static Outcome<Found> refused(String found) {
-        return Outcome.failed(List.of(new Problem(Subject.DOCUMENT, found, "other values")));
+        return Outcome.failed(new Problem(Subject.DOCUMENT, found, "other values"));
     }
 }

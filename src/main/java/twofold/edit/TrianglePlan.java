@@ -34,10 +34,10 @@ record TrianglePlan(StartingValues values, String title) implements StartingPlan
     public Outcome<Design> at(double incidence, double gap) {
         double base = values.number(StartingInput.BASE);
         if (!(gap > 0)) {
-            return Outcome.failed(List.of(new Problem(
+            return Outcome.failed(new Problem(
                     Subject.DOCUMENT.at(StartingInput.PERIMETER.words()),
                     "found a round trip that is not longer than twice the base",
-                    "more than " + StartingInput.PERIMETER.shown(2 * base))));
+                    "more than " + StartingInput.PERIMETER.shown(2 * base)));
         }
         double flat = Double.POSITIVE_INFINITY;
         List<Part> parts = new ArrayList<>();

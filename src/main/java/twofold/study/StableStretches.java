@@ -12,12 +12,11 @@ import twofold.cavity.Reading;
 import twofold.cavity.Trial;
 import twofold.cavity.ZoneEdge;
 import twofold.cavity.Zones;
-import twofold.design.Along;
-import twofold.design.Field;
 import twofold.design.Lever;
 import twofold.design.Unit;
 import twofold.layout.Laid;
 import twofold.layout.Leg;
+import twofold.layout.Room;
 import twofold.layout.Standing;
 import twofold.optics.Plane;
 
@@ -89,13 +88,7 @@ public record StableStretches(
         double before = 0;
         double insideInMiddle = -1;
         for (Standing s : leg.parts()) {
-            Object along = laid.design()
-                    .parts()
-                    .get(s.part())
-                    .values()
-                    .find(Field.ALONG)
-                    .orElseThrow();
-            if (((Along) along).inMiddle()) {
+            if (Room.along(laid.design().parts().get(s.part())).inMiddle()) {
                 least = Math.max(least, 2 * before + s.length());
                 insideInMiddle = s.length();
             } else {

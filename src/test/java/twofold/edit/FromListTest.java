@@ -59,7 +59,8 @@ class FromListTest {
                 "480, 105, 620; 7.9 L, 7.9 L",
                 "48 cm,105mm,  0.62 m;left 7.9°, 7.9° left",
                 "480, 105, 620;\n+7.9, l7.9",
-                "480, 105, 620; 7.9, 7.9 L;"
+                "480, 105, 620; 7.9, 7.9 L;",
+                "480, 105, 620; 7°54', 7.9 L"
             })
     void anXCrossesItsArms(String text) {
         Design design = design(text);

@@ -108,7 +108,7 @@ class NearestStableTest {
     void anUnknownPartIsRefused() {
         assertThat(NearestStable.of(laid("250; ; 500"), "Fold 9").problems())
                 .singleElement()
-                .satisfies(p -> assertThat(p.line()).contains("\"Fold 9\"", "End A, End B"));
+                .satisfies(p -> assertThat(p.line()).contains("\"Fold 9\", which no part is called"));
     }
 
     private static Laid withLens(double along) {
