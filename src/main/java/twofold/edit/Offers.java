@@ -99,6 +99,11 @@ public final class Offers {
                 .toList();
     }
 
+    /** The names of all materials. */
+    public static List<String> materialNames() {
+        return Materials.standard().names();
+    }
+
     /** The materials whose published index reaches the design's wavelength. */
     public static List<Material> materials(Design design) {
         Materials all = Materials.standard();

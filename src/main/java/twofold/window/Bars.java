@@ -27,6 +27,7 @@ final class Bars {
     private final Recall recall;
     private final Documents documents;
     private final EditActions edits;
+    private final Action make;
     private final Action open;
     private final Action save;
     private final Action turnTheme;
@@ -38,6 +39,12 @@ final class Bars {
         this.recall = recall;
         this.documents = documents;
         edits = new EditActions(editor);
+        make = Action.of(
+                "new",
+                "New…",
+                "Shortcut+N",
+                "Begins a new design",
+                () -> new NewDesign(window()).showAndWait().ifPresent(documents::create));
         open = Action.of("open", "Open…", "Shortcut+O", "Opens a design file", () -> documents.open());
         save = Action.of("save", "Save", "Shortcut+S", "Saves the design in its file", documents::save)
                 .unless(edits::closed);
@@ -72,6 +79,7 @@ final class Bars {
                 menu("beam-width", "Beam width", "How many times wider than true the beam is drawn on the bench");
         width.getItems().setAll(factors());
         HBox row = new HBox(
+                make.button("New…", editor::say),
                 open.button("Open…", editor::say),
                 save.button("Save", editor::say),
                 edits.undo().button("Undo", editor::say),
@@ -114,7 +122,7 @@ final class Bars {
         Menu samples = new Menu("Open _sample");
         samples.getItems().setAll(samples());
         Menu file = new Menu("_File");
-        file.getItems().addAll(items(List.of(open)));
+        file.getItems().addAll(items(List.of(make, open)));
         file.getItems().addAll(samples, recent);
         file.getItems()
                 .addAll(items(List.of(

@@ -13,6 +13,7 @@ import javafx.application.Platform;
 import javafx.embed.swing.SwingFXUtils;
 import javafx.geometry.Point2D;
 import javafx.scene.Node;
+import javafx.scene.Scene;
 import javafx.scene.image.WritableImage;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
@@ -81,6 +82,11 @@ final class Stagehand {
         FutureTask<T> task = new FutureTask<>(work);
         Platform.runLater(task);
         return task.get(20, SECONDS);
+    }
+
+    /** Has something done on the toolkit's thread that may wait for a person, as a dialog does. */
+    static void later(Runnable work) {
+        Platform.runLater(work);
     }
 
     /**
@@ -256,8 +262,13 @@ final class Stagehand {
 
     /** A picture of the whole window, kept under target for looking at. */
     WritableImage picture(String name) throws Exception {
+        return picture(editor.getScene(), name);
+    }
+
+    /** A picture of another window. */
+    WritableImage picture(Scene scene, String name) throws Exception {
         settle();
-        WritableImage image = fx(() -> editor.getScene().snapshot(null));
+        WritableImage image = fx(() -> scene.snapshot(null));
         File file = Path.of("target", "window", name + ".png").toFile();
         Files.createDirectories(file.toPath().getParent());
         if (!ImageIO.write(SwingFXUtils.fromFXImage(image, null), "png", file)) {

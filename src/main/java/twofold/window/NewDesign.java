@@ -1,0 +1,62 @@
+package twofold.window;
+
+import java.util.Optional;
+import javafx.event.ActionEvent;
+import javafx.geometry.Insets;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
+import javafx.scene.control.ButtonBar;
+import javafx.scene.control.ButtonType;
+import javafx.scene.control.Dialog;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.Tab;
+import javafx.scene.control.TabPane;
+import javafx.scene.layout.Region;
+import javafx.stage.Window;
+import twofold.design.Design;
+
+/** Asks what a new design starts from: a shape with its numbers, or a list of legs and angles. */
+final class NewDesign extends Dialog<Design> {
+    private final ShapeForm shape = new ShapeForm();
+    private final ListForm list = new ListForm();
+    private final TabPane ways;
+    private Optional<Design> made = Optional.empty();
+
+    NewDesign(Window over) {
+        setTitle("New design");
+        setResizable(true);
+        Dialogs.dress(this, over);
+        ways = new TabPane(tab("A shape", shape), tab("From a list", list));
+        ways.setId("ways");
+        ways.setTabClosingPolicy(TabPane.TabClosingPolicy.UNAVAILABLE);
+        ways.setAccessibleText("What the design starts from");
+        ButtonType make = new ButtonType("Make", ButtonBar.ButtonData.OK_DONE);
+        getDialogPane().setContent(ways);
+        getDialogPane().setPrefSize(620, 560);
+        getDialogPane().setMinHeight(Region.USE_COMPUTED_SIZE);
+        getDialogPane().getButtonTypes().addAll(make, ButtonType.CANCEL);
+        if (getDialogPane().lookupButton(make) instanceof Button button) {
+            button.setId("make");
+            button.addEventFilter(ActionEvent.ACTION, e -> {
+                make();
+                if (made.isEmpty()) {
+                    e.consume();
+                }
+            });
+        }
+        setResultConverter(type -> make.equals(type) ? made.orElse(null) : null);
+        setOnShown(e -> shape.first().requestFocus());
+    }
+
+    private static Tab tab(String title, Region form) {
+        form.setPadding(new Insets(12));
+        ScrollPane scroll = new ScrollPane(form);
+        scroll.setFitToWidth(true);
+        Node content = scroll;
+        return new Tab(title, content);
+    }
+
+    private void make() {
+        made = ways.getSelectionModel().getSelectedIndex() == 0 ? shape.make().value() : list.make();
+    }
+}

@@ -1,0 +1,192 @@
+package twofold.window;
+
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.Function;
+import java.util.stream.Collectors;
+import javafx.scene.Node;
+import javafx.scene.control.ChoiceBox;
+import javafx.scene.control.Label;
+import javafx.scene.control.TextField;
+import javafx.scene.control.Tooltip;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+import javafx.util.StringConverter;
+import twofold.design.Design;
+import twofold.design.Entry;
+import twofold.design.Problem;
+import twofold.design.Subject;
+import twofold.edit.CrystalCut;
+import twofold.edit.Offers;
+import twofold.edit.StartingInput;
+import twofold.edit.StartingShape;
+import twofold.edit.StartingValues;
+import twofold.layout.Outcome;
+
+/** A form that asks for a starting shape and its numbers, built from their vocabulary. What is typed survives a change of shape. */
+final class ShapeForm extends VBox {
+    private static final List<String> FLATS = List.of("flat", "∞", "inf", "infinity");
+
+    private final ChoiceBox<StartingShape> shape = new ChoiceBox<>();
+    private final ChoiceBox<CrystalCut> cut = new ChoiceBox<>();
+    private final ChoiceBox<String> material = new ChoiceBox<>();
+    private final GridPane grid = new GridPane();
+    private final Label refused = new Label();
+    private final Map<StartingInput, TextField> fields = new EnumMap<>(StartingInput.class);
+    /** What the person typed, to be kept when the shape changes. */
+    private final Map<StartingInput, String> typed = new EnumMap<>(StartingInput.class);
+
+    ShapeForm() {
+        setSpacing(10);
+        shape.setId("shape");
+        shape.setAccessibleText("Shape");
+        shape.getItems().setAll(StartingShape.values());
+        shape.setConverter(words(s -> title(s.words())));
+        cut.setId("crystal");
+        cut.setAccessibleText("Crystal");
+        cut.setConverter(words(c -> title(c.words())));
+        material.setId("material");
+        material.setAccessibleText("Crystal material");
+        grid.setHgap(8);
+        grid.setVgap(6);
+        ColumnConstraints names = new ColumnConstraints();
+        names.setMinWidth(Region.USE_PREF_SIZE);
+        ColumnConstraints entries = new ColumnConstraints(130);
+        ColumnConstraints means = new ColumnConstraints();
+        means.setHgrow(Priority.ALWAYS);
+        grid.getColumnConstraints().addAll(names, entries, means);
+        refused.setId("refused");
+        refused.getStyleClass().add("bad");
+        refused.setWrapText(true);
+        refused.setMinHeight(Region.USE_PREF_SIZE);
+        getChildren().addAll(grid, refused);
+        shape.valueProperty().addListener((o, was, is) -> choose(is));
+        cut.valueProperty().addListener((o, was, is) -> rows());
+        shape.setValue(StartingShape.Z);
+    }
+
+    private static String title(String words) {
+        return words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
+    }
+
+    private static <T> StringConverter<T> words(Function<T, String> of) {
+        return new StringConverter<>() {
+            @Override
+            public String toString(T value) {
+                return value == null ? "" : of.apply(value);
+            }
+
+            @Override
+            public T fromString(String text) {
+                throw new UnsupportedOperationException("chosen, not typed");
+            }
+        };
+    }
+
+    /** The control that the keyboard begins with. */
+    Node first() {
+        return shape;
+    }
+
+    private void choose(StartingShape next) {
+        StartingValues defaults = next.defaults();
+        cut.getItems().setAll(next.cuts());
+        cut.setValue(defaults.cut());
+        material.getItems().setAll(Offers.materialNames());
+        defaults.glass().material().ifPresent(material::setValue);
+        rows();
+    }
+
+    private void rows() {
+        keep();
+        fields.clear();
+        grid.getChildren().clear();
+        StartingShape of = shape.getValue();
+        StartingValues values = of.defaults();
+        CrystalCut chosen = cut.getValue();
+        if (chosen == null) {
+            return;
+        }
+        StartingValues asked = values.with(chosen);
+        int row = 0;
+        grid.addRow(row++, new Label("Shape"), shape);
+        for (StartingInput input : of.inputs()) {
+            if (input == StartingInput.CRYSTAL_LENGTH) {
+                grid.addRow(row++, new Label("Crystal"), cut);
+                if (chosen != CrystalCut.NONE) {
+                    grid.addRow(row++, new Label("Material"), material);
+                }
+            }
+            if (of.uses(input, asked)) {
+                row(row++, input, values);
+            }
+        }
+        refused.setText("");
+    }
+
+    private void row(int row, StartingInput input, StartingValues defaults) {
+        OptionalDouble usual = defaults.find(input);
+        String text = usual.isEmpty()
+                ? ""
+                : Double.isInfinite(usual.getAsDouble()) ? "flat" : input.unit().text(usual.getAsDouble());
+        TextField field = new TextField(typed.getOrDefault(input, text));
+        field.setId("input-" + input.name().toLowerCase(Locale.ROOT));
+        Label name = new Label(title(input.words()) + ", " + input.unit().symbol());
+        name.setLabelFor(field);
+        field.setAccessibleText(name.getText());
+        field.setTooltip(new Tooltip(title(input.doc()) + ". Accepted: " + input.accepted()));
+        Label doc = new Label(input.doc());
+        doc.getStyleClass().add("quiet");
+        doc.setWrapText(true);
+        fields.put(input, field);
+        grid.addRow(row, name, field, doc);
+    }
+
+    private void keep() {
+        fields.forEach((input, field) -> typed.put(input, field.getText()));
+    }
+
+    /** The design, or why there is none, which the form then shows. */
+    Outcome<Design> make() {
+        StartingShape of = shape.getValue();
+        StartingValues values = of.defaults().with(cut.getValue());
+        if (material.getValue() != null) {
+            values = values.withMaterial(material.getValue());
+        }
+        List<Problem> problems = new ArrayList<>();
+        for (Map.Entry<StartingInput, TextField> entry : fields.entrySet()) {
+            StartingInput input = entry.getKey();
+            Entry<Double> number = number(input, entry.getValue().getText());
+            number.problem().ifPresent(problems::add);
+            values = number.value().isPresent()
+                    ? values.with(input, number.value().get())
+                    : values.without(input);
+        }
+        Outcome<Design> made = problems.isEmpty() ? of.make(values) : Outcome.failed(problems);
+        refused.setText(made.problems().stream().map(ShapeForm::line).collect(Collectors.joining("\n")));
+        return made;
+    }
+
+    private static String line(Problem problem) {
+        return (problem.where().equals(Subject.DOCUMENT) ? "" : problem.where() + ": ") + problem.message();
+    }
+
+    private static Entry<Double> number(StartingInput input, String text) {
+        String bare = text.strip().toLowerCase(Locale.ROOT);
+        if (bare.isEmpty() && input.form() == StartingInput.Form.OPTIONAL) {
+            return new Entry<>(Optional.empty(), Optional.empty());
+        }
+        if (input.form() == StartingInput.Form.RADIUS && FLATS.contains(bare)) {
+            return new Entry<>(Optional.of(Double.POSITIVE_INFINITY), Optional.empty());
+        }
+        return Entry.number(Subject.DOCUMENT.at(input.words()), text, input.unit());
+    }
+}
