@@ -10,6 +10,7 @@ import twofold.design.Point;
 import twofold.design.Problem;
 import twofold.design.Side;
 import twofold.design.Subject;
+import twofold.design.TiltPlane;
 import twofold.layout.Follow;
 import twofold.layout.Laid;
 import twofold.layout.Leg;
@@ -89,11 +90,8 @@ public final class Nudges {
         return Outcome.of(Placing.with(Placing.without(laid.design(), index), index, turned));
     }
 
-    private static twofold.design.TiltPlane tilt(Part part) {
-        return part.values()
-                .find(Field.TILT_PLANE)
-                .map(twofold.design.TiltPlane.class::cast)
-                .orElseThrow();
+    private static TiltPlane tilt(Part part) {
+        return part.values().find(Field.TILT_PLANE).map(TiltPlane.class::cast).orElseThrow();
     }
 
     /** The leg of an end mirror swung about its other mirror. */

@@ -16,6 +16,7 @@ import twofold.design.Field;
 import twofold.design.Hold;
 import twofold.design.Lever;
 import twofold.design.Mirror;
+import twofold.design.Names;
 import twofold.design.Part;
 import twofold.design.Place;
 import twofold.design.Planes;
@@ -36,6 +37,9 @@ import twofold.material.Materials;
  * What can be asked, set and held at a place of a design, for menus: exactly what the design's own rules accept there.
  */
 public final class Offers {
+    /** How far a new lever reaches to either side of the present value, as a share of it. */
+    private static final double REACH = 0.1;
+
     private Offers() {}
 
     /** The legs, each as its two mirrors along the beam. */
@@ -144,9 +148,6 @@ public final class Offers {
                 : value.get() instanceof FaceAngle ? OptionalDouble.of(standing.incidence()) : OptionalDouble.empty();
     }
 
-    /** How far a new lever reaches to either side of the present value, as a share of it. */
-    private static final double REACH = 0.1;
-
     /**
      * A lever to begin with: a tenth to either side of the present value, in round numbers, under a free name.
      *
@@ -162,7 +163,7 @@ public final class Offers {
         double from = limited(design, set, at, rounded(unit, middle - reach), middle);
         double to = limited(design, set, at, rounded(unit, middle + reach), middle);
         String title = set.replaceFirst("(_per)?_(mm|deg|m)$", "").replace('_', ' ') + " " + at;
-        String name = twofold.design.Names.accepts(title) ? title : set.replaceFirst("_.*", "");
+        String name = Names.accepts(title) ? title : set.replaceFirst("_.*", "");
         return new Lever(
                 FreeName.like(name, design.levers().stream().map(Lever::name).toList()),
                 set,

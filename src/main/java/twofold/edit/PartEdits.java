@@ -78,6 +78,16 @@ public final class PartEdits {
         return Edit.of("delete " + several(parts), laid -> deleted(laid, parts));
     }
 
+    /** The same under the name that it has when the parts were copied before. */
+    public static Edit cut(List<String> parts) {
+        return Edit.of("cut " + several(parts), laid -> deleted(laid, parts));
+    }
+
+    /** Parts to copy, in beam order. */
+    public static List<Part> copied(Design design, List<String> parts) {
+        return design.parts().stream().filter(p -> parts.contains(p.name())).toList();
+    }
+
     private static Outcome<Design> deleted(Laid laid, List<String> names) {
         Design design = laid.design();
         for (String name : names) {
@@ -131,9 +141,7 @@ public final class PartEdits {
     /** Copies of parts behind the last of them, under free names. */
     public static Edit duplicate(List<String> parts) {
         return Edit.of("duplicate " + several(parts), laid -> {
-            List<Part> copied = laid.design().parts().stream()
-                    .filter(p -> parts.contains(p.name()))
-                    .toList();
+            List<Part> copied = copied(laid.design(), parts);
             return copied.isEmpty()
                     ? nothing("duplicate")
                     : pasted(

@@ -1,10 +1,12 @@
 package twofold.edit;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.data.Offset.offset;
 import static twofold.edit.Edited.by;
 import static twofold.edit.Edited.refusal;
 import static twofold.edit.Edited.sample;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -16,6 +18,7 @@ import twofold.design.Hold;
 import twofold.design.Lever;
 import twofold.design.Part;
 import twofold.design.Place;
+import twofold.design.Planes;
 import twofold.design.Quantity;
 import twofold.design.Requirement;
 import twofold.design.Tolerance;
@@ -68,7 +71,7 @@ class AskEditsTest {
         Requirement over = new Requirement(
                 Quantity.STABILITY_MARGIN,
                 Optional.empty(),
-                Optional.of(twofold.design.Planes.BOTH),
+                Optional.of(Planes.BOTH),
                 Optional.empty(),
                 new Bound.AtLeast(0),
                 Optional.of("gap"));
@@ -140,7 +143,7 @@ class AskEditsTest {
     @ValueSource(strings = {"z-fold-rod", "bow-tie-doubler", "x-fold", "gas-tube", "triangle-ring", "v-fold-pumped"})
     void whatIsOfferedIsAccepted(String sample) {
         Laid laid = sample(sample);
-        List<Place> places = new java.util.ArrayList<>(Offers.legs(laid.design()));
+        List<Place> places = new ArrayList<>(Offers.legs(laid.design()));
         laid.design().parts().stream().map(Part::name).map(Place::of).forEach(places::add);
         int offered = 0;
         for (Place place : places) {
@@ -173,7 +176,7 @@ class AskEditsTest {
         assertThat(lever.range()).isEqualTo(new Lever.Range.Span(0.09, 0.11));
         assertThat(lever.name()).isEqualTo("roc Fold 1");
         assertThat(Offers.value(z, "leg_mm", gap))
-                .hasValueCloseTo(z.legs().get(1).path(), org.assertj.core.data.Offset.offset(1e-15));
+                .hasValueCloseTo(z.legs().get(1).path(), offset(1e-15));
         assertThat(Offers.value(z, "along_mm", Place.of("Rod")))
                 .hasValue(z.legs().get(1).path() / 2);
         assertThat(Offers.lever(z, "roc_mm", Place.of("End A")).range()).isEqualTo(new Lever.Range.Span(0.09, 0.11));

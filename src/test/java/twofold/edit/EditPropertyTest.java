@@ -1,6 +1,7 @@
 package twofold.edit;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
@@ -16,6 +17,8 @@ import twofold.Samples;
 import twofold.design.Design;
 import twofold.design.Hold;
 import twofold.design.Mirror;
+import twofold.design.Place;
+import twofold.design.Turn;
 import twofold.file.DesignReader;
 import twofold.file.DesignWriter;
 import twofold.file.ReadDesign;
@@ -106,9 +109,7 @@ class EditPropertyTest {
                     // m; the mover keeps what is held to 1e-9 mm.
                     assertThat(Offers.value(now, "leg_mm", h.leg()).orElseThrow())
                             .as(edit.name() + " with " + h.words())
-                            .isCloseTo(
-                                    Offers.value(before, "leg_mm", h.leg()).orElseThrow(),
-                                    org.assertj.core.api.Assertions.within(1e-12));
+                            .isCloseTo(Offers.value(before, "leg_mm", h.leg()).orElseThrow(), within(1e-12));
                 }
             }
         }
@@ -122,9 +123,8 @@ class EditPropertyTest {
         Laid before = Edited.laid(Samples.design(sample));
         Laid bare = Edited.laid(before.design().withHolds(List.of()));
         int folds = 0;
-        for (twofold.design.Place leg : Offers.legs(bare.design())) {
-            Outcome<Laid> in =
-                    MirrorEdits.insert(leg, 0.03, twofold.design.Turn.LEFT).on(bare);
+        for (Place leg : Offers.legs(bare.design())) {
+            Outcome<Laid> in = MirrorEdits.insert(leg, 0.03, Turn.LEFT).on(bare);
             if (in.value().isEmpty()) {
                 continue;
             }

@@ -1,13 +1,17 @@
 package twofold.edit;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 import static twofold.edit.Edited.by;
 import static twofold.edit.Edited.refusal;
 import static twofold.edit.Edited.sample;
 
+import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import twofold.design.Crystal;
+import twofold.design.Entry;
 import twofold.design.Field;
 import twofold.design.Glass;
 import twofold.design.Kind;
@@ -19,6 +23,7 @@ import twofold.design.Shape;
 import twofold.design.Side;
 import twofold.design.TiltPlane;
 import twofold.design.Turn;
+import twofold.design.Unit;
 import twofold.layout.Follow;
 import twofold.layout.Laid;
 
@@ -52,7 +57,7 @@ class FieldEditsTest {
                 if (field.need() != Field.Need.OTHER_FORM
                         && part.values().find(field).isPresent()) {
                     Object value = part.values().find(field).orElseThrow();
-                    String text = twofold.design.Entry.text(field, value);
+                    String text = Entry.text(field, value);
                     Laid same = by(FieldEdits.set(part.name(), field, text), laid);
                     assertThat(same.design()).as("%s of %s", field, part.name()).isEqualTo(laid.design());
                     fields++;
@@ -84,7 +89,7 @@ class FieldEditsTest {
         assertThat(((Crystal) part(index, "Rod")).slab().glass().index()).hasValue(1.8);
         Laid material = by(FieldEdits.set("Rod", Field.MATERIAL, "YAG"), index);
         assertThat(((Crystal) part(material, "Rod")).slab().glass())
-                .isEqualTo(new Glass(java.util.OptionalDouble.empty(), Optional.of("YAG")));
+                .isEqualTo(new Glass(OptionalDouble.empty(), Optional.of("YAG")));
         assertThat(refusal(FieldEdits.set("Rod", Field.MATERIAL, "YAGG"), z)).contains("nearest is \"YAG\"");
         assertThat(refusal(FieldEdits.clear("Rod", Field.MATERIAL), z)).contains("neither index nor material");
     }
@@ -114,10 +119,9 @@ class FieldEditsTest {
         Optional<Follow> usual = Optional.empty();
         Laid leg = by(MirrorEdits.leg(Place.of("Fold 1", "Fold 2"), "11 cm", usual), z);
         // m; the mover reaches 1e-9 mm.
-        assertThat(leg.legs().get(1).path()).isCloseTo(0.11, org.assertj.core.api.Assertions.within(1e-12));
+        assertThat(leg.legs().get(1).path()).isCloseTo(0.11, within(1e-12));
         Laid angle = by(MirrorEdits.incidence("Fold 1", "7°30'", usual), z);
-        assertThat(Edited.incidence(angle, "Fold 1"))
-                .isCloseTo(Math.toRadians(7.5), org.assertj.core.api.Assertions.within(1e-12));
+        assertThat(Edited.incidence(angle, "Fold 1")).isCloseTo(Math.toRadians(7.5), within(1e-12));
         assertThat(refusal(MirrorEdits.x("Fold 2", "a", Follow.ARM_FOLLOWS), z)).contains("no number");
         assertThat(Edited.at(by(MirrorEdits.y("Fold 2", "1 in", Follow.ARM_FOLLOWS), z), "Fold 2")
                         .y())
@@ -129,7 +133,7 @@ class FieldEditsTest {
         assertThat(by(FieldEdits.title("Other"), z).design().title()).isEqualTo("Other");
         assertThat(by(FieldEdits.notes("a\nb"), z).design().notes()).isEqualTo("a\nb");
         assertThat(by(FieldEdits.wavelength("0.79 µm"), z).design().wavelength())
-                .isEqualTo(twofold.design.Unit.NM.toSi(790));
+                .isEqualTo(Unit.NM.toSi(790));
         assertThat(refusal(FieldEdits.wavelength("20 mm"), z)).contains("a number from 1 to 1000000");
         assertThat(refusal(FieldEdits.wavelength("8 µm"), z)).contains("outside the range of its fit");
     }
@@ -145,7 +149,7 @@ class FieldEditsTest {
         Laid closing = by(PartEdits.insert(Kind.LENS, Place.of("Flat", "Curved 1"), 0.05), ring);
         assertThat(refusal(FieldEdits.shape(Shape.STANDING_WAVE), closing))
                 .contains("Lens 1 on the leg that closes the ring");
-        Laid two = by(PartEdits.delete(java.util.List.of("Fold 1", "Fold 2")), z);
+        Laid two = by(PartEdits.delete(List.of("Fold 1", "Fold 2")), z);
         assertThat(refusal(FieldEdits.shape(Shape.RING), two)).contains("at least 3 mirrors");
     }
 }

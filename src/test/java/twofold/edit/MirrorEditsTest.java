@@ -229,7 +229,6 @@ class MirrorEditsTest {
         Laid held = holding(z, new Hold.Position("Fold 1"), new Hold.Position("Fold 2"), new Hold.Position("End A"));
         assertThat(refusal(MirrorEdits.leg(Place.of("Fold 1", "Fold 2"), 0.12), held))
                 .contains("in the way", "the hold released");
-        // End A stays, and with it the distance to Fold 1 alone; the triangle inequality forbids the rest.
         assertThat(refusal(MirrorEdits.incidence("End A", 0.1), z)).contains("met head-on");
         assertThat(refusal(MirrorEdits.incidence("Fold 1", Math.toRadians(89)), z))
                 .isNotEmpty();

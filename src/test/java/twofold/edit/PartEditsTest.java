@@ -151,6 +151,16 @@ class PartEditsTest {
     }
 
     @Test
+    void whatIsCutCanBePasted() {
+        List<Part> copied = PartEdits.copied(z.design(), List.of("Rod"));
+        Laid cut = by(PartEdits.cut(List.of("Rod")), z);
+        assertThat(PartEdits.cut(List.of("Rod")).name()).isEqualTo("cut Rod");
+        Laid back = by(PartEdits.paste(copied, Optional.of("Fold 1")), cut);
+        assertThat(back.design().parts()).isEqualTo(z.design().parts());
+        assertThat(refusal(PartEdits.paste(List.of(), Optional.empty()), z)).contains("no part to paste");
+    }
+
+    @Test
     void aNameIsFollowedEverywhere() {
         Design renamed = by(PartEdits.rename("Fold 1", " Curved "), z).design();
 
