@@ -6,10 +6,11 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Consumer;
+import java.util.function.Function;
+import java.util.function.Predicate;
 import java.util.function.UnaryOperator;
 import twofold.cavity.Cavity;
 import twofold.design.Design;
-import twofold.design.Kind;
 import twofold.design.Part;
 import twofold.design.Problem;
 import twofold.design.Subject;
@@ -41,8 +42,6 @@ public final class Session {
     private final Optional<Keeper> keeper;
     private Shown shown = Shown.NOTHING;
     private Optional<Document> document = Optional.empty();
-    private Optional<Preview> preview = Optional.empty();
-    private Selection selection = Selection.NONE;
     private Optional<Double> pointed = Optional.empty();
     private List<Problem> obstacles = List.of();
     private Optional<Refused> refused = Optional.empty();
@@ -51,9 +50,6 @@ public final class Session {
     private Optional<String> trouble = Optional.empty();
     private int documents;
     private int newest;
-
-    /** What is shown of an edit before it is made; and the selection to return to, unless the person selects meanwhile. */
-    private record Preview(Edit edit, Cavity cavity, Optional<Selection> home) {}
 
     /**
      * Makes a session with nothing open and no journal.
@@ -91,19 +87,16 @@ public final class Session {
     }
 
     private void show() {
-        Optional<Cavity> cavity = cavity();
-        Optional<History> history = document.map(Document::history);
-        boolean isPreview = preview.isPresent();
         Shown next = new Shown(
                 document.map(Document::number).orElse(0),
                 document.map(Document::source),
-                cavity,
-                selection,
+                document.map(Document::cavity),
+                document.map(Document::selection).orElse(Selection.NONE),
                 pointed,
-                isPreview ? preview.map(p -> p.edit().name()) : history.flatMap(History::undoName),
-                isPreview ? Optional.empty() : history.flatMap(History::redoName),
-                history.map(History::isUnsaved).orElse(false),
-                isPreview,
+                document.flatMap(Document::undoName),
+                document.flatMap(Document::redoName),
+                document.map(d -> d.history().isUnsaved()).orElse(false),
+                document.map(Document::isPreview).orElse(false),
                 obstacles,
                 refused,
                 isChangedOnDisk,
@@ -114,13 +107,8 @@ public final class Session {
         }
     }
 
-    /** What is to be seen: the preview, else the document. */
-    private Optional<Cavity> cavity() {
-        return preview.map(Preview::cavity).or(() -> document.map(Document::cavity));
-    }
-
     private Optional<Design> design() {
-        return cavity().map(c -> c.laid().design());
+        return document.map(d -> d.cavity().laid().design());
     }
 
     static String words(Exception why) {
@@ -168,8 +156,9 @@ public final class Session {
                 again(document.orElseThrow(), opened);
             } else if (isUntouched) {
                 Cavity cavity = opened.cavity().get();
-                begin(source, History.ofSaved(cavity.laid().design()), cavity);
-                document.orElseThrow().holds(opened.print());
+                Design read = cavity.laid().design();
+                Document next = begin(source, History.ofSaved(read), cavity);
+                next.saved(source, read, opened.print());
             } else {
                 String why = "the open design was edited meanwhile; open the file again";
                 refuse(source, List.of(), Optional.of(why), Set.of(opened.print()));
@@ -186,7 +175,7 @@ public final class Session {
     private void again(Document mine, Opened opened) {
         Cavity cavity = opened.cavity().orElseThrow();
         Design read = cavity.laid().design();
-        become(mine, Edit.of("reload " + mine.source().name(), now -> Outcome.of(read)), cavity);
+        mine.become(Edit.of("reload " + mine.source().name(), now -> Outcome.of(read)), cavity);
         mine.saved(mine.source(), read, opened.print());
         refused = Optional.empty();
         trouble = Optional.empty();
@@ -213,24 +202,14 @@ public final class Session {
         return laid;
     }
 
-    private void begin(Source source, History history, Cavity cavity) {
-        document = Optional.of(new Document(++documents, source, history, cavity));
-        preview = Optional.empty();
-        selection = first(cavity.laid().design(), Kind.CRYSTAL);
+    private Document begin(Source source, History history, Cavity cavity) {
+        Document next = new Document(++documents, source, history, cavity);
+        document = Optional.of(next);
         pointed = Optional.empty();
         obstacles = List.of();
         refused = Optional.empty();
         trouble = Optional.empty();
-    }
-
-    /** The first crystal is what a person asks about. */
-    private static Selection first(Design design, Kind kind) {
-        for (int i = 0; i < design.parts().size(); i++) {
-            if (design.parts().get(i).kind() == kind) {
-                return Selection.of(i);
-            }
-        }
-        return Selection.NONE;
+        return next;
     }
 
     /** Reads again what was last asked for. */
@@ -278,7 +257,11 @@ public final class Session {
 
     /** What an edit would lead to, without making it. */
     public Outcome<Laid> would(Edit edit) {
-        return document.map(d -> edit.on(d.cavity().laid()))
+        return ask(d -> d.would(edit));
+    }
+
+    private Outcome<Laid> ask(Function<Document, Outcome<Laid>> what) {
+        return document.map(what)
                 .orElseGet(() ->
                         Outcome.failed(List.of(new Problem(Subject.DOCUMENT, "nothing is open", "an open design"))));
     }
@@ -294,20 +277,7 @@ public final class Session {
      * @return what it led to, or why it was refused: then nothing changes
      */
     public Outcome<Laid> edit(Edit edit) {
-        commit();
-        Outcome<Laid> outcome = would(edit);
-        obstacles = outcome.problems();
-        outcome.value().ifPresent(laid -> become(document.orElseThrow(), edit, Cavity.solve(laid)));
-        settle();
-        return outcome;
-    }
-
-    /** The document becomes what an edit made of it, and the selection follows. */
-    private void become(Document mine, Edit edit, Cavity next) {
-        Design before = design().orElseThrow();
-        preview = Optional.empty();
-        mine.become(edit, next);
-        selection = selection.after(before, mine.design());
+        return attempt(d -> d.edit(edit));
     }
 
     /**
@@ -315,74 +285,47 @@ public final class Session {
      * the one before, in no history until {@link #commit}. Where it is refused, what was shown stays.
      */
     public Outcome<Laid> preview(Edit edit) {
-        Outcome<Laid> outcome = would(edit);
+        return attempt(d -> d.preview(edit));
+    }
+
+    private Outcome<Laid> attempt(Function<Document, Outcome<Laid>> what) {
+        Outcome<Laid> outcome = ask(what);
         obstacles = outcome.problems();
-        outcome.value().ifPresent(laid -> {
-            Design before = design().orElseThrow();
-            Optional<Selection> home = preview.isPresent() ? preview.get().home() : Optional.of(selection);
-            preview = Optional.of(new Preview(edit, Cavity.solve(laid), home));
-            selection = selection.after(before, laid.design());
-        });
         settle();
         return outcome;
     }
 
     /** Makes what the preview shows one step of the history; does nothing without a preview. */
     public void commit() {
-        preview.ifPresent(p -> {
-            become(document.orElseThrow(), p.edit(), p.cavity());
-            obstacles = List.of();
-            settle();
-        });
+        move(Document::commit);
     }
 
     /** Returns from a preview to the design as it is. */
     public void abandon() {
-        preview.ifPresent(p -> {
-            Design before = p.cavity().laid().design();
-            preview = Optional.empty();
-            selection = p.home().orElseGet(() -> selection.after(before, design().orElseThrow()));
-            obstacles = List.of();
-            settle();
-        });
+        move(Document::abandon);
     }
 
     /** Takes the last step back; where a preview is shown, that alone. */
     public void undo() {
-        if (preview.isPresent()) {
-            abandon();
-        } else {
-            move(Document::undo);
-        }
+        move(Document::undo);
     }
 
     /** Does the step again that was undone last; nothing where a preview is shown. */
     public void redo() {
-        if (preview.isEmpty()) {
-            move(Document::redo);
+        move(Document::redo);
+    }
+
+    private void move(Predicate<Document> by) {
+        if (document.filter(by).isPresent()) {
+            obstacles = List.of();
+            settle();
         }
-    }
-
-    /** One step in a document's history. */
-    private interface Move {
-        boolean of(Document document);
-    }
-
-    private void move(Move by) {
-        document.ifPresent(d -> {
-            Design before = d.design();
-            if (by.of(d)) {
-                selection = selection.after(before, d.design());
-                obstacles = List.of();
-                settle();
-            }
-        });
     }
 
     /** Has the journal kept, has judged what is still open, and shows the state. */
     private void settle() {
         keeper.ifPresent(k -> k.keep(document));
-        cavity().filter(Shown::isPending).ifPresent(judge::ask);
+        document.map(Document::cavity).filter(Shown::isPending).ifPresent(judge::ask);
         show();
     }
 
@@ -390,9 +333,7 @@ public final class Session {
         if (ended instanceof Runner.Ended.Failed<Cavity> failed) {
             throw new IllegalStateException("requirements over a lever cannot be judged", failed.why());
         } else if (ended instanceof Runner.Ended.Done<Cavity> done) {
-            Cavity cavity = done.value();
-            preview = preview.map(p -> p.cavity().equals(asked) ? new Preview(p.edit(), cavity, p.home()) : p);
-            document.ifPresent(d -> d.judged(asked, cavity));
+            document.ifPresent(d -> d.judged(asked, done.value()));
             show();
         }
     }
@@ -517,19 +458,16 @@ public final class Session {
     /** Selects the part a number of steps along the beam, round the ends. */
     public void step(int by) {
         if (parts() > 0) {
-            int from = selection.lead().orElse(by > 0 ? -1 : 0);
+            int from = shown.selected().orElse(by > 0 ? -1 : 0);
             select(Optional.of(Math.floorMod(from + by, parts())));
         }
     }
 
     private void selecting(UnaryOperator<Selection> change) {
-        Selection next = change.apply(selection);
-        if (!next.equals(selection)) {
-            selection = next;
-            document.ifPresent(d -> d.history().breakRun());
-            preview = preview.map(p -> new Preview(p.edit(), p.cavity(), Optional.empty()));
+        document.ifPresent(d -> {
+            d.select(change.apply(d.selection()));
             show();
-        }
+        });
     }
 
     private boolean isPart(int index) {

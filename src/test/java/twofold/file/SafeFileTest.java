@@ -186,7 +186,7 @@ class SafeFileTest {
                 try {
                     SafeFile.write(disk, link, NEW);
                 } catch (IOException e) {
-                    said = Optional.ofNullable(e.getMessage());
+                    said = Optional.of(String.valueOf(e.getMessage()));
                 }
                 if (!disk.hasFailed()) {
                     assertThat(file).hasBinaryContent(NEW);
