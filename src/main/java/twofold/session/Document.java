@@ -76,6 +76,11 @@ final class Document {
         return preview.map(Preview::cavity).orElse(cavity);
     }
 
+    /** The design on the table as it is without a preview. */
+    Laid laid() {
+        return cavity.laid();
+    }
+
     private Design seen() {
         return cavity().laid().design();
     }
@@ -98,7 +103,7 @@ final class Document {
 
     /** What an edit of the design as it is without previews would lead to. */
     Outcome<Laid> would(Edit edit) {
-        return edit.on(cavity.laid());
+        return edit.on(laid());
     }
 
     Outcome<Laid> edit(Edit edit) {

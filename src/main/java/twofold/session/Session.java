@@ -268,7 +268,7 @@ public final class Session {
 
     /** The design on the table as it is without a preview. */
     public Optional<Laid> laid() {
-        return document.map(d -> d.cavity().laid());
+        return document.map(Document::laid);
     }
 
     /**
@@ -278,6 +278,18 @@ public final class Session {
      */
     public Outcome<Laid> edit(Edit edit) {
         return attempt(d -> d.edit(edit));
+    }
+
+    /** Makes an edit that takes long to work out, which the runner does; given up where the design has changed meanwhile. */
+    public void editLater(Edit edit) {
+        laid().ifPresent(now -> runner.run(() -> edit.on(now), ended -> {
+            if (ended instanceof Runner.Ended.Failed<Outcome<Laid>> failed) {
+                throw new IllegalStateException("an edit failed: " + edit.name(), failed.why());
+            } else if (ended instanceof Runner.Ended.Done<Outcome<Laid>> done && laid().equals(Optional.of(now))) {
+                Outcome<Laid> found = done.value();
+                edit(new Edit(edit.name(), edit.joins(), laid -> found.then(l -> Outcome.of(l.design()))));
+            }
+        }));
     }
 
     /**

@@ -44,7 +44,7 @@ final class Bars {
                 "New…",
                 "Shortcut+N",
                 "Begins a new design",
-                () -> new NewDesign(window()).showAndWait().ifPresent(documents::create));
+                () -> new NewDesign(window(), editor.runner()).showAndWait().ifPresent(documents::create));
         open = Action.of("open", "Open…", "Shortcut+O", "Opens a design file", () -> documents.open());
         save = Action.of("save", "Save", "Shortcut+S", "Saves the design in its file", documents::save)
                 .unless(edits::closed);

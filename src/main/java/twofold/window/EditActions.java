@@ -107,7 +107,7 @@ final class EditActions {
                         "Shortcut+M",
                         "Slides the selected part along its leg to the middle of the nearest stretch in which both planes"
                                 + " are stable",
-                        () -> edit(n -> NearestStable.edit(n.get(n.size() - 1))))
+                        () -> session.selectedPart().ifPresent(p -> session.editLater(NearestStable.edit(p.name()))))
                 .unless(this::selectedNone);
     }
 

@@ -42,6 +42,7 @@ import twofold.window.panel.ZonesPane;
 
 /** The editor's panes, wired to one session. A node: the application puts it into a window, a test into a stage. */
 public final class Editor extends BorderPane {
+    private final Runner runner;
     private final Session session;
     private final Following following;
     private final BenchPane bench;
@@ -72,15 +73,16 @@ public final class Editor extends BorderPane {
 
     /** Makes the editor with nothing open. */
     public Editor(Runner runner) {
-        this(listener -> new Session(runner, listener));
+        this(runner, listener -> new Session(runner, listener));
     }
 
     /** Makes the editor with nothing open, which keeps a journal of unsaved work. */
     Editor(Runner runner, Journal journal, Runner scribe) {
-        this(listener -> new Session(runner, journal, scribe, listener));
+        this(runner, listener -> new Session(runner, journal, scribe, listener));
     }
 
-    private Editor(Function<Consumer<Shown>, Session> sessions) {
+    private Editor(Runner runner, Function<Consumer<Shown>, Session> sessions) {
+        this.runner = runner;
         session = sessions.apply(this::show);
         problems = new ProblemsPane(session::dismiss);
         following = new Following(session);
@@ -154,6 +156,11 @@ public final class Editor extends BorderPane {
     /** The document. */
     public Session session() {
         return session;
+    }
+
+    /** Where what takes long is worked out. */
+    Runner runner() {
+        return runner;
     }
 
     /** What else moves when a mirror is moved. */

@@ -1,6 +1,5 @@
 package twofold.window;
 
-import java.util.Optional;
 import javafx.event.ActionEvent;
 import javafx.geometry.Insets;
 import javafx.scene.Node;
@@ -14,15 +13,23 @@ import javafx.scene.control.TabPane;
 import javafx.scene.layout.Region;
 import javafx.stage.Window;
 import twofold.design.Design;
+import twofold.session.Runner;
 
 /** Asks what a new design starts from: a shape with its numbers, or a list of legs and angles. */
 final class NewDesign extends Dialog<Design> {
     private final ShapeForm shape = new ShapeForm();
     private final ListForm list = new ListForm();
     private final TabPane ways;
-    private Optional<Design> made = Optional.empty();
+    private final ButtonType make = new ButtonType("Make", ButtonBar.ButtonData.OK_DONE);
+    private final Runner runner;
 
-    NewDesign(Window over) {
+    /**
+     * Makes the dialog.
+     *
+     * @param runner for the search for a stable place
+     */
+    NewDesign(Window over, Runner runner) {
+        this.runner = runner;
         setTitle("New design");
         setResizable(true);
         Dialogs.dress(this, over);
@@ -30,21 +37,16 @@ final class NewDesign extends Dialog<Design> {
         ways.setId("ways");
         ways.setTabClosingPolicy(TabPane.TabClosingPolicy.UNAVAILABLE);
         ways.setAccessibleText("What the design starts from");
-        ButtonType make = new ButtonType("Make", ButtonBar.ButtonData.OK_DONE);
         getDialogPane().setContent(ways);
         getDialogPane().setPrefSize(620, 560);
         getDialogPane().setMinHeight(Region.USE_COMPUTED_SIZE);
         getDialogPane().getButtonTypes().addAll(make, ButtonType.CANCEL);
-        if (getDialogPane().lookupButton(make) instanceof Button button) {
-            button.setId("make");
-            button.addEventFilter(ActionEvent.ACTION, e -> {
-                make();
-                if (made.isEmpty()) {
-                    e.consume();
-                }
-            });
-        }
-        setResultConverter(type -> make.equals(type) ? made.orElse(null) : null);
+        button().setId("make");
+        button().addEventFilter(ActionEvent.ACTION, e -> {
+            make();
+            e.consume();
+        });
+        setResultConverter(type -> null);
         setOnShown(e -> shape.first().requestFocus());
     }
 
@@ -56,7 +58,26 @@ final class NewDesign extends Dialog<Design> {
         return new Tab(title, content);
     }
 
+    private Button button() {
+        return (Button) getDialogPane().lookupButton(make);
+    }
+
     private void make() {
-        made = ways.getSelectionModel().getSelectedIndex() == 0 ? shape.make().value() : list.make();
+        if (ways.getSelectionModel().getSelectedIndex() == 1) {
+            list.make().ifPresent(this::made);
+            return;
+        }
+        shape.ask().ifPresent(search -> {
+            button().setDisable(true);
+            runner.run(search, ended -> {
+                button().setDisable(false);
+                shape.answer(ended).ifPresent(this::made);
+            });
+        });
+    }
+
+    private void made(Design design) {
+        setResult(design);
+        close();
     }
 }

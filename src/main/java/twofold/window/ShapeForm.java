@@ -7,6 +7,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.concurrent.Callable;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 import javafx.scene.Node;
@@ -30,6 +31,7 @@ import twofold.edit.StartingInput;
 import twofold.edit.StartingShape;
 import twofold.edit.StartingValues;
 import twofold.layout.Outcome;
+import twofold.session.Runner;
 
 /** A form that asks for a starting shape and its numbers, built from their vocabulary. What is typed survives a change of shape. */
 final class ShapeForm extends VBox {
@@ -154,8 +156,8 @@ final class ShapeForm extends VBox {
         fields.forEach((input, field) -> typed.put(input, field.getText()));
     }
 
-    /** The design, or why there is none, which the form then shows. */
-    Outcome<Design> make() {
+    /** The search for the design; empty where a number cannot be read, which the form then shows. */
+    Optional<Callable<Outcome<Design>>> ask() {
         StartingShape of = shape.getValue();
         StartingValues values = of.defaults().with(cut.getValue());
         if (material.getValue() != null) {
@@ -170,9 +172,22 @@ final class ShapeForm extends VBox {
                     ? values.with(input, number.value().get())
                     : values.without(input);
         }
-        Outcome<Design> made = problems.isEmpty() ? of.make(values) : Outcome.failed(problems);
-        refused.setText(made.problems().stream().map(ShapeForm::line).collect(Collectors.joining("\n")));
-        return made;
+        refuse(problems);
+        StartingValues asked = values;
+        return problems.isEmpty() ? Optional.of(() -> of.make(asked)) : Optional.empty();
+    }
+
+    /** The design that was found, or nothing: the form then shows why. */
+    Optional<Design> answer(Runner.Ended<Outcome<Design>> ended) {
+        if (ended instanceof Runner.Ended.Done<Outcome<Design>> done) {
+            refuse(done.value().problems());
+            return done.value().value();
+        }
+        throw new IllegalStateException("a shape cannot be made: " + ended);
+    }
+
+    private void refuse(List<Problem> problems) {
+        refused.setText(problems.stream().map(ShapeForm::line).collect(Collectors.joining("\n")));
     }
 
     private static String line(Problem problem) {

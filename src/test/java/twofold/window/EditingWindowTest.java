@@ -210,6 +210,12 @@ class EditingWindowTest {
         Point p = pixel(new Point((2 * a.x() + b.x()) / 3, (2 * a.y() + b.y()) / 3));
         stage.move(bench, p.x(), p.y() + 10);
         stage.picture("placing-light");
+        assertThat(design().parts()).hasSize(6);
+        assertThat(Stagehand.fx(() -> stage.editor().session().laid())
+                        .orElseThrow()
+                        .design()
+                        .parts())
+                .hasSize(5);
         stage.click(bench, p.x(), p.y() + 10);
         assertThat(shown().isPreview()).isFalse();
         assertThat(design().parts().get(1).name()).isEqualTo("Plate 1");

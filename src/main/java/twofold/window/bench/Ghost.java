@@ -2,14 +2,12 @@ package twofold.window.bench;
 
 import java.util.Optional;
 import twofold.design.Kind;
-import twofold.design.Part;
-import twofold.design.Place;
 import twofold.design.Point;
 import twofold.edit.Edit;
 import twofold.edit.MirrorEdits;
 import twofold.edit.PartEdits;
+import twofold.edit.Spot;
 import twofold.layout.Laid;
-import twofold.layout.Leg;
 
 /** A new part at the pointer, before it is placed. */
 final class Ghost {
@@ -22,27 +20,13 @@ final class Ghost {
      * @return empty where no leg is within reach
      */
     static Optional<Edit> at(Laid laid, Kind kind, Point point, double reach) {
-        Leg nearest = null;
-        Leg.Foot foot = null;
-        for (Leg leg : laid.legs()) {
-            Leg.Foot here = leg.nearest(point);
-            if (here.distance() <= reach && (foot == null || here.distance() < foot.distance())) {
-                nearest = leg;
-                foot = here;
-            }
-        }
-        if (nearest == null || foot == null) {
+        Spot spot = Spot.nearest(laid, point);
+        if (spot.distance() > reach) {
             return Optional.empty();
         }
-        Place leg = Place.of(name(laid, nearest.from()), name(laid, nearest.to()));
         return Optional.of(
                 kind == Kind.MIRROR
-                        ? MirrorEdits.insert(leg, foot.path(), foot.side())
-                        : PartEdits.insert(kind, leg, foot.path()));
-    }
-
-    private static String name(Laid laid, int part) {
-        Part found = laid.design().parts().get(part);
-        return found.name();
+                        ? MirrorEdits.insert(spot.leg(), spot.along(), spot.side())
+                        : PartEdits.insert(kind, spot.leg(), spot.along()));
     }
 }
