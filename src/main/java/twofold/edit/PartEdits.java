@@ -78,7 +78,7 @@ public final class PartEdits {
         return Edit.of("delete " + several(parts), laid -> deleted(laid, parts));
     }
 
-    /** The same under the name that it has when the parts were copied before. */
+    /** {@link #delete}, named for parts that were {@link #copied} just before. */
     public static Edit cut(List<String> parts) {
         return Edit.of("cut " + several(parts), laid -> deleted(laid, parts));
     }
