@@ -5,6 +5,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.concurrent.Semaphore;
 import javafx.application.Platform;
+import javafx.event.Event;
 import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
@@ -20,6 +21,8 @@ import javafx.scene.control.ScrollPane;
 import javafx.scene.control.SplitPane;
 import javafx.scene.control.Tab;
 import javafx.scene.control.TabPane;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
@@ -27,11 +30,14 @@ import javafx.scene.layout.Pane;
 import javafx.scene.layout.VBox;
 import javafx.scene.paint.Color;
 import javafx.stage.Stage;
+import twofold.design.Mirror;
+import twofold.design.Part;
 import twofold.file.DesignWriter;
 import twofold.session.Runner;
+import twofold.session.Session;
 import twofold.window.Editor;
 
-/** A window to measure: the editor on the twelve-part ring, the same stock controls with empty canvases, or one canvas. */
+/** A window to measure: the editor on the twelve-part ring, redrawn or edited, the same stock controls with empty canvases, or one canvas. */
 final class FirstPicture {
     private static final double WIDTH = 1440;
     private static final double HEIGHT = 900;
@@ -63,6 +69,7 @@ final class FirstPicture {
         FirstPicture[] made = new FirstPicture[1];
         Parent root = switch (what) {
             case "editor" -> editor(redraw, made);
+            case "edit" -> edited(redraw, made);
             case "empty" -> empty();
             default -> canvas(redraw, made);
         };
@@ -96,6 +103,36 @@ final class FirstPicture {
         redraw[0] = () -> {
             editor.session().point(java.util.Optional.of(0.01 + 1e-3 * (made[0].step % 900)));
             editor.session().select(java.util.Optional.of(made[0].step % 2 == 0 ? 1 : 3));
+        };
+        return editor;
+    }
+
+    /** Every step nudges a mirror by key, there and back. */
+    private static Parent edited(Runnable[] redraw, FirstPicture[] made) {
+        Parent editor = editor(redraw, made);
+        Session session = ((Editor) editor).session();
+        session.select(session.laid().orElseThrow().design().parts().stream()
+                .filter(Mirror.class::isInstance)
+                .map(Part::name)
+                .skip(2)
+                .limit(1)
+                .toList());
+        redraw[0] = () -> {
+            int steps = session.shown().undo().isPresent() ? 1 : 0;
+            Event.fireEvent(
+                    editor.lookup("#bench"),
+                    new KeyEvent(
+                            KeyEvent.KEY_PRESSED,
+                            "",
+                            "",
+                            made[0].step % 2 == 0 ? KeyCode.RIGHT : KeyCode.LEFT,
+                            false,
+                            true,
+                            false,
+                            false));
+            if (steps == 0 && session.shown().undo().isEmpty()) {
+                throw new IllegalStateException("the key edited nothing");
+            }
         };
         return editor;
     }

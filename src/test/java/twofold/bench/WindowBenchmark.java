@@ -15,8 +15,8 @@ import javafx.application.Platform;
 
 /**
  * What drawing costs: the CPU time of the toolkit's and the renderer's thread for one redraw of bench, beam and close-up of
- * the twelve-part ring at 1440 × 900 in software, in blocks that alternate with an empty canvas of that size; and the time
- * from the start of the process to the first picture beside a window with the same stock controls and empty canvases.
+ * the twelve-part ring at 1440 × 900 in software, and for an edit of it from the key to the finished frame, in blocks that alternate with an empty canvas
+ * of that size; and the time from the start of the process to the first picture beside a window with the same stock controls and empty canvases.
  */
 public final class WindowBenchmark {
     private static final int BLOCKS = 5;
@@ -37,12 +37,16 @@ public final class WindowBenchmark {
         Platform.setImplicitExit(false);
         FirstPicture full = fx(() -> FirstPicture.open("editor", () -> {}));
         FirstPicture bare = fx(() -> FirstPicture.open("canvas", () -> {}));
+        FirstPicture edit = fx(() -> FirstPicture.open("edit", () -> {}));
         List<Double> drawn = new ArrayList<>();
+        List<Double> edited = new ArrayList<>();
         List<Double> floor = new ArrayList<>();
         block(full, new ArrayList<>());
+        block(edit, new ArrayList<>());
         block(bare, new ArrayList<>());
         for (int i = 0; i < BLOCKS; i++) {
             block(full, drawn);
+            block(edit, edited);
             block(bare, floor);
         }
         System.out.printf(
@@ -53,6 +57,7 @@ public final class WindowBenchmark {
                 "95 % ms",
                 "÷ empty");
         row("redraw, CPU of both threads", drawn, floor);
+        row("an edit, key to finished frame", edited, floor);
         row("empty canvas", floor, floor);
         row("start to first picture, wall", editor, empty);
         row("same controls, empty canvases", empty, empty);
