@@ -8,15 +8,22 @@ import javafx.stage.Window;
 /** Texts that open in a window of their own. */
 final class Words {
     private static final String KEYS = """
+            Bench
+              drag a mirror or a part: move it;  Tab: what follows;  Esc: abandon
+              arrows: 0.1 mm, Shift 1 mm, Ctrl 0.01 mm;  comma, full stop: turn 0.1°, Ctrl 0.01°
+              Ctrl+1 to Ctrl+6: place a mirror, lens, plate, crystal, aperture, matrix;  Enter or click puts it down
+
             Bench and beam
               wheel, + and −: zoom;  Home: show all
               middle button, space bar with the first, Alt with an arrow: pan
-              click, Page Up, Page Down: select a part;  Esc: select none
+              click, Page Up, Page Down: select a part;  Ctrl or Shift with a click: several;  Esc: none
 
             Everywhere
-              Ctrl+O: open;  F5: reload;  Ctrl+0: show all
-              Ctrl+T: light or dark;  F6: next pane;  Tab: next control
-              Ctrl+Shift+C: copy the figures of the selected part in full precision""";
+              Ctrl+N: new;  Ctrl+O: open;  Ctrl+S, Ctrl+Shift+S: save;  F5: reload
+              Ctrl+Z, Ctrl+Shift+Z: undo, redo;  Ctrl+X, C, V: cut, copy, paste;  Ctrl+D: duplicate;  Delete
+              Ctrl+A: select all;  F2: rename;  Alt+Page Up, Alt+Page Down: along the beam
+              Ctrl+M: nearest stable place;  Ctrl+0: show all;  Ctrl+T: light or dark
+              F6: next pane;  Tab: next control;  Ctrl+Shift+C: copy the part's figures""";
 
     private static final String ABOUT = """
             Twofold designs folded and ring laser cavities in both planes.
@@ -42,7 +49,7 @@ final class Words {
         alert.setHeaderText(title);
         alert.setGraphic(null);
         alert.getDialogPane().setMinHeight(Region.USE_PREF_SIZE);
-        alert.getDialogPane().setPrefWidth(560);
+        alert.getDialogPane().setPrefWidth(680);
         alert.getDialogPane().getStylesheets().setAll(over.getScene().getRoot().getStylesheets());
         alert.getDialogPane().setStyle(over.getScene().getRoot().getStyle());
         alert.getDialogPane().getStyleClass().add("root");
