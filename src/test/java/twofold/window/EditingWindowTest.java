@@ -9,17 +9,14 @@ import java.util.Optional;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
 import javafx.scene.control.Button;
-import javafx.scene.control.DialogPane;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListView;
 import javafx.scene.control.TabPane;
 import javafx.scene.control.TextField;
-import javafx.scene.control.TextInputControl;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
-import javafx.stage.Window;
 import javafx.stage.WindowEvent;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
@@ -33,7 +30,6 @@ import twofold.design.Point;
 import twofold.file.DesignReader;
 import twofold.file.DesignWriter;
 import twofold.layout.Laid;
-import twofold.picture.BenchView;
 import twofold.session.Crash;
 import twofold.session.Shown;
 import twofold.window.bench.BenchPane;
@@ -80,24 +76,12 @@ class EditingWindowTest {
         return ((Mirror) design().parts().get(design().indexOf(mirror).orElseThrow())).at();
     }
 
-    /** The pixel of a part's middle on the bench. */
     private Point pixel(String part) throws Exception {
-        Laid laid = laid();
-        int index = laid.design().indexOf(part).orElseThrow();
-        Point on = laid.design().parts().get(index) instanceof Mirror m
-                ? m.at()
-                : laid.legs().stream()
-                        .flatMap(l -> l.parts().stream()
-                                .filter(s -> s.part() == index)
-                                .map(s -> l.at(s.middle())))
-                        .findFirst()
-                        .orElseThrow();
-        return pixel(on);
+        return stage.pixel(bench, part);
     }
 
     private Point pixel(Point on) throws Exception {
-        BenchView view = Stagehand.fx(() -> bench.view().orElseThrow());
-        return new Point(view.viewport().x(on.x()), view.viewport().y(on.y()));
+        return stage.pixel(bench, on);
     }
 
     private void select(String part) throws Exception {
@@ -412,41 +396,19 @@ class EditingWindowTest {
                 .contains(mine);
     }
 
-    /** The dialog that is open. */
-    private Scene dialog() throws Exception {
-        stage.settle();
-        return Stagehand.fx(() -> Window.getWindows().stream()
-                .filter(w -> w != stage.stage() && w.isShowing() && w.getScene().getRoot() instanceof DialogPane)
-                .findFirst()
-                .orElseThrow()
-                .getScene());
-    }
-
-    private void type(Scene dialog, String id, String text) throws Exception {
-        Stagehand.fx(() -> {
-            ((TextInputControl) dialog.lookup("#" + id)).setText(text);
-            return true;
-        });
-    }
-
-    private void fire(Scene dialog, String id) throws Exception {
-        Stagehand.later(() -> ((Button) dialog.lookup("#" + id)).fire());
-        stage.settle();
-    }
-
     @Test
     void aNewZStartsInsideItsZone() throws Exception {
         answers.unsaved = Asks.Unsaved.DISCARD;
         Stagehand.later(() -> ((Button) stage.editor().lookup("#new")).fire());
-        Scene dialog = dialog();
-        type(dialog, "input-fold_1", "7 parsecs");
-        fire(dialog, "make");
+        Scene dialog = stage.dialog();
+        stage.type(dialog, "input-fold_1", "7 parsecs");
+        stage.fire(dialog, "make");
         Label refused = (Label) dialog.lookup("#refused");
         assertThat(refused.getText()).contains("radius of Fold 1").contains("parsecs");
         stage.picture(dialog, "new-refused-light");
-        type(dialog, "input-fold_1", "15 cm");
-        type(dialog, "input-fold_2", "150");
-        fire(dialog, "make");
+        stage.type(dialog, "input-fold_1", "15 cm");
+        stage.type(dialog, "input-fold_2", "150");
+        stage.fire(dialog, "make");
         assertThat(design().title()).contains("Z-fold");
         assertThat(((Mirror) design().parts().get(1)).radius()).isEqualTo(0.15);
         assertThat(stage.node("said", Label.class).getText()).startsWith("Both planes are stable");
@@ -457,17 +419,17 @@ class EditingWindowTest {
     @Test
     void aNewDesignComesFromAList() throws Exception {
         Stagehand.later(() -> ((Button) stage.editor().lookup("#new")).fire());
-        Scene dialog = dialog();
+        Scene dialog = stage.dialog();
         Stagehand.fx(() -> {
             ((TabPane) dialog.lookup("#ways")).getSelectionModel().select(1);
             return true;
         });
-        type(dialog, "list", "480, 105, 620; 7.9°, 7.9x");
-        fire(dialog, "make");
+        stage.type(dialog, "list", "480, 105, 620; 7.9°, 7.9x");
+        stage.fire(dialog, "make");
         assertThat(((Label) dialog.lookup("#list-refused")).getText()).startsWith("character 22");
         stage.picture(dialog, "list-refused-light");
-        type(dialog, "list", "480, 105, 620; 7.9°, 7.9°; 100, 100");
-        fire(dialog, "make");
+        stage.type(dialog, "list", "480, 105, 620; 7.9°, 7.9°; 100, 100");
+        stage.fire(dialog, "make");
         assertThat(laid().legs().get(0).path()).isCloseTo(0.48, within(1e-12));
         assertThat(Math.toDegrees(laid().incidence().getOrDefault(1, 0.0))).isCloseTo(7.9, within(1e-9));
     }

@@ -14,14 +14,23 @@ import javafx.embed.swing.SwingFXUtils;
 import javafx.geometry.Point2D;
 import javafx.scene.Node;
 import javafx.scene.Scene;
+import javafx.scene.control.Button;
+import javafx.scene.control.DialogPane;
+import javafx.scene.control.TextInputControl;
 import javafx.scene.image.WritableImage;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
 import javafx.scene.robot.Robot;
 import javafx.stage.Stage;
+import javafx.stage.Window;
 import javax.imageio.ImageIO;
 import org.testfx.api.FxToolkit;
+import twofold.design.Mirror;
+import twofold.design.Point;
+import twofold.layout.Laid;
+import twofold.picture.BenchView;
 import twofold.session.Runner;
+import twofold.window.bench.BenchPane;
 
 /** An editor in a window for tests: made and driven on the toolkit's thread, reading and solving on the spot. */
 final class Stagehand {
@@ -258,6 +267,51 @@ final class Stagehand {
             return true;
         });
         settle();
+    }
+
+    /** The dialog that is open. */
+    Scene dialog() throws Exception {
+        settle();
+        return fx(() -> Window.getWindows().stream()
+                .filter(w -> w != stage && w.isShowing() && w.getScene().getRoot() instanceof DialogPane)
+                .findFirst()
+                .orElseThrow()
+                .getScene());
+    }
+
+    /** Puts a text into a field of a dialog. */
+    void type(Scene dialog, String id, String text) throws Exception {
+        fx(() -> {
+            ((TextInputControl) dialog.lookup("#" + id)).setText(text);
+            return true;
+        });
+    }
+
+    /** Presses a button of a dialog. */
+    void fire(Scene dialog, String id) throws Exception {
+        later(() -> ((Button) dialog.lookup("#" + id)).fire());
+        settle();
+    }
+
+    /** The pixel of a part's middle on the bench. */
+    Point pixel(BenchPane bench, String part) throws Exception {
+        Laid laid = fx(() -> editor.session().shown().cavity().orElseThrow().laid());
+        int index = laid.design().indexOf(part).orElseThrow();
+        Point on = laid.design().parts().get(index) instanceof Mirror m
+                ? m.at()
+                : laid.legs().stream()
+                        .flatMap(l -> l.parts().stream()
+                                .filter(s -> s.part() == index)
+                                .map(s -> l.at(s.middle())))
+                        .findFirst()
+                        .orElseThrow();
+        return pixel(bench, on);
+    }
+
+    /** The pixel of a place of the table on the bench. */
+    Point pixel(BenchPane bench, Point on) throws Exception {
+        BenchView view = fx(() -> bench.view().orElseThrow());
+        return new Point(view.viewport().x(on.x()), view.viewport().y(on.y()));
     }
 
     /** A picture of the whole window, kept under target for looking at. */
