@@ -22,22 +22,40 @@ import twofold.optics.Plane;
 
 /** Every figure of one part of a solved design, in the order in which a person asks for them. */
 public final class Figures {
+    /** How the size of a beam is told. */
+    public enum Across {
+        /** By its 1/e² radius. */
+        RADIUS("radius", 1),
+        /** By twice that. */
+        DIAMETER("diameter", 2);
+
+        private final String word;
+        private final double times;
+
+        Across(String word, double times) {
+            this.word = word;
+            this.times = times;
+        }
+    }
+
     private final Cavity cavity;
     private final Design design;
     private final int index;
     private final Part part;
+    private final Across across;
     private final List<Figure> figures = new ArrayList<>();
 
-    private Figures(Cavity cavity, int index) {
+    private Figures(Cavity cavity, int index, Across across) {
+        this.across = across;
         this.cavity = cavity;
         this.design = cavity.laid().design();
         this.index = index;
         this.part = design.parts().get(index);
     }
 
-    /** The figures of a part. */
-    public static List<Figure> of(Cavity cavity, int part) {
-        Figures all = new Figures(cavity, part);
+    /** The figures of a part, its fields and numbers of the plan among them. */
+    public static List<Figure> of(Cavity cavity, int part, Across across) {
+        Figures all = new Figures(cavity, part, across);
         if (all.part instanceof Mirror mirror) {
             all.mirror(mirror);
         } else {
@@ -45,6 +63,15 @@ public final class Figures {
         }
         all.beam();
         all.line();
+        return List.copyOf(all.figures);
+    }
+
+    /** The figures of a part that follow from its fields and from the plan: the beam there, and where it comes to stand. */
+    public static List<Figure> following(Cavity cavity, int part, Across across) {
+        Figures all = new Figures(cavity, part, across);
+        all.beam();
+        all.line();
+        all.stands();
         return List.copyOf(all.figures);
     }
 
@@ -99,13 +126,7 @@ public final class Figures {
     }
 
     private void standing() {
-        for (Leg leg : cavity.laid().legs()) {
-            for (Standing s : leg.parts()) {
-                if (s.part() == index) {
-                    standing(leg, s);
-                }
-            }
-        }
+        stands();
         part.values().stated().forEach((field, value) -> {
             if (value instanceof Double d
                     && !isTold(field)
@@ -113,6 +134,17 @@ public final class Figures {
                 add(capital(field.doc()), field.unit(), d);
             }
         });
+    }
+
+    /** Where a part stands that is no mirror. */
+    private void stands() {
+        for (Leg leg : cavity.laid().legs()) {
+            for (Standing s : leg.parts()) {
+                if (s.part() == index) {
+                    standing(leg, s);
+                }
+            }
+        }
     }
 
     /** Fields that the standing part tells of already. */
@@ -150,9 +182,12 @@ public final class Figures {
         for (Face face : hasTwo ? List.of(Face.ENTRY, Face.EXIT) : List.of(Face.SURFACE)) {
             String where = hasTwo ? ", " + face.word() : "";
             both(
-                    "Beam radius" + where,
+                    "Beam " + across.word + where,
                     Unit.UM,
-                    p -> cavity.mode(p).station(index, face).map(Station::radius));
+                    p -> cavity.mode(p)
+                            .station(index, face)
+                            .map(Station::radius)
+                            .map(this::wide));
             both(
                     "Wavefront curvature" + where,
                     Unit.PER_M,
@@ -175,13 +210,20 @@ public final class Figures {
         }
     }
 
+    private double wide(double radius) {
+        return across.times * radius;
+    }
+
     private void line() {
         line("", p -> cavity.line(index, p));
         line(", behind the lens", p -> cavity.line(index, p).flatMap(CrystalLine::afterLens));
     }
 
     private void line(String where, Function<Plane, Optional<CrystalLine>> line) {
-        both("Waist" + where, Unit.UM, p -> line.apply(p).map(CrystalLine::radius));
+        both(
+                "Waist " + across.word + where,
+                Unit.UM,
+                p -> line.apply(p).map(CrystalLine::radius).map(this::wide));
         both("Waist off the middle" + where, Unit.MM, p -> line.apply(p).map(CrystalLine::offset));
         both("Move it to centre" + where, Unit.MM, p -> line.apply(p).map(CrystalLine::shiftToCentre));
         both("Rayleigh length" + where, Unit.MM, p -> line.apply(p).map(CrystalLine::rayleigh));

@@ -32,8 +32,8 @@ import twofold.session.Source;
 import twofold.window.beam.BeamPane;
 import twofold.window.beam.CloseUpPane;
 import twofold.window.bench.BenchPane;
+import twofold.window.inspect.Inspector;
 import twofold.window.panel.LedgerPane;
-import twofold.window.panel.PartPane;
 import twofold.window.panel.PartsPane;
 import twofold.window.panel.ProblemsPane;
 import twofold.window.panel.RequirementsPane;
@@ -49,7 +49,7 @@ public final class Editor extends BorderPane {
     private final BeamPane beam;
     private final CloseUpPane closeUp = new CloseUpPane();
     private final StabilityPane stability = new StabilityPane();
-    private final PartPane part = new PartPane();
+    private final Inspector part;
     private final PartsPane parts;
     private final ProblemsPane problems;
     private final LedgerPane ledger = new LedgerPane();
@@ -63,6 +63,7 @@ public final class Editor extends BorderPane {
     private final Label facts = new Label();
     private final SplitPane pictures;
     private final SplitPane lower;
+    private final SplitPane tabs;
     private final SplitPane whole;
     private Consumer<String> titles = t -> {};
     private Consumer<Path> opened = p -> {};
@@ -89,6 +90,7 @@ public final class Editor extends BorderPane {
         bench = new BenchPane(session, following);
         open = session::open;
         beam = new BeamPane(session);
+        part = new Inspector(session, following);
         parts = new PartsPane(session);
         notice = new Notice(session::reload);
         lower = split(Orientation.HORIZONTAL, beam, closeUp);
@@ -102,14 +104,13 @@ public final class Editor extends BorderPane {
                 new Tab("Part", part),
                 new Tab("Zones", zones),
                 new Tab("Astigmatism", ledger));
-        VBox side = new VBox(8, stability, looks, lists);
-        VBox.setVgrow(looks, Priority.ALWAYS);
-        looks.setPrefHeight(400);
+        tabs = split(Orientation.VERTICAL, looks, lists);
+        VBox side = new VBox(8, stability, tabs);
+        VBox.setVgrow(tabs, Priority.ALWAYS);
         looks.setMinHeight(160);
-        lists.setPrefHeight(240);
-        lists.setMinHeight(140);
-        side.setMinWidth(300);
-        side.setPrefWidth(340);
+        lists.setMinHeight(120);
+        side.setMinWidth(330);
+        side.setPrefWidth(350);
         side.setMaxWidth(460);
         bench.setMinSize(420, 200);
         beam.setMinSize(320, 200);
@@ -234,7 +235,10 @@ public final class Editor extends BorderPane {
     /** Positions of the dividers, 0 to 1. */
     List<Double> dividers() {
         return List.of(
-                whole.getDividerPositions()[0], pictures.getDividerPositions()[0], lower.getDividerPositions()[0]);
+                whole.getDividerPositions()[0],
+                pictures.getDividerPositions()[0],
+                lower.getDividerPositions()[0],
+                tabs.getDividerPositions()[0]);
     }
 
     /** Moves the dividers. */
@@ -242,6 +246,7 @@ public final class Editor extends BorderPane {
         whole.setDividerPositions(positions.get(0));
         pictures.setDividerPositions(positions.get(1));
         lower.setDividerPositions(positions.get(2));
+        tabs.setDividerPositions(positions.get(3));
     }
 
     /** Shows all of the bench and of the path. */
@@ -275,7 +280,7 @@ public final class Editor extends BorderPane {
 
     /** Moves the keyboard to the next pane, or back. */
     void nextPane(boolean back) {
-        List<Node> panes = List.of(bench, beam, part.lookup("#figures-scroll"), parts.lookup("#parts"));
+        List<Node> panes = List.of(bench, beam, part.lookup("#fields-scroll"), parts.lookup("#parts"));
         int at = 0;
         for (int i = 0; i < panes.size(); i++) {
             if (holdsFocus(panes.get(i))) {

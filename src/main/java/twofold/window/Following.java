@@ -10,6 +10,7 @@ import twofold.session.Session;
 public final class Following {
     private final Session session;
     private Optional<Follow> chosen = Optional.empty();
+    private Runnable listener = () -> {};
 
     Following(Session session) {
         this.session = session;
@@ -26,9 +27,25 @@ public final class Following {
         return chosen.filter(allowed::contains).orElse(allowed.get(0));
     }
 
+    /** What the person chose, if the plan allows it; else a typed leg or incidence moves mirrors in its own usual way. */
+    public Optional<Follow> chosen() {
+        return chosen.filter(allowed()::contains);
+    }
+
     /** Chooses. */
     public void choose(Follow follow) {
-        chosen = Optional.of(follow);
+        choose(Optional.of(follow));
+    }
+
+    /** Chooses, or leaves it to what is usual. */
+    public void choose(Optional<Follow> follow) {
+        chosen = follow;
+        listener.run();
+    }
+
+    /** Is told of every choice. */
+    public void onChoice(Runnable told) {
+        listener = told;
     }
 
     /** Chooses the next that the plan allows. */

@@ -131,7 +131,7 @@ class SessionTest {
             session.openSample(name);
             var cavity = session.shown().cavity().orElseThrow();
             for (int i = 0; i < cavity.laid().design().parts().size(); i++) {
-                assertThat(Figures.of(cavity, i))
+                assertThat(Figures.of(cavity, i, Figures.Across.RADIUS))
                         .as("%s part %d", name, i)
                         .hasSizeGreaterThan(3)
                         .allSatisfy(f -> {

@@ -6,19 +6,23 @@ import java.io.File;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.concurrent.Callable;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.FutureTask;
 import javafx.application.Platform;
 import javafx.embed.swing.SwingFXUtils;
+import javafx.event.Event;
 import javafx.geometry.Point2D;
 import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.Button;
 import javafx.scene.control.DialogPane;
 import javafx.scene.control.TextInputControl;
+import javafx.scene.control.ChoiceBox;
 import javafx.scene.image.WritableImage;
 import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.input.MouseButton;
 import javafx.scene.robot.Robot;
 import javafx.stage.Stage;
@@ -312,6 +316,54 @@ final class Stagehand {
     Point pixel(BenchPane bench, Point on) throws Exception {
         BenchView view = fx(() -> bench.view().orElseThrow());
         return new Point(view.viewport().x(on.x()), view.viewport().y(on.y()));
+    }
+
+    /** Types characters, whatever key they are on, into what has the keyboard. */
+    void type(String text) throws Exception {
+        awaitKeyboard();
+        fx(() -> {
+            text.codePoints().mapToObj(Character::toString).forEach(c -> {
+                Node owner = editor.getScene().getFocusOwner();
+                Event.fireEvent(
+                        owner, new KeyEvent(KeyEvent.KEY_TYPED, c, "", KeyCode.UNDEFINED, false, false, false, false));
+            });
+            return true;
+        });
+        settle();
+    }
+
+    /** Chooses what a box of choices says in words. */
+    void choose(String id, String words) throws Exception {
+        fx(() -> {
+            choose((ChoiceBox<?>) editor.lookup("#" + id), words);
+            return true;
+        });
+        settle();
+    }
+
+    private static <T> void choose(ChoiceBox<T> box, String words) {
+        box.setValue(box.getItems().stream()
+                .filter(v -> box.getConverter().toString(v).equals(words))
+                .findFirst()
+                .orElseThrow());
+    }
+
+    /** What a box of choices shows. */
+    String chosen(String id) throws Exception {
+        return fx(() -> words((ChoiceBox<?>) editor.lookup("#" + id)));
+    }
+
+    private static <T> String words(ChoiceBox<T> box) {
+        return box.getConverter().toString(box.getValue());
+    }
+
+    /** All that a box of choices offers. */
+    List<String> choices(String id) throws Exception {
+        return fx(() -> all((ChoiceBox<?>) editor.lookup("#" + id)));
+    }
+
+    private static <T> List<String> all(ChoiceBox<T> box) {
+        return box.getItems().stream().map(box.getConverter()::toString).toList();
     }
 
     /** A picture of the whole window, kept under target for looking at. */
