@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.FutureTask;
@@ -257,6 +258,11 @@ final class Stagehand {
 
     void press(KeyCode... keys) throws Exception {
         awaitKeyboard();
+        keys(keys);
+    }
+
+    /** Presses keys for whichever window has the keyboard. */
+    void keys(KeyCode... keys) throws Exception {
         fx(() -> {
             for (KeyCode key : keys) {
                 robot.keyPress(key);
@@ -321,15 +327,38 @@ final class Stagehand {
     /** Types characters, whatever key they are on, into what has the keyboard. */
     void type(String text) throws Exception {
         awaitKeyboard();
+        type(editor.getScene(), text);
+    }
+
+    /** Types characters into what has a window's keyboard. */
+    void type(Scene scene, String text) throws Exception {
         fx(() -> {
             text.codePoints().mapToObj(Character::toString).forEach(c -> {
-                Node owner = editor.getScene().getFocusOwner();
+                Node owner = scene.getFocusOwner();
                 Event.fireEvent(
                         owner, new KeyEvent(KeyEvent.KEY_TYPED, c, "", KeyCode.UNDEFINED, false, false, false, false));
             });
             return true;
         });
         settle();
+    }
+
+    /** Types a text in place of what is in a field, and takes it. */
+    void enter(String id, String text) throws Exception {
+        Node field = fx(() -> Optional.ofNullable(editor.lookup("#" + id)))
+                .orElseThrow(() -> new AssertionError("there is no field " + id));
+        fx(() -> {
+            field.requestFocus();
+            return true;
+        });
+        settle();
+        press(KeyCode.CONTROL, KeyCode.A);
+        if (text.isEmpty()) {
+            press(KeyCode.DELETE);
+        } else {
+            type(text);
+        }
+        press(KeyCode.ENTER);
     }
 
     /** Chooses what a box of choices says in words. */
