@@ -6,13 +6,12 @@ import java.util.Optional;
 import twofold.design.Design;
 import twofold.design.Lever;
 import twofold.design.Names;
-import twofold.design.Place;
 import twofold.design.Problem;
 import twofold.layout.Laid;
 import twofold.layout.Outcome;
-import twofold.layout.Target;
 import twofold.study.Asked;
 import twofold.study.Axis;
+import twofold.study.Levered;
 import twofold.study.Question;
 
 /** What a sweep or map asks, from its arguments; what cannot be understood goes to the error stream, a line each. */
@@ -61,16 +60,8 @@ final class Levers {
 
     /** What is wrong with two levers that set the same number. */
     private static Optional<String> same(Lever a, Lever b, Design design) {
-        List<String> numbers = a.of().stream().map(p -> number(a, p, design)).toList();
-        return b.of().stream()
-                .filter(p -> numbers.contains(number(b, p, design)))
-                .findFirst()
+        return Levered.clash(design, a, b)
                 .map(place -> "--lever: found \"" + a.name() + "\" and \"" + b.name() + "\", which both set " + a.set()
                         + " of " + Names.shown(place.toString()) + "; accepted: two levers of different numbers");
-    }
-
-    /** What a lever sets at a place, the same for a leg named from either end. */
-    private static String number(Lever lever, Place place, Design design) {
-        return Target.of(design, lever.set(), place).map(Target::toString).orElse(lever.set() + " " + place);
     }
 }

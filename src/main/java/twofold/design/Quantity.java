@@ -220,6 +220,7 @@ public enum Quantity {
         String bare = json.replaceFirst("_(mm|um|mhz|deg)$", "")
                 .replaceFirst("_rayleighs$", " in Rayleigh lengths")
                 .replaceFirst("^fsr$", "free spectral range")
+                .replaceFirst("^gouy$", "Gouy phase")
                 .replace('_', ' ');
         return bare.substring(0, 1).toUpperCase(Locale.ROOT) + bare.substring(1);
     }

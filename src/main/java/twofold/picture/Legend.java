@@ -19,8 +19,11 @@ final class Legend {
         void draw(Painter painter, double x, double y);
     }
 
+    /** In a pane lower than this every row counts, px. */
+    private static final double LOW = 320;
+
     /** With more rows than this the short words are taken. */
-    private static final int ROWS = 2;
+    private final int most;
 
     private record Item(Sign sign, String words) {
         double width() {
@@ -30,6 +33,11 @@ final class Legend {
 
     private final List<Item> items = new ArrayList<>();
     private final List<Item> brief = new ArrayList<>();
+
+    /** An empty legend of a pane of a height, px. */
+    Legend(double paneHeight) {
+        most = paneHeight < LOW ? 1 : 2;
+    }
 
     /** Adds a sign with what it means, and with the same in fewer words. */
     void add(String words, String few, Sign sign) {
@@ -44,7 +52,7 @@ final class Legend {
 
     private List<List<Item>> rows(double width) {
         List<List<Item>> rows = rows(items, width);
-        return rows.size() > ROWS ? rows(brief, width) : rows;
+        return rows.size() > most ? rows(brief, width) : rows;
     }
 
     private static List<List<Item>> rows(List<Item> items, double width) {

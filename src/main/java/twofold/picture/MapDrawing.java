@@ -102,7 +102,7 @@ public final class MapDrawing {
     }
 
     private Plan plan(double width, double height) {
-        Legend legend = legend();
+        Legend legend = legend(height);
         double below = 38 + legend.height(width - 2 * RIM) + 6;
         double top = HEAD;
         double bottom = Math.max(top + 40, height - below);
@@ -130,8 +130,8 @@ public final class MapDrawing {
         return new Scale(v.at(0) - half, v.at(last) + half, begin, end);
     }
 
-    private Legend legend() {
-        Legend legend = new Legend();
+    private Legend legend(double height) {
+        Legend legend = new Legend(height);
         for (Plane plane : Plane.values()) {
             if ((plane == Plane.TANGENTIAL ? plot.tangential() : plot.sagittal()).isPresent()) {
                 legend.add(plane.word() + " zone, hatched where alone", plane.word(), (painter, x, y) -> {

@@ -81,7 +81,7 @@ public final class SweepDrawing {
             panels.computeIfAbsent(line.panel(), p -> new ArrayList<>()).add(line);
         }
         boolean zones = !plot.bands().isEmpty();
-        Legend legend = legend(zones);
+        Legend legend = legend(zones, height);
         double top = HEAD + (zones ? 2 * (NAMES + LANE) + 4 : 0);
         double bottom = height - 36 - legend.height(width - 2 * RIM) - 4;
         int room = (int) Math.max(1, Math.min(MOST, (bottom - top + GAP) / (LOWEST + GAP)));
@@ -116,8 +116,8 @@ public final class SweepDrawing {
         return new Scale(from - some, to + some, left, right);
     }
 
-    private Legend legend(boolean zones) {
-        Legend legend = new Legend();
+    private Legend legend(boolean zones, double height) {
+        Legend legend = new Legend(height);
         for (Plane plane : Plane.values()) {
             boolean used =
                     zones || plot.lines().stream().anyMatch(l -> l.plane().isPresent());
@@ -164,8 +164,8 @@ public final class SweepDrawing {
             painter.text(note, right, 17, Type.BODY, Ink.TEXT, Anchor.END);
             right -= Lettering.width(note, Type.BODY) + 12;
         }
-        String title = "Over " + plot.lever();
-        painter.text(Lettering.cut(title, Type.TITLE, right - RIM), RIM, 17, Type.TITLE, Ink.TEXT, Anchor.START);
+        String title = Lettering.cut(plot.title(), Type.TITLE, right - RIM);
+        painter.text(title, RIM, 17, Type.TITLE, Ink.TEXT, Anchor.START);
         String rest = plan.left() == 1 ? "1 more quantity has no room" : plan.left() + " more quantities have no room";
         double x = RIM + Lettering.width(title, Type.TITLE) + 12;
         if (plan.left() > 0 && x + Lettering.width(rest, Type.SMALL) < right) {

@@ -20,6 +20,7 @@ import twofold.study.ZonesAlong;
 /**
  * What a picture of a sweep shows: quantities over one lever. Every number is in the unit that is shown beside it.
  *
+ * @param title what is shown
  * @param lever name of the lever
  * @param unit symbol of its unit; empty for a pure number
  * @param values of the lever, finite, ascending
@@ -28,7 +29,13 @@ import twofold.study.ZonesAlong;
  * @param now the lever's value in the design as it stands
  */
 public record SweepPlot(
-        String lever, String unit, Column values, List<Line> lines, List<Band> bands, OptionalDouble now) {
+        String title,
+        String lever,
+        String unit,
+        Column values,
+        List<Line> lines,
+        List<Band> bands,
+        OptionalDouble now) {
     /** Copies the lists; refuses values that are not ascending, lines of another length and panels of two units. */
     public SweepPlot {
         values.requireAscending("the values of " + lever);
@@ -52,6 +59,8 @@ public record SweepPlot(
         Axis axis = swept.axis();
         Design design = swept.question().laid().design();
         List<Asked> asked = swept.question().quantities();
+        // Of one quantity in both planes the title says the rest.
+        boolean isOne = asked.stream().map(Asked::wordsOfBoth).distinct().count() == 1;
         List<Line> lines = new ArrayList<>();
         for (int q = 0; q < asked.size(); q++) {
             int quantity = q;
@@ -62,7 +71,7 @@ public record SweepPlot(
                     .toArray();
             lines.add(new Line(
                     what.what().title(),
-                    what.words(),
+                    isOne ? what.plane().map(Plane::word).orElse(what.words()) : what.words(),
                     unit.symbol(),
                     what.plane(),
                     Column.of(values),
@@ -78,6 +87,8 @@ public record SweepPlot(
                         s.plane(), unit.fromSi(s.from()), unit.fromSi(s.to()), name(s.lower()), name(s.upper())))
                 .toList();
         return new SweepPlot(
+                (isOne ? asked.get(0).wordsOfBoth() + " over " : "Over ")
+                        + axis.lever().name(),
                 axis.lever().name(),
                 unit.symbol(),
                 Column.of(values),

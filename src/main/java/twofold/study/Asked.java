@@ -1,8 +1,10 @@
 package twofold.study;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import twofold.cavity.Chain;
 import twofold.cavity.Judgement;
@@ -37,23 +39,12 @@ public record Asked(String text, Quantity what, Optional<Place> at, Optional<Pla
 
     /** A quantity of the whole cavity in a plane. */
     public static Asked of(Quantity what, Plane plane) {
-        return new Asked(
-                what.json() + ":" + plane.word(), what, Optional.empty(), Optional.of(plane), Optional.empty());
+        return of(what, Optional.empty(), Optional.of(plane), Optional.empty());
     }
 
     /** What a requirement asks for, in a plane where its quantity has planes. */
     static Asked of(Requirement requirement, Optional<Plane> plane) {
-        String place = requirement.at().map(p -> "@" + p).orElse("");
-        String way = plane.map(Plane::word)
-                .or(() -> requirement.edge().map(Edge::word))
-                .map(w -> ":" + w)
-                .orElse("");
-        return new Asked(
-                requirement.what().json() + place + way,
-                requirement.what(),
-                requirement.at(),
-                plane,
-                requirement.edge());
+        return of(requirement.what(), requirement.at(), plane, requirement.edge());
     }
 
     /** Whether a requirement asks for this quantity, in this plane where it has one. */
@@ -66,15 +57,54 @@ public record Asked(String text, Quantity what, Optional<Place> at, Optional<Pla
 
     /** "Radius at Rod, sagittal": in words, without its unit. */
     public String words() {
+        return wordsOfBoth() + plane.map(p -> ", " + p.word()).orElse("");
+    }
+
+    /** "Radius at Rod": the same of both planes. */
+    public String wordsOfBoth() {
         return what.title()
                 + at.map(p -> " at " + p).orElse("")
-                + plane.map(p -> ", " + p.word()).orElse("")
                 + edge.map(e -> ", " + e.word() + " edge").orElse("");
     }
 
     /** Compiles it against a chain of the design that it was parsed for. */
     public Reading reading(Chain chain) {
         return Reading.of(what, at, plane, edge, chain);
+    }
+
+    /** Everywhere that a quantity can be read in a design, in beam order; an empty place is the whole cavity. */
+    public static List<Optional<Place>> places(Quantity what, Design design) {
+        List<String> names = design.parts().stream().map(Part::name).toList();
+        List<String> mirrors = design.mirrors().stream().map(Part::name).toList();
+        List<Optional<Place>> all = new ArrayList<>();
+        all.add(Optional.empty());
+        names.forEach(n -> all.add(Optional.of(Place.of(n))));
+        all.addAll(neighbours(mirrors));
+        all.addAll(neighbours(names));
+        Optional<Planes> plane = what.hasPlane() ? Optional.of(Planes.SAGITTAL) : Optional.empty();
+        Optional<Edge> edge = what.hasEdge() ? Optional.of(Edge.LOWER) : Optional.empty();
+        return all.stream()
+                .distinct()
+                .filter(at -> design.problems(
+                                new Requirement(what, at, plane, edge, Bound.Prefer.LARGEST, Optional.empty()))
+                        .isEmpty())
+                .toList();
+    }
+
+    /** Each with the next, the last with the first; a standing wave does not join those. */
+    private static List<Optional<Place>> neighbours(List<String> names) {
+        return IntStream.range(0, names.size() == 2 ? 1 : names.size())
+                .mapToObj(i -> Optional.of(Place.of(names.get(i), names.get((i + 1) % names.size()))))
+                .toList();
+    }
+
+    /** A quantity of a place, a plane and an edge, where it has them. */
+    public static Asked of(Quantity what, Optional<Place> at, Optional<Plane> plane, Optional<Edge> edge) {
+        String way = plane.map(Plane::word)
+                .or(() -> edge.map(Edge::word))
+                .map(w -> ":" + w)
+                .orElse("");
+        return new Asked(what.json() + at.map(p -> "@" + p).orElse("") + way, what, at, plane, edge);
     }
 
     /** Reads a quantity, or says what is wrong with it and what would be accepted. */

@@ -81,6 +81,19 @@ public final class Levered {
         return Layout.of(set.withParts(placed(parts, ((Move.Moved) move).places())));
     }
 
+    /** Where two levers set one and the same number, so that they cannot be set together. */
+    public static Optional<Place> clash(Design design, Lever a, Lever b) {
+        List<String> numbers = a.of().stream().map(p -> number(design, a, p)).toList();
+        return b.of().stream()
+                .filter(p -> numbers.contains(number(design, b, p)))
+                .findFirst();
+    }
+
+    /** What a lever sets at a place, the same for a leg named from either end. */
+    private static String number(Design design, Lever lever, Place place) {
+        return Target.of(design, lever.set(), place).map(Target::toString).orElse(lever.set() + " " + place);
+    }
+
     /**
      * Where a lever stands in a design: the value of all that it sets, in SI; empty where they differ by more than a
      * thousandth of the lever's range, so that no one value is the design's.

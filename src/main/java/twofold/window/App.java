@@ -35,13 +35,15 @@ final class App {
         Recall recall = new Recall(Settings.usualFile(System.getenv(), System.getProperty("user.home")));
         Background background = new Background();
         Background scribe = new Background();
+        Background studies = new Background();
         Path journals = Folders.state(System.getenv(), System.getProperty("user.home"), System.getProperty("os.name"))
                 .resolve("journals");
-        Editor editor = new Editor(background, new Journal(journals), scribe);
+        Editor editor = new Editor(background, new Journal(journals), scribe, studies);
         show(stage, editor, recall, new Dialogs(stage), journals);
         stage.showingProperty().addListener((o, was, is) -> {
             background.close();
             scribe.close();
+            studies.close();
         });
         if (arguments.isEmpty()) {
             editor.session().openSample(FIRST_SAMPLE);

@@ -39,6 +39,7 @@ import twofold.window.panel.ProblemsPane;
 import twofold.window.panel.RequirementsPane;
 import twofold.window.panel.StabilityPane;
 import twofold.window.panel.ZonesPane;
+import twofold.window.plot.PlotTabs;
 
 /** The editor's panes, wired to one session. A node: the application puts it into a window, a test into a stage. */
 public final class Editor extends BorderPane {
@@ -47,6 +48,7 @@ public final class Editor extends BorderPane {
     private final Following following;
     private final BenchPane bench;
     private final BeamPane beam;
+    private final PlotTabs plots;
     private final CloseUpPane closeUp = new CloseUpPane();
     private final StabilityPane stability = new StabilityPane();
     private final Inspector part;
@@ -72,17 +74,23 @@ public final class Editor extends BorderPane {
     private int document;
     private Theme theme = Theme.LIGHT;
 
-    /** Makes the editor with nothing open. */
+    /** Makes the editor with nothing open, all work on one runner. */
     public Editor(Runner runner) {
-        this(runner, listener -> new Session(runner, listener));
+        this(runner, runner, listener -> new Session(runner, listener));
     }
 
-    /** Makes the editor with nothing open, which keeps a journal of unsaved work. */
-    Editor(Runner runner, Journal journal, Runner scribe) {
-        this(runner, listener -> new Session(runner, journal, scribe, listener));
+    /**
+     * Makes the editor with nothing open, which keeps a journal of unsaved work.
+     *
+     * @param runner for what is short
+     * @param scribe writes the journal
+     * @param studies for sweeps and maps, which may keep it busy
+     */
+    Editor(Runner runner, Journal journal, Runner scribe, Runner studies) {
+        this(runner, studies, listener -> new Session(runner, journal, scribe, listener));
     }
 
-    private Editor(Runner runner, Function<Consumer<Shown>, Session> sessions) {
+    private Editor(Runner runner, Runner studies, Function<Consumer<Shown>, Session> sessions) {
         this.runner = runner;
         session = sessions.apply(this::show);
         problems = new ProblemsPane(session::dismiss);
@@ -93,7 +101,8 @@ public final class Editor extends BorderPane {
         part = new Inspector(session, following);
         parts = new PartsPane(session);
         notice = new Notice(session::reload);
-        lower = split(Orientation.HORIZONTAL, beam, closeUp);
+        plots = new PlotTabs(session, beam, studies);
+        lower = split(Orientation.HORIZONTAL, plots, closeUp);
         VBox benchAndProblems = new VBox(6, problems, bench);
         VBox.setVgrow(bench, Priority.ALWAYS);
         pictures = split(Orientation.VERTICAL, benchAndProblems, lower);
@@ -113,7 +122,7 @@ public final class Editor extends BorderPane {
         side.setPrefWidth(350);
         side.setMaxWidth(460);
         bench.setMinSize(420, 200);
-        beam.setMinSize(320, 200);
+        plots.setMinSize(320, 220);
         closeUp.setMinSize(230, 200);
         whole = split(Orientation.HORIZONTAL, pictures, side);
         SplitPane.setResizableWithParent(side, false);
@@ -226,6 +235,7 @@ public final class Editor extends BorderPane {
         Look.apply(this, next);
         bench.setTheme(next);
         beam.setTheme(next);
+        plots.setTheme(next);
         closeUp.setTheme(next);
         stability.setTheme(next);
         zones.setTheme(next);
@@ -280,14 +290,15 @@ public final class Editor extends BorderPane {
 
     /** Moves the keyboard to the next pane, or back. */
     void nextPane(boolean back) {
-        List<Node> panes = List.of(bench, beam, part.lookup("#fields-scroll"), parts.lookup("#parts"));
+        List<Node> panes = List.of(bench, plots, part.lookup("#fields-scroll"), parts.lookup("#parts"));
         int at = 0;
         for (int i = 0; i < panes.size(); i++) {
             if (holdsFocus(panes.get(i))) {
                 at = back ? i - 1 : i + 1;
             }
         }
-        panes.get(Math.floorMod(at, panes.size())).requestFocus();
+        Node next = panes.get(Math.floorMod(at, panes.size()));
+        (next.equals(plots) ? plots.front() : next).requestFocus();
     }
 
     private boolean holdsFocus(Node pane) {
@@ -304,6 +315,7 @@ public final class Editor extends BorderPane {
         document = shown.document();
         bench.show(shown, isOther);
         beam.show(shown, isOther);
+        plots.show(shown);
         closeUp.show(shown);
         stability.show(shown);
         part.show(shown);

@@ -99,7 +99,7 @@ final class Plots {
         lines.add(SweepPlot.Line.of(
                 "fsr", "MHz", Optional.empty(), column(gaps, g -> 149_896.229 / (ARM_1 + ARM_2 + g))));
         lines.add(SweepPlot.Line.of("turn", "°", Optional.empty(), column(gaps, g -> 16)));
-        return new SweepPlot("gap", "mm", Column.of(gaps), lines, bands(8), OptionalDouble.of(105));
+        return new SweepPlot("Over gap", "gap", "mm", Column.of(gaps), lines, bands(8), OptionalDouble.of(105));
     }
 
     /** Both zones of each plane along the gap. */

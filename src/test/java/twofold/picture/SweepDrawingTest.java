@@ -21,6 +21,7 @@ class SweepDrawingTest {
     private static SweepPlot plain(SweepPlot.Line... lines) {
         int size = lines[0].values().size();
         return new SweepPlot(
+                "Over gap",
                 "gap",
                 "mm",
                 Column.of(size == 1 ? new double[] {7} : Plots.steps(0, 10, size)),
@@ -123,11 +124,18 @@ class SweepDrawingTest {
     @Test
     void aCallersMistakesAreRefused() {
         assertThatThrownBy(() -> new SweepPlot(
-                        "gap", "mm", Column.of(1, 2), List.of(line("mm", 1)), List.of(), OptionalDouble.empty()))
+                        "Over gap",
+                        "gap",
+                        "mm",
+                        Column.of(1, 2),
+                        List.of(line("mm", 1)),
+                        List.of(),
+                        OptionalDouble.empty()))
                 .hasMessageContaining("1 values for 2 of gap");
         SweepPlot.Line stray = new SweepPlot.Line(
                 "mm", "q", "µm", Optional.empty(), Column.of(1, 2), OptionalDouble.empty(), OptionalDouble.empty());
         assertThatThrownBy(() -> new SweepPlot(
+                        "Over gap",
                         "gap",
                         "mm",
                         Column.of(1, 2),
@@ -135,10 +143,11 @@ class SweepDrawingTest {
                         List.of(),
                         OptionalDouble.empty()))
                 .hasMessageContaining("q is in µm on a panel in mm");
-        assertThatThrownBy(
-                        () -> new SweepPlot("gap", "mm", Column.of(2, 1), List.of(), List.of(), OptionalDouble.empty()))
+        assertThatThrownBy(() -> new SweepPlot(
+                        "Over gap", "gap", "mm", Column.of(2, 1), List.of(), List.of(), OptionalDouble.empty()))
                 .hasMessageContaining("ascending");
-        assertThatThrownBy(() -> new SweepPlot("gap", "mm", Column.of(), List.of(), List.of(), OptionalDouble.empty()))
+        assertThatThrownBy(() -> new SweepPlot(
+                        "Over gap", "gap", "mm", Column.of(), List.of(), List.of(), OptionalDouble.empty()))
                 .hasMessageContaining("none");
     }
 }

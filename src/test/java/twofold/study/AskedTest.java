@@ -63,4 +63,40 @@ class AskedTest {
         assertThat(Asked.parse(text, DESIGN).value()).isEmpty();
         assertThat(Asked.parse(text, DESIGN).problems().get(0).message()).contains(said);
     }
+
+    @Test
+    void everywhereAQuantityCanBeReadIsOffered() {
+        assertThat(Asked.places(Quantity.FSR, DESIGN)).containsExactly(Optional.empty());
+        assertThat(Asked.places(Quantity.FOCUS_RATIO, DESIGN)).containsExactly(Optional.of(Place.of("Rod")));
+        assertThat(Asked.places(Quantity.LEG, DESIGN))
+                .containsExactly(
+                        Optional.of(Place.of("End A", "Fold 1")),
+                        Optional.of(Place.of("Fold 1", "Fold 2")),
+                        Optional.of(Place.of("Fold 2", "Output coupler")));
+        assertThat(Asked.places(Quantity.CLEARANCE, DESIGN))
+                .hasSize(1 + DESIGN.parts().size())
+                .contains(Optional.empty());
+        Design ring = Samples.design("triangle-ring");
+        assertThat(Asked.places(Quantity.LEG, ring)).hasSize(ring.mirrors().size());
+        for (Design design : java.util.List.of(DESIGN, ring)) {
+            for (Quantity quantity : Quantity.values()) {
+                for (Optional<Place> at : Asked.places(quantity, design)) {
+                    Asked asked = Asked.of(
+                            quantity,
+                            at,
+                            quantity.hasPlane() ? Optional.of(Plane.SAGITTAL) : Optional.empty(),
+                            quantity.hasEdge() ? Optional.of(Edge.UPPER) : Optional.empty());
+                    assertThat(Asked.parse(asked.text(), design).value()).contains(asked);
+                }
+            }
+        }
+    }
+
+    @Test
+    void wordsForAPerson() {
+        assertThat(parsed("radius_um@Rod:sagittal").words()).isEqualTo("Radius at Rod, sagittal");
+        assertThat(parsed("zone_edge_split_mm@Fold 1/Fold 2:lower").words())
+                .isEqualTo("Zone edge split at Fold 1/Fold 2, lower edge");
+        assertThat(parsed("fsr_mhz").words()).isEqualTo("Free spectral range");
+    }
 }

@@ -56,6 +56,11 @@ final class Stagehand {
 
     /** The same, with what a person would answer. */
     static Stagehand open(Path settings, double width, double height, Asks asks) throws Exception {
+        return open(settings, width, height, asks, Runner.onTheSpot());
+    }
+
+    /** The same, with work on a runner. */
+    static Stagehand open(Path settings, double width, double height, Asks asks, Runner runner) throws Exception {
         // TestFX must be the one that starts the toolkit: after another start its own robot gets no input.
         FxToolkit.registerPrimaryStage();
         Platform.setImplicitExit(false);
@@ -63,7 +68,7 @@ final class Stagehand {
         recall.change(s -> s.sized(width, height, false, s.splits()));
         Stagehand hand = fx(() -> {
             Stage stage = new Stage();
-            Editor editor = new Editor(Runner.onTheSpot());
+            Editor editor = new Editor(runner);
             stage.setX(0);
             stage.setY(0);
             App.show(stage, editor, recall, asks, settings.resolveSibling("journals"));

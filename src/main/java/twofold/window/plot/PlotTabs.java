@@ -1,0 +1,60 @@
+package twofold.window.plot;
+
+import javafx.scene.Node;
+import javafx.scene.control.Tab;
+import javafx.scene.control.TabPane;
+import twofold.picture.Theme;
+import twofold.session.Runner;
+import twofold.session.Session;
+import twofold.session.Shown;
+
+/** The beam along the path, and sweeps and maps beside it. */
+public final class PlotTabs extends TabPane {
+    private final Node beam;
+    private final SweepPane sweep;
+    private final MapPane map;
+    private final Tab sweeping;
+    private final Tab mapping;
+
+    /**
+     * The tabs, the beam in front.
+     *
+     * @param beam along the path
+     * @param runner for sweeps and maps alone, which may keep it busy
+     */
+    public PlotTabs(Session session, Node beam, Runner runner) {
+        this.beam = beam;
+        sweep = new SweepPane(session, runner);
+        map = new MapPane(session, runner);
+        sweeping = new Tab("Sweep", sweep);
+        mapping = new Tab("Map", map);
+        getTabs().addAll(new Tab("Beam", beam), sweeping, mapping);
+        setId("plots");
+        setAccessibleText("The beam, sweeps and maps");
+        setTabClosingPolicy(TabClosingPolicy.UNAVAILABLE);
+        sweeping.selectedProperty().addListener((o, was, is) -> sweep.setInView(is));
+        mapping.selectedProperty().addListener((o, was, is) -> map.setInView(is));
+    }
+
+    /** Work leaves a core to the window where there is more than one. */
+    static int threads() {
+        return Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
+    }
+
+    /** Shows a moment of the session. */
+    public void show(Shown shown) {
+        sweep.show(shown);
+        map.show(shown);
+    }
+
+    /** Changes the theme of sweeps and maps. */
+    public void setTheme(Theme theme) {
+        sweep.setTheme(theme);
+        map.setTheme(theme);
+    }
+
+    /** The picture in front, which takes the keyboard. */
+    public Node front() {
+        return sweeping.isSelected() ? sweep.plot() : mapping.isSelected() ? map.plot() : beam;
+    }
+}
