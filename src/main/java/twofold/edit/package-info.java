@@ -8,7 +8,8 @@
  * <p>Edits stand by what they change: {@link twofold.edit.PartEdits} (put on the beam, taken off, copied, renamed, reordered),
  * {@link twofold.edit.MirrorEdits} (put in, dragged, set to typed numbers of the plan), {@link twofold.edit.Nudges} (steps by
  * key), {@link twofold.edit.FieldEdits} (fields from values or typed text, title, wavelength, shape),
- * {@link twofold.edit.HoldEdits} and {@link twofold.edit.AskEdits} (requirements, levers, tolerances). They name parts, so that
+ * {@link twofold.edit.HoldEdits} and {@link twofold.edit.AskEdits} (requirements, levers, tolerances),
+ * {@link twofold.edit.LeverEdits} (everything that some levers set). They name parts, so that
  * an edit means the same in whatever design it is applied to. {@link twofold.edit.Offers} says for menus what a place
  * accepts, {@link twofold.edit.Spot} what a pointer points at, {@link twofold.edit.Lost} what went along unasked.
  *

@@ -18,6 +18,9 @@ final class Words {
               middle button, space bar with the first, Alt with an arrow: pan
               click, Page Up, Page Down: select a part;  Ctrl or Shift with a click: several;  Esc: none
 
+            Sweep and map
+              click, drag, arrows (Shift: ten steps): see that design;  Enter: apply;  Esc: back
+
             Everywhere
               Ctrl+N: new;  Ctrl+O: open;  Ctrl+S, Ctrl+Shift+S: save;  F5: reload
               Ctrl+Z, Ctrl+Shift+Z: undo, redo;  Ctrl+X, C, V: cut, copy, paste;  Ctrl+D: duplicate;  Delete

@@ -5,9 +5,11 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.control.TabPane;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
 import org.junit.jupiter.api.Tag;
@@ -41,6 +43,25 @@ class DocsPicturesWindowTest {
             });
             stage.picture("docs-window-" + theme.word());
             keep("docs-window-" + theme.word(), "window-" + theme.word());
+        } finally {
+            stage.close();
+        }
+    }
+
+    @Test
+    void thePageShowsAMap() throws Exception {
+        Stagehand stage = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
+        try {
+            stage.openSample("z-fold-rod.json");
+            Stagehand.fx(() -> {
+                stage.node("plots", TabPane.class).getSelectionModel().select(2);
+                return true;
+            });
+            stage.settle();
+            Node map = stage.node("map-plot", Node.class);
+            stage.click(map, 250, 110);
+            assertThat(stage.node("map-words", Label.class).getText()).startsWith("Preview: ");
+            picture(stage, "window-map");
         } finally {
             stage.close();
         }

@@ -205,12 +205,33 @@ class PlotsWindowTest {
     }
 
     @Test
+    void aClickedPictureHasTheKeyboard() throws Exception {
+        tab(SWEEP);
+        clickPlot("sweep-plot", 0.5, 0.6);
+        double clicked = gap();
+        stage.press(KeyCode.RIGHT);
+        assertThat(gap()).isCloseTo(clicked + 0.01, within(1e-6));
+        stage.press(KeyCode.ESCAPE);
+        tab(BEAM);
+        Node beam = stage.node("beam", Node.class);
+        stage.click(beam, 200, 40);
+        assertThat(Stagehand.fx(beam::isFocused)).isTrue();
+    }
+
+    @Test
     void f6GoesToThePictureInFront() throws Exception {
         tab(SWEEP);
         focus("bench");
         stage.press(KeyCode.F6);
         assertThat(Stagehand.fx(() -> stage.node("sweep-plot", Node.class).isFocused()))
                 .isTrue();
+        focus("sweep-lever");
+        stage.press(KeyCode.F6);
+        assertThat(Stagehand.fx(() -> stage.node("sweep-lever", Node.class).isFocused()))
+                .as("the next pane, not the picture of the same")
+                .isFalse();
+        assertThat(Stagehand.fx(() -> stage.node("sweep-plot", Node.class).isFocused()))
+                .isFalse();
         tab(BEAM);
         focus("bench");
         stage.press(KeyCode.F6);

@@ -1,8 +1,11 @@
 package twofold.window.plot;
 
+import java.util.List;
+import javafx.event.Event;
 import javafx.scene.Node;
 import javafx.scene.control.Tab;
 import javafx.scene.control.TabPane;
+import javafx.scene.input.MouseEvent;
 import twofold.picture.Theme;
 import twofold.session.Runner;
 import twofold.session.Session;
@@ -32,6 +35,8 @@ public final class PlotTabs extends TabPane {
         setId("plots");
         setAccessibleText("The beam, sweeps and maps");
         setTabClosingPolicy(TabClosingPolicy.UNAVAILABLE);
+        // A tab pane would take the keyboard from the picture that was clicked.
+        List.of(beam, sweep, map).forEach(n -> n.addEventHandler(MouseEvent.MOUSE_PRESSED, Event::consume));
         sweeping.selectedProperty().addListener((o, was, is) -> sweep.setInView(is));
         mapping.selectedProperty().addListener((o, was, is) -> map.setInView(is));
     }
