@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Optional;
+import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.function.BooleanSupplier;
 import javafx.geometry.Point2D;
@@ -25,6 +27,7 @@ import org.testfx.util.WaitForAsyncUtils;
 import twofold.design.Mirror;
 import twofold.design.Part;
 import twofold.design.Point;
+import twofold.design.Shape;
 import twofold.picture.BeamView;
 import twofold.picture.BenchView;
 import twofold.picture.Theme;
@@ -89,11 +92,23 @@ class JourneysWindowTest {
     }
 
     private BenchView plan() {
-        return WaitForAsyncUtils.waitForAsyncFx(5000, () -> bench().view().orElseThrow());
+        return settled(() -> bench().view().orElseThrow());
     }
 
     private BeamView path() {
-        return WaitForAsyncUtils.waitForAsyncFx(5000, () -> beam().view().orElseThrow());
+        return settled(() -> beam().view().orElseThrow());
+    }
+
+    /** What a view is once the window's size and its dividers have come to rest. */
+    private static <T> T settled(Callable<T> view) {
+        T last = WaitForAsyncUtils.waitForAsyncFx(5000, view);
+        for (int same = 0, i = 0; same < 3 && i < 100; i++) {
+            WaitForAsyncUtils.sleep(30, TimeUnit.MILLISECONDS);
+            T next = WaitForAsyncUtils.waitForAsyncFx(5000, view);
+            same = next.equals(last) ? same + 1 : 0;
+            last = next;
+        }
+        return last;
     }
 
     private Point2D onScreen(Node node, double x, double y) {
@@ -200,6 +215,64 @@ class JourneysWindowTest {
                 "the bench shows the point",
                 () -> bench().view().orElseThrow().crosshair().isPresent());
         assertThat(plan().crosshair().orElseThrow()).isBetween(0.29, 0.31);
+    }
+
+    @Test
+    void dragsAMirrorAndTakesItBack(FxRobot robot) throws Exception {
+        untilOpen("z-fold-rod.json");
+        Point before = place("Fold 2");
+        robot.moveTo(mirror("Fold 2")).press(MouseButton.PRIMARY).moveBy(20, 0).moveBy(10, 4);
+        until(
+                "the beam follows",
+                () -> editor.session().shown().isPreview() && !place("Fold 2").equals(before));
+        robot.release(MouseButton.PRIMARY);
+        until("it is one step", () -> editor.session().shown().undo().equals(Optional.of("move Fold 2")));
+        robot.push(KeyCode.CONTROL, KeyCode.Z);
+        until("it is back", () -> place("Fold 2").equals(before));
+        assertThat(editor.session().shown().isUnsaved()).isFalse();
+    }
+
+    @Test
+    void makesANewBowTie(FxRobot robot) throws Exception {
+        untilOpen("z-fold-rod.json");
+        robot.clickOn("#new").clickOn("#shape").clickOn("Bow-tie").clickOn("#make");
+        until(
+                "it is there",
+                () -> editor.session()
+                                .shown()
+                                .cavity()
+                                .orElseThrow()
+                                .laid()
+                                .design()
+                                .shape()
+                        == Shape.RING);
+        assertThat(editor.session().shown().isUnsaved()).isTrue();
+    }
+
+    @Test
+    void placesAPlateAndIsAskedBeforeItIsLeft(FxRobot robot) throws Exception {
+        untilOpen("z-fold-rod.json");
+        robot.clickOn("#place").clickOn("Plate");
+        Point a = place("End A");
+        Point b = place("Fold 1");
+        BenchView view = plan();
+        double x = view.viewport().x((a.x() + b.x()) / 2);
+        robot.moveTo(onScreen(bench(), x, view.viewport().y(a.y()) + 10)).clickOn(MouseButton.PRIMARY);
+        until(
+                "the plate stands there",
+                () -> selected().equals("Plate 1") && !editor.session().shown().isPreview());
+        robot.clickOn("#samples").clickOn("bow-tie-doubler.json").clickOn("Go on editing");
+        assertThat(selected()).isEqualTo("Plate 1");
+        robot.clickOn("#samples").clickOn("bow-tie-doubler.json").clickOn("Do not save");
+        untilOpen("bow-tie-doubler.json");
+    }
+
+    private Point place(String mirror) {
+        return editor.session().shown().cavity().orElseThrow().laid().design().mirrors().stream()
+                .filter(m -> m.name().equals(mirror))
+                .findFirst()
+                .orElseThrow()
+                .at();
     }
 
     @Test

@@ -51,8 +51,8 @@ class KeyboardWindowTest {
     }
 
     private String selected() throws Exception {
-        return Stagehand.fx(() ->
-                stage.editor().session().selectedPart().map(p -> p.name()).orElse(""));
+        return Stagehand.fx(
+                () -> stage.editor().session().selectedPart().map(p -> p.name()).orElse(""));
     }
 
     private static String focused(Scene scene) throws Exception {
