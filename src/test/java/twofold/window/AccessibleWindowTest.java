@@ -62,6 +62,15 @@ class AccessibleWindowTest {
         Stagehand opened = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
         stage = opened;
         opened.openSample("z-fold-rod.json");
+        TabPane plots = opened.node("plots", TabPane.class);
+        for (int tab = 0; tab < 3; tab++) {
+            int chosen = tab;
+            Stagehand.fx(() -> {
+                plots.getSelectionModel().select(chosen);
+                return true;
+            });
+            opened.settle();
+        }
         List<Node> all = new ArrayList<>();
         Stagehand.fx(() -> {
             walk(opened.editor(), all);
@@ -73,6 +82,7 @@ class AccessibleWindowTest {
                 .filter(n -> !(n instanceof ScrollBar) && !(n instanceof SplitPane) && !(n instanceof Label))
                 .toList();
         assertThat(reached).hasSizeGreaterThan(8);
+        assertThat(reached).extracting(Node::getId).contains("sweep-lever", "sweep-plot", "map-up", "map-plot");
         assertThat(reached)
                 .allSatisfy(n -> assertThat(isNamed(n)).as("%s has a name", n).isTrue());
     }

@@ -29,16 +29,26 @@ public final class PlotTabs extends TabPane {
         this.beam = beam;
         sweep = new SweepPane(session, runner);
         map = new MapPane(session, runner);
-        sweeping = new Tab("Sweep", sweep);
-        mapping = new Tab("Map", map);
+        sweeping = tab("Sweep", sweep);
+        mapping = tab("Map", map);
         getTabs().addAll(new Tab("Beam", beam), sweeping, mapping);
         setId("plots");
         setAccessibleText("The beam, sweeps and maps");
         setTabClosingPolicy(TabClosingPolicy.UNAVAILABLE);
         // A tab pane would take the keyboard from the picture that was clicked.
         List.of(beam, sweep, map).forEach(n -> n.addEventHandler(MouseEvent.MOUSE_PRESSED, Event::consume));
-        sweeping.selectedProperty().addListener((o, was, is) -> sweep.setInView(is));
-        mapping.selectedProperty().addListener((o, was, is) -> map.setInView(is));
+    }
+
+    /** A tab whose controls are made when it is first chosen, so that they do not keep the first picture waiting. */
+    private static Tab tab(String name, StudyPane pane) {
+        Tab tab = new Tab(name);
+        tab.selectedProperty().addListener((o, was, is) -> {
+            if (is) {
+                tab.setContent(pane);
+            }
+            pane.setInView(is);
+        });
+        return tab;
     }
 
     /** Work leaves a core to the window where there is more than one. */
