@@ -6,6 +6,11 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.Collectors;
+import org.apache.commons.math3.optim.MaxEval;
+import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
+import org.apache.commons.math3.optim.univariate.BrentOptimizer;
+import org.apache.commons.math3.optim.univariate.SearchInterval;
+import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
 import twofold.cavity.Chain;
 import twofold.cavity.EdgeCause;
 import twofold.cavity.Reading;
@@ -16,12 +21,17 @@ import twofold.optics.Plane;
 
 /**
  * The edges of one plane's stability zones along any lever: simple roots of what {@link EdgeCause} tells, found where it
- * changes sign between samples and then bisected. A zone is known by the edges that bound it.
+ * changes sign between samples and then bisected. Where it comes nearest to 0 between samples without a change of sign, its
+ * extremum is tested, so that two edges within one step, as a ring has where its half trace just passes ±1, are found too. A
+ * zone is known by the edges that bound it.
  *
  * @param plane which
  * @param edges by value, ascending
  */
 public record ZonesAlong(Plane plane, List<Edge> edges) {
+    /** More than a search for an extremum takes. */
+    private static final int MOST_STEPS = 200;
+
     /** Copies the list. */
     public ZonesAlong {
         edges = List.copyOf(edges);
@@ -52,7 +62,7 @@ public record ZonesAlong(Plane plane, List<Edge> edges) {
     /**
      * The edges along a lever.
      *
-     * @param samples between which a sign changes at most once
+     * @param samples between which a sign changes at most once, or twice about the extremum that they show
      */
     public static ZonesAlong of(Laid laid, Axis samples, Plane plane) {
         List<EdgeCause> causes = EdgeCause.of(Chain.of(laid));
@@ -61,6 +71,7 @@ public record ZonesAlong(Plane plane, List<Edge> edges) {
                 .mapToDouble(samples::value)
                 .sorted()
                 .toArray();
+        double[] earlier = new double[causes.size()];
         double[] before = new double[causes.size()];
         double[] here = new double[causes.size()];
         int[] ranks = new int[causes.size()];
@@ -71,12 +82,49 @@ public record ZonesAlong(Plane plane, List<Edge> edges) {
                 if (here[c] * before[c] < 0 || (here[c] == 0 && before[c] != 0)) {
                     edges.add(new Edge(
                             causes.get(c), ranks[c]++, root(asker, causes.size(), c, places[i - 1], places[i])));
+                } else if (i > 1 && comesNear(earlier[c], before[c], here[c])) {
+                    int cause = c;
+                    passed(asker, causes.size(), c, places[i - 2], places[i]).ifPresent(between -> {
+                        for (double[] half : between) {
+                            edges.add(new Edge(
+                                    causes.get(cause),
+                                    ranks[cause]++,
+                                    root(asker, causes.size(), cause, half[0], half[1])));
+                        }
+                    });
                 }
             }
+            System.arraycopy(before, 0, earlier, 0, before.length);
             System.arraycopy(here, 0, before, 0, here.length);
         }
         edges.sort(Comparator.comparingDouble(Edge::value));
         return new ZonesAlong(plane, edges);
+    }
+
+    /** Whether three values of one sign come nearest to 0 in their middle. */
+    private static boolean comesNear(double a, double b, double c) {
+        return a * b > 0 && b * c > 0 && Math.abs(b) < Math.abs(a) && Math.abs(b) <= Math.abs(c);
+    }
+
+    /** The two intervals about an extremum beyond 0, in each of which the sign changes; empty where it stays on this side. */
+    private static Optional<List<double[]>> passed(Asker asker, int causes, int cause, double from, double to) {
+        double[] answers = new double[causes];
+        asker.ask(new double[] {from}, answers, 0);
+        double sign = Math.signum(answers[cause]);
+        double place = new BrentOptimizer(1e-12, 1e-14 * Math.max(Math.abs(from), Math.abs(to)))
+                .optimize(
+                        GoalType.MINIMIZE,
+                        new MaxEval(MOST_STEPS),
+                        new SearchInterval(from, to),
+                        new UnivariateObjectiveFunction(x -> {
+                            asker.ask(new double[] {x}, answers, 0);
+                            return Double.isNaN(answers[cause]) ? Double.POSITIVE_INFINITY : sign * answers[cause];
+                        }))
+                .getPoint();
+        asker.ask(new double[] {place}, answers, 0);
+        return sign * answers[cause] < 0
+                ? Optional.of(List.of(new double[] {from, place}, new double[] {place, to}))
+                : Optional.empty();
     }
 
     private static Asker asker(Laid laid, Lever lever, List<EdgeCause> causes, Plane plane) {
