@@ -363,11 +363,21 @@ public enum Field {
         return json;
     }
 
-    /** Its name for a person: the JSON name without its unit, "clear diameter"; of a position, "position". */
+    /** Its name for a person, mostly the JSON name without its unit: "clear diameter". */
     public String title() {
-        return this == AT
-                ? "position"
-                : json.replaceFirst("(_per)?_(mm|deg|m)$", "").replace('_', ' ');
+        return switch (this) {
+            case AT -> "position";
+            case ROC -> "radius of curvature";
+            case TANGENTIAL, SAGITTAL -> json + " matrix";
+            default -> title(json);
+        };
+    }
+
+    /** What can be set under a JSON name, for a person: "radius of curvature", "leg", "x". */
+    public static String title(String set) {
+        return set.equals(ROC.json)
+                ? ROC.title()
+                : set.replaceFirst("(_per)?_(mm|deg|m)$", "").replace('_', ' ');
     }
 
     /** The unit in a file. */

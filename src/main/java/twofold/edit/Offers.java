@@ -162,7 +162,7 @@ public final class Offers {
         double reach = REACH * Math.abs(middle);
         double from = limited(design, set, at, rounded(unit, middle - reach), middle);
         double to = limited(design, set, at, rounded(unit, middle + reach), middle);
-        String title = set.replaceFirst("(_per)?_(mm|deg|m)$", "").replace('_', ' ') + " " + at;
+        String title = Field.title(set) + " " + at;
         String name = Names.accepts(title) ? title : set.replaceFirst("_.*", "");
         return new Lever(
                 FreeName.like(name, design.levers().stream().map(Lever::name).toList()),
@@ -170,6 +170,20 @@ public final class Offers {
                 List.of(at),
                 new Lever.Range.Span(from, to),
                 false);
+    }
+
+    /**
+     * A tolerance to begin with, as workshops state them (common practice, no source): a hundredth of a radius, focal length or
+     * pure number, 0.1 mm of any other length, 0.1° of an angle.
+     *
+     * @param set one of {@link #settings}
+     */
+    public static Tolerance tolerance(String set, Place at) {
+        Unit unit = Field.settableUnit(set).orElseThrow(() -> new IllegalArgumentException(set));
+        boolean relative = set.equals(Field.ROC.json())
+                || set.equals(Field.FOCAL_LENGTH.json())
+                || !(unit == Unit.MM || unit == Unit.DEG);
+        return new Tolerance(set, List.of(at), relative ? 0.01 : unit.toSi(0.1), relative, Tolerance.Spread.UNIFORM);
     }
 
     private static double rounded(Unit unit, double si) {

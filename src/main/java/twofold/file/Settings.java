@@ -29,7 +29,7 @@ public record Settings(
         boolean isDark, double width, double height, boolean isMaximised, List<Double> splits, List<String> recent) {
     /** A window that fits most screens, light. */
     public static final Settings DEFAULTS =
-            new Settings(false, 1440, 900, false, List.of(0.74, 0.58, 0.7, 0.64), List.of());
+            new Settings(false, 1440, 900, false, List.of(0.74, 0.58, 0.7, 0.6), List.of());
 
     private static final int MOST_RECENT = 10;
     private static final int MOST_BYTES = 100_000;

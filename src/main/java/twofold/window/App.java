@@ -57,7 +57,7 @@ final class App {
     static void show(Stage stage, Editor editor, Recall recall, Asks asks, Path journals) {
         Settings settings = recall.settings();
         editor.setTheme(settings.isDark() ? Theme.DARK : Theme.LIGHT);
-        Documents documents = new Documents(editor.session(), asks);
+        Documents documents = new Documents(editor.session(), asks, editor::take);
         Bars bars = new Bars(editor, recall, documents);
         editor.onDropped(documents::open);
         stage.setOnCloseRequest(e -> {

@@ -17,14 +17,22 @@ final class Documents {
 
     private final Session session;
     private final Asks asks;
+    private final Runnable take;
 
-    Documents(Session session, Asks asks) {
+    /**
+     * Makes it.
+     *
+     * @param take applies what is typed and not applied yet, before anything is saved or left
+     */
+    Documents(Session session, Asks asks, Runnable take) {
         this.session = session;
         this.asks = asks;
+        this.take = take;
     }
 
     /** Does something that leaves the document, after its unsaved work was saved or given up; not, where the person stays. */
     void leave(Runnable then) {
+        take.run();
         if (!session.shown().isUnsaved()) {
             then.run();
             return;
@@ -75,6 +83,7 @@ final class Documents {
     }
 
     private void save(Consumer<Saving> done) {
+        take.run();
         session.save(end -> {
             switch (end) {
                 case DONE -> done.accept(end);
@@ -99,6 +108,7 @@ final class Documents {
     }
 
     private void saveAs(Consumer<Saving> done) {
+        take.run();
         String name = name();
         asks.save(folder(), name.endsWith(ENDING) ? name : name + ENDING)
                 .map(Documents::ending)

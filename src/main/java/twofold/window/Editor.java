@@ -12,6 +12,7 @@ import javafx.scene.control.Label;
 import javafx.scene.control.SplitPane;
 import javafx.scene.control.Tab;
 import javafx.scene.control.TabPane;
+import javafx.scene.control.TextInputControl;
 import javafx.scene.input.DragEvent;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
@@ -29,14 +30,15 @@ import twofold.session.Runner;
 import twofold.session.Session;
 import twofold.session.Shown;
 import twofold.session.Source;
+import twofold.window.ask.AskPanes;
 import twofold.window.beam.BeamPane;
 import twofold.window.beam.CloseUpPane;
 import twofold.window.bench.BenchPane;
+import twofold.window.form.Typed;
 import twofold.window.inspect.Inspector;
 import twofold.window.panel.LedgerPane;
 import twofold.window.panel.PartsPane;
 import twofold.window.panel.ProblemsPane;
-import twofold.window.panel.RequirementsPane;
 import twofold.window.panel.StabilityPane;
 import twofold.window.panel.ZonesPane;
 import twofold.window.plot.PlotTabs;
@@ -56,8 +58,8 @@ public final class Editor extends BorderPane {
     private final ProblemsPane problems;
     private final LedgerPane ledger = new LedgerPane();
     private final ZonesPane zones = new ZonesPane();
-    private final RequirementsPane requirements = new RequirementsPane();
-    private final Tab asked = new Tab("Requirements", requirements);
+    private final AskPanes asks;
+    private final Tab asked;
     private final TabPane lists;
     private final Notice notice;
     private final Recovery recovery = new Recovery();
@@ -106,7 +108,15 @@ public final class Editor extends BorderPane {
         VBox benchAndProblems = new VBox(6, problems, bench);
         VBox.setVgrow(bench, Priority.ALWAYS);
         pictures = split(Orientation.VERTICAL, benchAndProblems, lower);
-        lists = tabs("lists", "Parts and requirements", new Tab("Parts", parts), asked);
+        asks = new AskPanes(session);
+        asked = new Tab("Requirements", asks.requirements());
+        lists = tabs(
+                "lists",
+                "Parts, requirements, levers and tolerances",
+                new Tab("Parts", parts),
+                asked,
+                new Tab("Levers", asks.levers()),
+                new Tab("Tolerances", asks.tolerances()));
         TabPane looks = tabs(
                 "looks",
                 "The part, zones and astigmatism",
@@ -118,8 +128,8 @@ public final class Editor extends BorderPane {
         VBox.setVgrow(tabs, Priority.ALWAYS);
         looks.setMinHeight(160);
         lists.setMinHeight(120);
-        side.setMinWidth(330);
-        side.setPrefWidth(350);
+        side.setMinWidth(350);
+        side.setPrefWidth(360);
         side.setMaxWidth(460);
         bench.setMinSize(420, 200);
         plots.setMinSize(320, 220);
@@ -191,6 +201,15 @@ public final class Editor extends BorderPane {
     /** What an earlier run left unsaved. */
     Recovery recovery() {
         return recovery;
+    }
+
+    /** Applies what is typed in the field that has the keyboard. */
+    void take() {
+        if (getScene() != null
+                && getScene().getFocusOwner() instanceof TextInputControl field
+                && field.getUserData() instanceof Typed typed) {
+            typed.take();
+        }
     }
 
     /** Hangs a new part at the pointer on the bench. */
@@ -322,7 +341,7 @@ public final class Editor extends BorderPane {
         parts.show(shown);
         zones.show(shown);
         ledger.show(shown);
-        requirements.show(shown);
+        asks.show(shown);
         asked.setText(StatusWords.asked(shown));
         problems.show(shown);
         notice.show(shown);

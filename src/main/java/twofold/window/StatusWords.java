@@ -59,11 +59,11 @@ final class StatusWords {
         return cavity.judgements().stream().filter(j -> j.verdict() == verdict).count();
     }
 
-    /** The head of the list of requirements: "Requirements, 2 not met". */
+    /** The head of the list of requirements: "Requirements, 2 !", short as a tab has to be; the status line says it in full. */
     static String asked(Shown shown) {
         long failed =
                 shown.cavity().map(c -> count(c, Judgement.Verdict.NOT_MET)).orElse(0L);
-        return failed == 0 ? "Requirements" : "Requirements, " + failed + " not met";
+        return failed == 0 ? "Requirements" : "Requirements, " + failed + " !";
     }
 
     private static String said(Cavity cavity) {

@@ -21,6 +21,10 @@ final class Words {
             Sweep and map
               click, drag, arrows (Shift: ten steps): see that design;  Enter: apply;  Esc: back
 
+            Fields and lists
+              Enter or leaving a field: apply;  Esc: back to the value;  Ctrl+Enter: apply notes
+              in a list: Enter opens a row, Delete removes it, Alt+Up and Alt+Down move it
+
             Everywhere
               Ctrl+N: new;  Ctrl+O: open;  Ctrl+S, Ctrl+Shift+S: save;  F5: reload
               Ctrl+Z, Ctrl+Shift+Z: undo, redo;  Ctrl+X, C, V: cut, copy, paste;  Ctrl+D: duplicate;  Delete

@@ -174,7 +174,7 @@ class AskEditsTest {
     void aLeverBeginsAroundThePresentValue() {
         Lever lever = Offers.lever(z, "roc_mm", Place.of("Fold 1"));
         assertThat(lever.range()).isEqualTo(new Lever.Range.Span(0.09, 0.11));
-        assertThat(lever.name()).isEqualTo("roc Fold 1");
+        assertThat(lever.name()).isEqualTo("radius of curvature Fold 1");
         assertThat(Offers.value(z, "leg_mm", gap))
                 .hasValueCloseTo(z.legs().get(1).path(), offset(1e-15));
         assertThat(Offers.value(z, "along_mm", Place.of("Rod")))

@@ -42,7 +42,7 @@ class FieldEditsTest {
                 .isEqualTo(Double.POSITIVE_INFINITY);
         assertThat(((Mirror) part(by(FieldEdits.set("Fold 1", Field.CURVATURE, "4 dpt"), z), "Fold 1")).radius())
                 .isEqualTo(0.25);
-        assertThat(FieldEdits.set("Fold 1", Field.ROC, "1").name()).isEqualTo("set roc of Fold 1");
+        assertThat(FieldEdits.set("Fold 1", Field.ROC, "1").name()).isEqualTo("set radius of curvature of Fold 1");
     }
 
     @Test

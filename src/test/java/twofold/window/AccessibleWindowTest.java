@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.control.Control;
@@ -15,6 +16,8 @@ import javafx.scene.control.ScrollBar;
 import javafx.scene.control.SplitPane;
 import javafx.scene.control.TabPane;
 import javafx.scene.image.WritableImage;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.paint.Color;
 import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.AfterEach;
@@ -85,6 +88,85 @@ class AccessibleWindowTest {
         assertThat(reached).extracting(Node::getId).contains("sweep-lever", "sweep-plot", "map-up", "map-plot");
         assertThat(reached)
                 .allSatisfy(n -> assertThat(isNamed(n)).as("%s has a name", n).isTrue());
+    }
+
+    /** What the keyboard reaches and is seen, in the panes of tabs. */
+    private static List<Node> reached(Stagehand stage, String pane) throws Exception {
+        List<Node> all = new ArrayList<>();
+        Stagehand.fx(() -> {
+            walk(stage.node(pane, TabPane.class), all);
+            return true;
+        });
+        return all.stream()
+                .filter(Node::isFocusTraversable)
+                .filter(AccessibleWindowTest::isSeen)
+                .toList();
+    }
+
+    private static boolean isSeen(Node node) {
+        for (@Nullable Node n = node; n != null; n = n.getParent()) {
+            if (!n.isVisible()) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    @Test
+    void everyFieldAndEveryRowHasAnAccessibleName() throws Exception {
+        Stagehand opened = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
+        stage = opened;
+        int fields = 0;
+        for (String sample : List.of("z-fold-rod", "gas-tube", "v-fold-pumped", "bow-tie-doubler")) {
+            opened.openSample(sample + ".json");
+            int parts = Stagehand.fx(() -> opened.editor()
+                    .session()
+                    .shown()
+                    .cavity()
+                    .orElseThrow()
+                    .laid()
+                    .design()
+                    .parts()
+                    .size());
+            for (int i = -1; i < parts; i++) {
+                Optional<Integer> part = i < 0 ? Optional.empty() : Optional.of(i);
+                Stagehand.fx(() -> {
+                    opened.editor().session().select(part);
+                    return true;
+                });
+                opened.settle();
+                List<Node> reached = reached(opened, "looks");
+                fields += reached.size();
+                assertThat(reached)
+                        .allSatisfy(n ->
+                                assertThat(isNamed(n)).as("%s has a name", n).isTrue());
+            }
+        }
+        assertThat(fields).as("fields are there").isGreaterThan(150);
+        opened.openSample("z-fold-rod.json");
+        TabPane lists = opened.node("lists", TabPane.class);
+        for (int tab = 1; tab < 4; tab++) {
+            int chosen = tab;
+            Stagehand.fx(() -> {
+                lists.getSelectionModel().select(chosen);
+                lists.getSelectionModel()
+                        .getSelectedItem()
+                        .getContent()
+                        .lookupAll(".ask-head")
+                        .forEach(head -> {
+                            head.requestFocus();
+                            head.fireEvent(new KeyEvent(
+                                    KeyEvent.KEY_PRESSED, "", "", KeyCode.SPACE, false, false, false, false));
+                        });
+                return true;
+            });
+            opened.settle();
+            List<Node> reached = reached(opened, "lists");
+            assertThat(reached).as("the controls of list %d", tab).hasSizeGreaterThan(10);
+            assertThat(reached)
+                    .allSatisfy(
+                            n -> assertThat(isNamed(n)).as("%s has a name", n).isTrue());
+        }
     }
 
     /** As near as a line's smoothed rim leaves it, nearer than any two inks are to each other. */

@@ -3,11 +3,14 @@ package twofold.window;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import javafx.geometry.Bounds;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.input.Clipboard;
@@ -26,6 +29,7 @@ import twofold.design.Mirror;
 import twofold.design.Part;
 import twofold.design.Shape;
 import twofold.design.Unit;
+import twofold.file.DesignReader;
 import twofold.layout.Follow;
 import twofold.layout.Laid;
 import twofold.picture.Theme;
@@ -450,6 +454,42 @@ class InspectorWindowTest {
                     .findFirst()
                     .orElseThrow();
         });
+    }
+
+    @Test
+    void savingTakesWhatIsTyped() throws Exception {
+        stage.close();
+        Answers answers = new Answers();
+        Path file = folder.resolve("mine.json");
+        answers.save = Optional.of(file);
+        stage = Stagehand.open(folder.resolve("others.json"), 1280, 800, answers);
+        stage.openSample("z-fold-rod.json");
+        select("Fold 1");
+        type("field-roc_mm", "150");
+        stage.press(KeyCode.CONTROL, KeyCode.S);
+        Design saved = DesignReader.read(Files.readAllBytes(file)).design().orElseThrow();
+        assertThat(((Mirror) saved.parts().get(1)).radius()).isEqualTo(0.15);
+        assertThat(shown().isUnsaved()).isFalse();
+    }
+
+    @Test
+    void whatHasTheKeyboardIsInView() throws Exception {
+        select("Fold 1");
+        focus(field("field-name"));
+        ScrollPane scroll = stage.node("fields-scroll", ScrollPane.class);
+        for (int i = 0; i < 40 && !"field-mount_mm".equals(focused()); i++) {
+            stage.press(KeyCode.TAB);
+            Node owner = Stagehand.fx(() -> stage.editor().getScene().getFocusOwner());
+            Bounds at = Stagehand.fx(() -> owner.localToScene(owner.getLayoutBounds()));
+            Bounds view = Stagehand.fx(() -> scroll.localToScene(scroll.getLayoutBounds()));
+            assertThat(at.getMinY()).as("%s", owner).isGreaterThanOrEqualTo(view.getMinY());
+            assertThat(at.getMaxY()).as("%s", owner).isLessThanOrEqualTo(view.getMaxY());
+        }
+        assertThat(focused()).isEqualTo("field-mount_mm");
+        assertThat(scroll.getVvalue()).as("it scrolled").isPositive();
+        enter("field-mount_mm", "30 x 2 cm");
+        assertThat(mirror("Fold 1").mount().depth()).isEqualTo(0.02);
+        assertThat(mirror("Fold 1").mount().width()).isEqualTo(0.03);
     }
 
     @Test

@@ -368,8 +368,13 @@ final class Stagehand {
 
     /** Chooses what a box of choices says in words. */
     void choose(String id, String words) throws Exception {
+        choose(node(id, Node.class), words);
+    }
+
+    /** Chooses what a box of choices says in words. */
+    void choose(Node box, String words) throws Exception {
         fx(() -> {
-            choose((ChoiceBox<?>) editor.lookup("#" + id), words);
+            choose((ChoiceBox<?>) box, words);
             return true;
         });
         settle();

@@ -14,6 +14,8 @@ import twofold.design.Problem;
  * @param <T> the values
  */
 public final class Choice<T> extends ChoiceBox<T> {
+    private static final double WIDE = 112;
+
     private final Reason reason = new Reason();
     private @Nullable T shown;
     private boolean isShowing;
@@ -25,7 +27,6 @@ public final class Choice<T> extends ChoiceBox<T> {
      * @param take applies a choice, and says what is wrong with it
      */
     public Choice(Function<T, String> words, Function<T, List<Problem>> take) {
-        setMinWidth(USE_PREF_SIZE);
         setMaxWidth(Double.MAX_VALUE);
         setConverter(new StringConverter<>() {
             @Override
@@ -43,6 +44,12 @@ public final class Choice<T> extends ChoiceBox<T> {
                 choose(is, take);
             }
         });
+    }
+
+    /** Short words are never cut; long ones, as names, give way to what stands beside. */
+    @Override
+    protected double computeMinWidth(double height) {
+        return Math.min(WIDE, computePrefWidth(height));
     }
 
     private void choose(T value, Function<T, List<Problem>> take) {

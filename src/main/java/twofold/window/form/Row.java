@@ -27,6 +27,8 @@ public final class Row {
         name.setText(called);
         name.setWrapText(true);
         name.getStyleClass().add("quiet");
+        // Two lines: of a longer name the tip has the rest.
+        name.setMaxHeight(34);
         tip.setWrapText(true);
         tip.setMaxWidth(360);
         controls.setAlignment(Pos.CENTER_LEFT);
@@ -47,7 +49,7 @@ public final class Row {
         grid.setVgap(3);
         ColumnConstraints names = new ColumnConstraints();
         names.setMinWidth(84);
-        names.setPrefWidth(104);
+        names.setPrefWidth(96);
         ColumnConstraints controls = new ColumnConstraints();
         controls.setHgrow(Priority.ALWAYS);
         controls.setMinWidth(120);
@@ -79,9 +81,10 @@ public final class Row {
         grid.add(all, 0, row + 1, 2, 1);
     }
 
-    /** Changes its name. */
-    public void rename(String called) {
+    /** Changes its name, and says what it is. */
+    public void rename(String called, String words) {
         name.setText(called);
+        help(called + "\n" + words);
     }
 
     /** Says what it is, when the pointer rests on it. */

@@ -43,6 +43,8 @@ public final class Typed {
         this.field = field;
         this.session = session;
         this.take = take;
+        // Whoever saves finds what is typed by the field that has the keyboard.
+        field.setUserData(this);
         field.focusedProperty().addListener((o, was, is) -> {
             if (is) {
                 entered();

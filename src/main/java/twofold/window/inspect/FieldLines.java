@@ -52,7 +52,7 @@ final class FieldLines {
             case FACE_ANGLE -> Optional.of(faces());
             case TILT_PLANE -> Optional.of(tiltPlane());
             case SIDE -> Optional.of(side());
-            case NUMBER, POSITIVE, SIGNED, MOUNT, POWERS, MATRIX -> Optional.of(TypedLine.of(session, field));
+            case NUMBER, POSITIVE, SIGNED, MOUNT, POWERS, MATRIX -> Optional.of(new TypedLine(session, field));
         };
     }
 
@@ -76,7 +76,7 @@ final class FieldLines {
                         now,
                         Field.ALONG,
                         middle ? Along.MIDDLE : Along.at(now.standing().middle())));
-        TypedLine typed = TypedLine.of(
+        TypedLine typed = new TypedLine(
                 session,
                 Field.ALONG,
                 now -> Text.of(Unit.MM, now.standing().middle()),
@@ -99,7 +99,7 @@ final class FieldLines {
                         brewster
                                 ? FaceAngle.BREWSTER
                                 : FaceAngle.of(now.standing().incidence())));
-        TypedLine typed = TypedLine.of(
+        TypedLine typed = new TypedLine(
                 session,
                 Field.FACES,
                 now -> Text.of(Unit.DEG, now.standing().incidence()),
@@ -146,7 +146,7 @@ final class FieldLines {
                 now -> List.of(Bend.values()),
                 now -> Bend.of(radius(now)),
                 (now, bend) -> set(now, Field.ROC, bend.of(now)));
-        TypedLine typed = TypedLine.of(
+        TypedLine typed = new TypedLine(
                 session,
                 Field.ROC,
                 now -> Text.of(Field.ROC, radius(now)),

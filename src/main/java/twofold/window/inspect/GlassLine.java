@@ -36,7 +36,7 @@ final class GlassLine implements Line {
     GlassLine(Session session) {
         this.session = session;
         choice = new Picker<>("material", w -> w, this::offers, GlassLine::made, this::choose);
-        typed = TypedLine.of(session, Field.INDEX, GlassLine::index, Optional.empty(), List.of());
+        typed = new TypedLine(session, Field.INDEX, GlassLine::index, Optional.empty(), List.of());
         chosen = choice.line(
                 "Material",
                 "What it is made of: a material, whose published index is taken at the design's wavelength, or an index.");

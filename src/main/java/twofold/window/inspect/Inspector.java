@@ -10,7 +10,6 @@ import javafx.geometry.Pos;
 import javafx.scene.control.Button;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Tooltip;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.ClipboardContent;
@@ -25,6 +24,7 @@ import twofold.session.Figures;
 import twofold.session.Session;
 import twofold.session.Shown;
 import twofold.window.Following;
+import twofold.window.form.Scrolled;
 
 /**
  * The selected part: its fields, to be changed, and under them the figures that follow, rounded for reading and copied in full
@@ -34,7 +34,7 @@ public final class Inspector extends VBox {
     private static final String NOTHING = "Nothing is open.";
 
     /** The figures' share of the height, at most. */
-    private static final double SHARE = 0.45;
+    private static final double SHARE = 0.4;
 
     /** Of the line over the figures, px. */
     private static final double HEAD = 44;
@@ -44,7 +44,7 @@ public final class Inspector extends VBox {
     private final Label title = new Label(NOTHING);
     private final Button copy = new Button("Copy figures");
     private final CheckBox diameters = new CheckBox("Diameters instead of radii");
-    private final ScrollPane fields = new ScrollPane();
+    private final Scrolled fields = new Scrolled("Fields of the selected part");
     private final FiguresGrid grid = new FiguresGrid();
     private final VBox figures = new VBox(4) {
         /** So much that they are read while fields are changed, and no more than they need. */
@@ -77,18 +77,13 @@ public final class Inspector extends VBox {
         diameters.setAccessibleHelp("Shows beam and waist diameters, twice the 1/e² radii");
         diameters.setTooltip(new Tooltip("Beam and waist sizes as 1/e² diameters, twice the radii"));
         diameters.setOnAction(e -> tell());
-        fields.setFitToWidth(true);
-        fields.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         fields.setId("fields-scroll");
-        fields.setAccessibleText("Fields of the selected part");
         fields.setMinHeight(80);
         VBox.setVgrow(fields, Priority.ALWAYS);
         grid.setPadding(new Insets(0, 6, 2, 0));
-        ScrollPane scroll = new ScrollPane(grid);
-        scroll.setFitToWidth(true);
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        Scrolled scroll = new Scrolled("Figures of the selected part");
+        scroll.setContent(grid);
         scroll.setId("figures-scroll");
-        scroll.setAccessibleText("Figures of the selected part");
         VBox.setVgrow(scroll, Priority.ALWAYS);
         heightProperty().addListener((o, was, is) -> figures.requestLayout());
         Region gap = new Region();

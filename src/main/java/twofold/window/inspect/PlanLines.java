@@ -6,6 +6,7 @@ import java.util.function.BiFunction;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
@@ -33,20 +34,21 @@ import twofold.window.form.Text;
 /** The plan's numbers at a mirror: its place, its legs and its incidence, with what follows and with their holds as locks. */
 final class PlanLines implements Line {
     private static final String USUAL = "as is usual";
+    private static final String PATH = "Path of the leg from mirror to mirror, inside parts included.";
     private static final String FOLLOWS = "What follows";
 
     private final Session session;
     private final Following following;
     private final Picker<Optional<Follow>> follows;
     private final Line followsLine;
-    private final Lock place = lock();
-    private final TypedLine x;
-    private final TypedLine y;
+    private final Lock place = new Lock();
+    private final Cell x;
+    private final Cell y;
     private final LegLines before;
     private final LegLines after;
-    private final Lock angle = lock();
-    private final TypedLine incidence;
-    private final TypedLine fold;
+    private final Lock angle = new Lock();
+    private final Cell incidence;
+    private final Cell fold;
     private @Nullable Inspected now;
 
     PlanLines(Session session, Following following) {
@@ -74,38 +76,34 @@ final class PlanLines implements Line {
                 follows.show(now);
             }
         });
-        x = typed(
+        x = cell(
                 "x",
-                "X",
                 Unit.MM,
-                "Place of the mirror on the table, to the right.",
                 i -> Text.of(Unit.MM, mirror(i).at().x()),
-                (i, text) -> MirrorEdits.x(i.name(), text, following.now()),
-                place);
-        y = typed(
+                (i, text) -> MirrorEdits.x(i.name(), text, following.now()));
+        y = cell(
                 "y",
-                "Y",
                 Unit.MM,
-                "Place of the mirror on the table, away from you.",
                 i -> Text.of(Unit.MM, mirror(i).at().y()),
                 (i, text) -> MirrorEdits.y(i.name(), text, following.now()));
+        incidence = cell(
+                "incidence",
+                Unit.DEG,
+                i -> Text.of(Unit.DEG, angle(i)),
+                (i, text) -> MirrorEdits.incidence(i.name(), text, following.chosen()));
+        fold = cell("fold", Unit.DEG, i -> Text.of(Unit.DEG, 2 * angle(i)), this::folded);
         before = new LegLines("before", Inspected::before);
         after = new LegLines("after", Inspected::after);
-        incidence = typed(
-                "incidence",
-                "Incidence",
-                Unit.DEG,
-                "Angle of incidence, from 0 to below 89°: 7.5 or 7°30'.",
-                i -> Text.of(Unit.DEG, angle(i)),
-                (i, text) -> MirrorEdits.incidence(i.name(), text, following.chosen()),
-                angle);
-        fold = typed(
-                "fold",
-                "Full fold angle",
-                Unit.DEG,
-                "Angle between the beam that comes and the beam that goes, twice the incidence.",
-                i -> Text.of(Unit.DEG, 2 * angle(i)),
-                this::folded);
+        place.setId("lock-place");
+        angle.setId("lock-incidence");
+        x.name("X", "Place of the mirror on the table, to the right");
+        y.name("Y", "Place of the mirror on the table, away from you");
+        incidence.name("Incidence", "Angle of incidence, from 0 to below 89°: 7.5 or 7°30'");
+        fold.name("Full fold angle", "Angle between the beam that comes and the beam that goes, twice the incidence");
+    }
+
+    private static List<Node> nodes(List<?>... parts) {
+        return Stream.of(parts).flatMap(List::stream).map(Node.class::cast).toList();
     }
 
     private static Mirror mirror(Inspected i) {
@@ -127,29 +125,8 @@ final class PlanLines implements Line {
         });
     }
 
-    private TypedLine typed(
-            String id,
-            String title,
-            Unit unit,
-            String help,
-            Function<Inspected, Text> value,
-            BiFunction<Inspected, String, Edit> edit,
-            Lock... locks) {
-        return TypedLine.of(
-                session,
-                id,
-                title,
-                unit.symbol(),
-                help,
-                value,
-                edit,
-                List.of(locks),
-                Stream.of(locks).map(Lock::reason).toList());
-    }
-
-    /** A lock whose hold is said when it is shown. */
-    private Lock lock() {
-        return new Lock();
+    private Cell cell(String id, Unit unit, Function<Inspected, Text> value, BiFunction<Inspected, String, Edit> edit) {
+        return new Cell(session, id, unit.symbol(), value, edit);
     }
 
     private void show(Lock lock, Inspected i, Hold hold) {
@@ -165,12 +142,21 @@ final class PlanLines implements Line {
     @Override
     public void addTo(GridPane grid) {
         followsLine.addTo(grid);
-        x.addTo(grid);
-        y.addTo(grid);
+        Row at = new Row(
+                "X, Y",
+                nodes(List.of(x.typed().field()), y.nodes(), List.of(place)),
+                List.of(x.reason(), y.reason(), place.reason()));
+        at.help("Place of the mirror on the table: to the right, and away from you. Lengths may carry a unit.");
+        at.addTo(grid);
         before.addTo(grid);
         after.addTo(grid);
-        incidence.addTo(grid);
-        fold.addTo(grid);
+        Row angles = new Row(
+                "Incidence, full fold angle",
+                nodes(incidence.nodes(), fold.nodes(), List.of(angle)),
+                List.of(incidence.reason(), fold.reason(), angle.reason()));
+        angles.help("Angle of incidence, from 0 to below 89°, as 7.5 or 7°30'; and twice that, the angle between the"
+                + " beam that comes and the beam that goes.");
+        angles.addTo(grid);
     }
 
     @Override
@@ -179,7 +165,6 @@ final class PlanLines implements Line {
         followsLine.show(shown);
         x.show(shown);
         y.show(shown);
-        place.setId("lock-place");
         show(place, shown, new Hold.Position(shown.name()));
         before.show(shown);
         after.show(shown);
@@ -190,15 +175,14 @@ final class PlanLines implements Line {
         incidence.typed().fix(why);
         fold.show(shown);
         fold.typed().fix(why);
-        angle.setId("lock-incidence");
         angle.setDisable(!isFold);
         show(angle, shown, new Hold.Incidence(shown.name()));
     }
 
     @Override
     public void stash() {
-        for (TypedLine line : List.of(x, y, before.path, after.path, incidence, fold)) {
-            line.stash();
+        for (Cell cell : List.of(x, y, before.path, after.path, incidence, fold)) {
+            cell.stash();
         }
     }
 
@@ -206,9 +190,10 @@ final class PlanLines implements Line {
     private final class LegLines {
         private final Function<Inspected, Optional<Leg>> leg;
         private final String word;
-        private final Lock length = lock();
-        private final Lock direction = lock();
-        private final TypedLine path;
+        private final Lock length = new Lock();
+        private final Lock direction = new Lock();
+        private final Cell path;
+        private final Row row;
         private final Label heading = new Label();
         private final Row headed;
         private String named = "";
@@ -218,18 +203,17 @@ final class PlanLines implements Line {
             this.leg = leg;
             length.setId("lock-leg-" + word);
             direction.setId("lock-direction-" + word);
-            path = typed(
+            path = cell(
                     "leg-" + word,
-                    "Leg " + word,
                     Unit.MM,
-                    "",
                     i -> leg.apply(i).map(l -> Text.of(Unit.MM, l.path())).orElse(Text.NONE),
-                    (i, text) -> MirrorEdits.leg(place(i, leg.apply(i).orElseThrow()), text, following.chosen()),
-                    length);
+                    (i, text) -> MirrorEdits.leg(place(i, leg.apply(i).orElseThrow()), text, following.chosen()));
+            row = new Row("Leg " + word, nodes(path.nodes(), List.of(length)), List.of(path.reason(), length.reason()));
             heading.getStyleClass().add("figure");
             heading.setMaxWidth(Double.MAX_VALUE);
             HBox.setHgrow(heading, Priority.ALWAYS);
             headed = new Row("Its direction", List.of(heading, direction), List.of(direction.reason()));
+            headed.help("The way the beam runs on this leg, from the right towards away from you.");
         }
 
         /** The leg, with the inspected mirror as the one that moves where others stay. */
@@ -238,13 +222,13 @@ final class PlanLines implements Line {
         }
 
         void addTo(GridPane grid) {
-            path.addTo(grid);
+            row.addTo(grid);
             headed.addTo(grid);
         }
 
         void show(Inspected i) {
             Optional<Leg> l = leg.apply(i);
-            path.row().appear(l.isPresent());
+            row.appear(l.isPresent());
             headed.appear(l.isPresent());
             l.ifPresent(at -> show(i, at));
         }
@@ -255,8 +239,8 @@ final class PlanLines implements Line {
             String title = "Leg " + (isBefore ? "from " : "to ") + other;
             if (!title.equals(named)) {
                 named = title;
-                path.rename(title, "Path of the leg from mirror to mirror, inside parts included.");
-                headed.help("The way the beam runs on this leg, from the right towards away from you.");
+                row.rename(title, PATH);
+                path.name(title, PATH);
             }
             path.show(i);
             heading.setText(

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Objects;
 import java.util.Optional;
-import java.util.function.BiFunction;
 import java.util.function.Function;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
@@ -15,144 +14,90 @@ import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Region;
 import org.jspecify.annotations.Nullable;
 import twofold.design.Field;
-import twofold.edit.Edit;
 import twofold.edit.FieldEdits;
 import twofold.session.Session;
 import twofold.window.form.Reason;
 import twofold.window.form.Row;
 import twofold.window.form.Text;
-import twofold.window.form.Typed;
 
-/** A row with a typed value, its unit, and where it may be absent a button that takes it away. */
+/** The row of a typed field, and where it may be absent a button that takes it away. */
 final class TypedLine implements Line {
     private final Session session;
-    private final Typed typed;
+    private final Field field;
+    private final Cell cell;
     private final Row row;
-    private final String title;
-    private final String unit;
-    private final Function<Inspected, Text> value;
-    private final @Nullable Clear clear;
+    private final Button clear = new Button("×");
     private @Nullable Inspected now;
 
-    /** The button that makes a field absent. */
-    private static final class Clear extends Button {
-        private final Field field;
-
-        Clear(Field field) {
-            super("×");
-            this.field = field;
-            getStyleClass().add("clear");
-            setMinWidth(Region.USE_PREF_SIZE);
-            String absent = field.absent();
-            String words = absent.equals("none") ? "Makes it absent" : "Takes it back to what it usually is: " + absent;
-            setTooltip(new Tooltip(words));
-            setAccessibleText("Clear " + title(field));
-            setAccessibleHelp(words);
-        }
-
-        void show(Inspected now) {
-            Object stated = now.part().values().stated().get(field);
-            setDisable(stated == null || Objects.equals(Optional.of(stated), field.fallback()));
-        }
-    }
-
-    private TypedLine(
-            Session session,
-            String title,
-            String unit,
-            Function<Inspected, Text> value,
-            BiFunction<Inspected, String, Edit> edit,
-            @Nullable Clear clear,
-            Optional<? extends Control> before,
-            List<? extends Control> behind,
-            List<Reason> reasons) {
-        this.session = session;
-        this.title = title;
-        this.unit = unit;
-        this.value = value;
-        this.clear = clear;
-        typed = Typed.line(
-                session,
-                text -> now == null
-                        ? List.of()
-                        : session.edit(edit.apply(now, text)).problems());
-        List<Node> nodes = new ArrayList<>();
-        before.ifPresent(nodes::add);
-        nodes.add(typed.field());
-        if (!unit.isEmpty()) {
-            nodes.add(Row.word(unit));
-        }
-        if (clear != null) {
-            nodes.add(clear);
-            clear.setOnAction(e -> clear());
-        }
-        nodes.addAll(behind);
-        List<Reason> all = new ArrayList<>(List.of(typed.reason()));
-        all.addAll(reasons);
-        row = new Row(title, nodes, all);
-    }
-
-    /** What a field is called at the head of its row. */
-    static String title(Field field) {
-        String title = field.title();
-        return title.substring(0, 1).toUpperCase(Locale.ROOT) + title.substring(1);
-    }
-
-    /** A field of a part. */
-    static TypedLine of(Session session, Field field) {
-        return of(session, field, now -> value(now, field), Optional.empty(), List.of());
+    /** A field whose text is its stated value. */
+    TypedLine(Session session, Field field) {
+        this(session, field, now -> value(now, field), Optional.empty(), List.of());
     }
 
     /**
-     * A field of a part whose text is not merely its stated value, with a choice before it.
+     * A field whose text is not merely its stated value, with a choice before it.
      *
      * @param reasons the choice's
      */
-    static TypedLine of(
+    TypedLine(
             Session session,
             Field field,
             Function<Inspected, Text> value,
             Optional<? extends Control> choice,
             List<Reason> reasons) {
-        boolean isOptional = field.need() == Field.Need.OPTIONAL;
-        TypedLine line = new TypedLine(
+        this.session = session;
+        this.field = field;
+        boolean isMatrix = field.form() == Field.Form.MATRIX;
+        cell = new Cell(
                 session,
-                title(field),
-                field.form() == Field.Form.MATRIX ? "" : field.unit().symbol(),
+                field.json(),
+                isMatrix ? "" : field.unit().symbol(),
                 value,
-                (now, text) -> text.isBlank() && isOptional
-                        ? FieldEdits.clear(now.name(), field)
-                        : FieldEdits.set(now.name(), field, text),
-                isOptional ? new Clear(field) : null,
-                choice,
-                List.of(),
-                reasons);
-        line.typed.field().setId("field-" + field.json());
-        line.help(help(field));
-        return line;
+                (part, text) -> text.isBlank() && isOptional()
+                        ? FieldEdits.clear(part.name(), field)
+                        : FieldEdits.set(part.name(), field, text));
+        List<Node> nodes = new ArrayList<>();
+        choice.ifPresent(nodes::add);
+        nodes.addAll(cell.nodes());
+        if (isOptional()) {
+            nodes.add(clear);
+        }
+        List<Reason> all = new ArrayList<>(List.of(cell.reason()));
+        all.addAll(reasons);
+        row = new Row(title(field), nodes, all);
+        row.help(help(field));
+        cell.name(title(field), help(field));
+        clearing();
     }
 
-    /**
-     * A number of the plan, or something else that is no field.
-     *
-     * @param help what it is and what it may be
-     * @param behind controls at the row's end
-     * @param reasons theirs
-     */
-    static TypedLine of(
-            Session session,
-            String id,
-            String title,
-            String unit,
-            String help,
-            Function<Inspected, Text> value,
-            BiFunction<Inspected, String, Edit> edit,
-            List<? extends Control> behind,
-            List<Reason> reasons) {
-        TypedLine line = new TypedLine(session, title, unit, value, edit, null, Optional.empty(), behind, reasons);
-        line.typed.field().setId("field-" + id);
-        line.help(help);
-        return line;
+    private boolean isOptional() {
+        return field.need() == Field.Need.OPTIONAL;
+    }
+
+    private void clearing() {
+        clear.getStyleClass().add("clear");
+        clear.setMinWidth(Region.USE_PREF_SIZE);
+        String absent = field.absent();
+        String words = absent.equals("none") ? "Makes it absent" : "Takes it back to what it usually is: " + absent;
+        clear.setTooltip(new Tooltip(words));
+        clear.setAccessibleText("Clear " + title(field));
+        clear.setAccessibleHelp(words);
+        clear.setOnAction(e -> {
+            if (now != null) {
+                cell.reason()
+                        .say(session.edit(FieldEdits.clear(now.name(), field)).problems());
+                cell.typed().field().requestFocus();
+            }
+        });
+    }
+
+    /** What a field is called at the head of its row. */
+    static String title(Field field) {
+        return capital(field.title());
+    }
+
+    private static String capital(String words) {
+        return words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
     }
 
     private static Text value(Inspected now, Field field) {
@@ -161,42 +106,11 @@ final class TypedLine implements Line {
 
     /** What a field is and what it may be. */
     static String help(Field field) {
-        String absent = field.need() == Field.Need.OPTIONAL ? "\nAbsent: " + field.absent() : "";
-        String doc = field.doc();
-        return doc.substring(0, 1).toUpperCase(Locale.ROOT) + doc.substring(1) + ".\nMay be " + field.accepted()
-                + (field.unit().symbol().isEmpty() || field.form() == Field.Form.MATRIX
-                        ? ""
-                        : ", in " + field.unit().symbol() + " or with another unit behind it")
-                + "." + absent;
-    }
-
-    private void help(String words) {
-        row.help(words);
-        String called = unit.isEmpty() ? title : title + ", " + unit;
-        typed.name(called, words);
-    }
-
-    /** Calls the row something else. */
-    void rename(String called, String help) {
-        row.rename(called);
-        row.help(help);
-        typed.name(unit.isEmpty() ? called : called + ", " + unit, help);
-    }
-
-    private void clear() {
-        if (now != null && clear != null) {
-            typed.reason()
-                    .say(session.edit(FieldEdits.clear(now.name(), clear.field)).problems());
-            typed.field().requestFocus();
-        }
-    }
-
-    Typed typed() {
-        return typed;
-    }
-
-    Row row() {
-        return row;
+        String symbol = field.unit().symbol();
+        boolean hasUnit = !symbol.isEmpty() && field.form() != Field.Form.MATRIX;
+        return capital(field.doc()) + ".\nMay be " + field.accepted()
+                + (hasUnit ? ", in " + symbol + " or with another unit behind it" : "") + "."
+                + (field.need() == Field.Need.OPTIONAL ? "\nAbsent: " + field.absent() : "");
     }
 
     @Override
@@ -207,14 +121,13 @@ final class TypedLine implements Line {
     @Override
     public void show(Inspected shown) {
         now = shown;
-        typed.show(shown.whose(), value.apply(shown));
-        if (clear != null) {
-            clear.show(shown);
-        }
+        cell.show(shown);
+        Object stated = shown.part().values().stated().get(field);
+        clear.setDisable(stated == null || Objects.equals(Optional.of(stated), field.fallback()));
     }
 
     @Override
     public void stash() {
-        typed.stash();
+        cell.stash();
     }
 }
