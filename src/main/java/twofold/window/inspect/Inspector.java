@@ -127,6 +127,7 @@ public final class Inspector extends VBox {
             part = next;
             form.setPadding(new Insets(2, 6, 4, 2));
             fields.setContent(form);
+            fields.setVvalue(0);
         }
         figures.setVisible(next.isPresent());
         figures.setManaged(next.isPresent());
