@@ -83,6 +83,9 @@ final class FirstPicture {
             window.pulses.release();
             if (++pulse[0] == 2) {
                 shown.run();
+            } else if (pulse[0] == 1) {
+                // A window that needs no second layout has no second pulse of its own.
+                Platform.requestNextPulse();
             }
         });
         Platform.requestNextPulse();
