@@ -49,6 +49,19 @@ public record Entry<T>(Optional<T> value, Optional<Problem> problem) {
         return number(where, text, unit, "a number");
     }
 
+    /**
+     * A radius of curvature: a number, or flat, which is +∞.
+     *
+     * @param unit without another one behind it
+     */
+    public static Entry<Double> radius(Subject where, String text, Unit unit) {
+        return isFlat(text) ? of(Double.POSITIVE_INFINITY) : number(where, text, unit, "a number or flat");
+    }
+
+    private static boolean isFlat(String text) {
+        return FLATS.contains(text.strip().toLowerCase(Locale.ROOT));
+    }
+
     private static Entry<Double> number(Subject where, String text, Unit unit, String accepted) {
         TypedNumber number = TypedNumber.read(text, unit);
         return number.si().isPresent()
@@ -67,7 +80,7 @@ public record Entry<T>(Optional<T> value, Optional<Problem> problem) {
         String word = bare.toLowerCase(Locale.ROOT);
         return switch (field.form()) {
             case NUMBER, POSITIVE, SIGNED ->
-                field == Field.ROC && FLATS.contains(word)
+                field == Field.ROC && isFlat(word)
                         ? of(Double.POSITIVE_INFINITY)
                         : limited(where, bare, field).then(n -> n);
             case POINT -> numbers(where, bare, field, 2).then(n -> new Point(n.get(0), n.get(1)));

@@ -21,6 +21,11 @@ public final class Names {
 
     private Names() {}
 
+    /** Words with a capital at their head, as a title. */
+    public static String capital(String words) {
+        return words.isEmpty() ? words : words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
+    }
+
     /** Whether a text may be a name. */
     public static boolean accepts(String name) {
         int length = name.codePointCount(0, name.length());

@@ -2,7 +2,6 @@ package twofold.design;
 
 import java.util.Arrays;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 
 /** Everything that can be read off a cavity: JSON name, unit, where it may be read, whether it has a plane, meaning, source. */
@@ -222,7 +221,7 @@ public enum Quantity {
                 .replaceFirst("^fsr$", "free spectral range")
                 .replaceFirst("^gouy$", "Gouy phase")
                 .replace('_', ' ');
-        return bare.substring(0, 1).toUpperCase(Locale.ROOT) + bare.substring(1);
+        return Names.capital(bare);
     }
 
     /** What it is, in a few words. */

@@ -1,12 +1,12 @@
 package twofold.edit;
 
-import java.util.Locale;
 import java.util.Optional;
 import twofold.design.Along;
 import twofold.design.Design;
 import twofold.design.Field;
 import twofold.design.FourNumbers;
 import twofold.design.Kind;
+import twofold.design.Names;
 import twofold.design.Part;
 import twofold.design.Point;
 import twofold.design.Values;
@@ -37,9 +37,7 @@ final class NewPart {
             values = glass(
                     values, kind == Kind.PLATE ? "fused silica" : "YAG", kind == Kind.PLATE ? 1.45 : 1.82, design);
         }
-        String word = kind.word().substring(0, 1).toUpperCase(Locale.ROOT)
-                + kind.word().substring(1);
-        return kind.part(FreeName.first(word, Named.parts(design)), values);
+        return kind.part(FreeName.first(Names.capital(kind.word()), Named.parts(design)), values);
     }
 
     private static Object first(Field field) {

@@ -2,6 +2,8 @@ package twofold.edit;
 
 import java.util.OptionalDouble;
 import twofold.design.Design;
+import twofold.design.Entry;
+import twofold.design.Subject;
 import twofold.design.Unit;
 
 /**
@@ -144,6 +146,12 @@ public enum StartingInput {
             case OPTIONAL -> range + ", or nothing";
             case RADIUS -> range + ", the same negative, or flat";
         };
+    }
+
+    /** A typed number, with or without a unit; a radius may be flat: +∞. Its limits are for {@link #accepts}. */
+    public Entry<Double> read(String text) {
+        Subject where = Subject.DOCUMENT.at(words);
+        return form == Form.RADIUS ? Entry.radius(where, text, unit) : Entry.number(where, text, unit);
     }
 
     /** A value as a person reads it: "104.21 mm", "flat". */

@@ -2,7 +2,6 @@ package twofold.session;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Function;
 import twofold.cavity.Cavity;
@@ -13,6 +12,7 @@ import twofold.design.Design;
 import twofold.design.Field;
 import twofold.design.Kind;
 import twofold.design.Mirror;
+import twofold.design.Names;
 import twofold.design.Part;
 import twofold.design.Point;
 import twofold.design.Unit;
@@ -131,7 +131,7 @@ public final class Figures {
             if (value instanceof Double d
                     && !isTold(field)
                     && !Optional.of(value).equals(field.fallback())) {
-                add(capital(field.doc()), field.unit(), d);
+                add(Names.capital(field.doc()), field.unit(), d);
             }
         });
     }
@@ -150,10 +150,6 @@ public final class Figures {
     /** Fields that the standing part tells of already. */
     private static boolean isTold(Field field) {
         return field == Field.INDEX || field == Field.TILT || field == Field.INSIDE;
-    }
-
-    private static String capital(String words) {
-        return words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
     }
 
     private void standing(Leg leg, Standing s) {

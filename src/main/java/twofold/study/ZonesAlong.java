@@ -29,8 +29,11 @@ import twofold.optics.Plane;
  * @param edges by value, ascending
  */
 public record ZonesAlong(Plane plane, List<Edge> edges) {
-    /** More than a search for an extremum takes. */
-    private static final int MOST_STEPS = 200;
+    /** How near an extremum is found, as a share: so near, its value is right to the square of that. */
+    private static final double NEAR = 1e-9;
+
+    /** Far more than the 50 or so steps of a search for an extremum. */
+    private static final int MOST_STEPS = 2000;
 
     /** Copies the list. */
     public ZonesAlong {
@@ -111,7 +114,7 @@ public record ZonesAlong(Plane plane, List<Edge> edges) {
         double[] answers = new double[causes];
         asker.ask(new double[] {from}, answers, 0);
         double sign = Math.signum(answers[cause]);
-        double place = new BrentOptimizer(1e-12, 1e-14 * Math.max(Math.abs(from), Math.abs(to)))
+        double place = new BrentOptimizer(NEAR, NEAR * Math.max(Math.abs(from), Math.abs(to)))
                 .optimize(
                         GoalType.MINIMIZE,
                         new MaxEval(MOST_STEPS),

@@ -80,7 +80,7 @@ final class App {
         stage.setOnHiding(e -> recall.change(s -> s.sized(
                 editor.getScene().getWidth(), editor.getScene().getHeight(), stage.isMaximized(), editor.dividers())));
         stage.show();
-        offer(editor, documents, journals);
+        offer(editor, documents, asks, journals);
         // Dividers have their places once the window has its size.
         Platform.runLater(() -> editor.setDividers(settings.splits()));
         Timeline look = new Timeline(new KeyFrame(LOOK, e -> editor.session().look()));
@@ -92,10 +92,14 @@ final class App {
         });
     }
 
-    private static void offer(Editor editor, Documents documents, Path journals) {
+    private static void offer(Editor editor, Documents documents, Asks asks, Path journals) {
         Recovery recovery = editor.recovery();
         try {
-            recovery.offer(UnsavedWork.in(journals), work -> documents.recover(work, recovery::opened), editor::say);
+            recovery.offer(
+                    UnsavedWork.in(journals),
+                    work -> documents.recover(work, recovery::opened),
+                    asks::delete,
+                    editor::say);
         } catch (IOException e) {
             editor.say("What was left unsaved cannot be looked for: " + e.getMessage());
         }

@@ -34,6 +34,9 @@ interface Asks {
     /** What becomes of a document's unsaved work, before it is closed. */
     Unsaved unsaved(String name);
 
+    /** Whether work that an earlier run left unsaved is deleted for good. */
+    boolean delete(String title);
+
     /** What becomes of a file that was changed since it was read. */
     Changed changed(String name);
 }

@@ -81,6 +81,18 @@ final class Dialogs implements Asks {
                 Changed.STAY);
     }
 
+    @Override
+    public boolean delete(String title) {
+        ButtonType delete = new ButtonType("Delete it", ButtonBar.ButtonData.YES);
+        ButtonType keep = new ButtonType("Keep it", ButtonBar.ButtonData.CANCEL_CLOSE);
+        return ask(
+                "Work that is not saved",
+                "Delete " + title + " for good? It was never saved in a file.",
+                Map.of(delete, true, keep, false),
+                List.of(keep, delete),
+                false);
+    }
+
     private <T> T ask(String title, String text, Map<ButtonType, T> answers, List<ButtonType> order, T none) {
         Alert alert = new Alert(Alert.AlertType.CONFIRMATION, text, order.toArray(ButtonType[]::new));
         dress(alert, over);

@@ -1,11 +1,11 @@
 package twofold.window;
 
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Function;
 import javafx.scene.input.KeyCombination;
 import twofold.design.Kind;
+import twofold.design.Names;
 import twofold.design.Part;
 import twofold.design.Problem;
 import twofold.edit.Edit;
@@ -116,17 +116,12 @@ final class EditActions {
         return List.of(Kind.values()).stream()
                 .map(kind -> Action.of(
                                 "place-" + kind.word(),
-                                title(kind),
+                                Names.capital(kind.word()),
                                 "Shortcut+" + (List.of(Kind.values()).indexOf(kind) + 1),
                                 "Hangs a new " + kind.word() + " at the pointer, to be put on a leg",
                                 () -> editor.place(kind))
                         .unless(this::closed))
                 .toList();
-    }
-
-    private static String title(Kind kind) {
-        return kind.word().substring(0, 1).toUpperCase(Locale.ROOT)
-                + kind.word().substring(1);
     }
 
     private Shown shown() {

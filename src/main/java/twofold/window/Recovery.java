@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.Consumer;
+import java.util.function.Predicate;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
@@ -30,17 +31,20 @@ final class Recovery extends VBox {
      * Offers work.
      *
      * @param open opens one; it is no longer offered then
+     * @param mayDelete asks about one by its title
      * @param failed told in words what could not be deleted
      */
-    void offer(List<UnsavedWork> works, Consumer<UnsavedWork> open, Consumer<String> failed) {
+    void offer(
+            List<UnsavedWork> works, Consumer<UnsavedWork> open, Predicate<String> mayDelete, Consumer<String> failed) {
         for (UnsavedWork work : works) {
             left.add(work);
-            getChildren().add(line(work, open, failed));
+            getChildren().add(line(work, open, mayDelete, failed));
         }
         update();
     }
 
-    private HBox line(UnsavedWork work, Consumer<UnsavedWork> open, Consumer<String> failed) {
+    private HBox line(
+            UnsavedWork work, Consumer<UnsavedWork> open, Predicate<String> mayDelete, Consumer<String> failed) {
         Label words = new Label("Work that was not saved: " + work.title() + ", "
                 + TIME.format(work.entry().time()) + ".");
         words.setMinWidth(0);
@@ -52,7 +56,11 @@ final class Recovery extends VBox {
                 .addAll(
                         button("Open it", "Opens the work as it was at the last edit", () -> open.accept(work)),
                         button("Later", "Keeps the work and offers it at the next start", () -> later(work, line)),
-                        button("Delete it", "Deletes the work for good", () -> delete(work, line, failed)));
+                        button("Delete it", "Deletes the work for good", () -> {
+                            if (mayDelete.test(work.title())) {
+                                delete(work, line, failed);
+                            }
+                        }));
         line.setUserData(work);
         return line;
     }

@@ -8,7 +8,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
-import java.util.function.Function;
 import java.util.stream.Collectors;
 import javafx.scene.Node;
 import javafx.scene.control.ChoiceBox;
@@ -20,9 +19,9 @@ import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
 import twofold.design.Design;
 import twofold.design.Entry;
+import twofold.design.Names;
 import twofold.design.Problem;
 import twofold.design.Subject;
 import twofold.edit.CrystalCut;
@@ -32,11 +31,10 @@ import twofold.edit.StartingShape;
 import twofold.edit.StartingValues;
 import twofold.layout.Outcome;
 import twofold.session.Runner;
+import twofold.window.form.InWords;
 
 /** A form that asks for a starting shape and its numbers, built from their vocabulary. What is typed survives a change of shape. */
 final class ShapeForm extends VBox {
-    private static final List<String> FLATS = List.of("flat", "∞", "inf", "infinity");
-
     private final ChoiceBox<StartingShape> shape = new ChoiceBox<>();
     private final ChoiceBox<CrystalCut> cut = new ChoiceBox<>();
     private final ChoiceBox<String> material = new ChoiceBox<>();
@@ -51,10 +49,10 @@ final class ShapeForm extends VBox {
         shape.setId("shape");
         shape.setAccessibleText("Shape");
         shape.getItems().setAll(StartingShape.values());
-        shape.setConverter(words(s -> title(s.words())));
+        shape.setConverter(new InWords<>(shape::getItems, s -> Names.capital(s.words())));
         cut.setId("crystal");
         cut.setAccessibleText("Crystal");
-        cut.setConverter(words(c -> title(c.words())));
+        cut.setConverter(new InWords<>(cut::getItems, c -> Names.capital(c.words())));
         material.setId("material");
         material.setAccessibleText("Crystal material");
         grid.setHgap(8);
@@ -73,24 +71,6 @@ final class ShapeForm extends VBox {
         shape.valueProperty().addListener((o, was, is) -> choose(is));
         cut.valueProperty().addListener((o, was, is) -> rows());
         shape.setValue(StartingShape.Z);
-    }
-
-    private static String title(String words) {
-        return words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
-    }
-
-    private static <T> StringConverter<T> words(Function<T, String> of) {
-        return new StringConverter<>() {
-            @Override
-            public String toString(T value) {
-                return value == null ? "" : of.apply(value);
-            }
-
-            @Override
-            public T fromString(String text) {
-                throw new UnsupportedOperationException("chosen, not typed");
-            }
-        };
     }
 
     /** The control that the keyboard begins with. */
@@ -141,10 +121,11 @@ final class ShapeForm extends VBox {
                 : Double.isInfinite(usual.getAsDouble()) ? "flat" : input.unit().text(usual.getAsDouble());
         TextField field = new TextField(typed.getOrDefault(input, text));
         field.setId("input-" + input.name().toLowerCase(Locale.ROOT));
-        Label name = new Label(title(input.words()) + ", " + input.unit().symbol());
+        Label name =
+                new Label(Names.capital(input.words()) + ", " + input.unit().symbol());
         name.setLabelFor(field);
         field.setAccessibleText(name.getText());
-        field.setTooltip(new Tooltip(title(input.doc()) + ". Accepted: " + input.accepted()));
+        field.setTooltip(new Tooltip(Names.capital(input.doc()) + ". Accepted: " + input.accepted()));
         Label doc = new Label(input.doc());
         doc.getStyleClass().add("quiet");
         doc.setWrapText(true);
@@ -166,11 +147,16 @@ final class ShapeForm extends VBox {
         List<Problem> problems = new ArrayList<>();
         for (Map.Entry<StartingInput, TextField> entry : fields.entrySet()) {
             StartingInput input = entry.getKey();
-            Entry<Double> number = number(input, entry.getValue().getText());
+            String text = entry.getValue().getText();
+            if (text.isBlank() && input.form() == StartingInput.Form.OPTIONAL) {
+                values = values.without(input);
+                continue;
+            }
+            Entry<Double> number = input.read(text);
             number.problem().ifPresent(problems::add);
-            values = number.value().isPresent()
-                    ? values.with(input, number.value().get())
-                    : values.without(input);
+            if (number.value().isPresent()) {
+                values = values.with(input, number.value().get());
+            }
         }
         refuse(problems);
         StartingValues asked = values;
@@ -192,16 +178,5 @@ final class ShapeForm extends VBox {
 
     private static String line(Problem problem) {
         return (problem.where().equals(Subject.DOCUMENT) ? "" : problem.where() + ": ") + problem.message();
-    }
-
-    private static Entry<Double> number(StartingInput input, String text) {
-        String bare = text.strip().toLowerCase(Locale.ROOT);
-        if (bare.isEmpty() && input.form() == StartingInput.Form.OPTIONAL) {
-            return new Entry<>(Optional.empty(), Optional.empty());
-        }
-        if (input.form() == StartingInput.Form.RADIUS && FLATS.contains(bare)) {
-            return new Entry<>(Optional.of(Double.POSITIVE_INFINITY), Optional.empty());
-        }
-        return Entry.number(Subject.DOCUMENT.at(input.words()), text, input.unit());
     }
 }

@@ -9,6 +9,7 @@ final class Answers implements Asks {
     Optional<Path> save = Optional.empty();
     Unsaved unsaved = Unsaved.STAY;
     Changed changed = Changed.STAY;
+    boolean delete;
     int asked;
 
     @Override
@@ -33,5 +34,11 @@ final class Answers implements Asks {
     public Changed changed(String name) {
         asked++;
         return changed;
+    }
+
+    @Override
+    public boolean delete(String title) {
+        asked++;
+        return delete;
     }
 }

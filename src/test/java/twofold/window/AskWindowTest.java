@@ -2,7 +2,6 @@ package twofold.window;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.nio.file.Path;
 import java.util.List;
 import javafx.scene.Node;
 import javafx.scene.Parent;
@@ -14,13 +13,9 @@ import javafx.scene.control.MenuItem;
 import javafx.scene.control.TabPane;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.input.KeyCode;
-import org.junit.jupiter.api.AfterEach;
-import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.api.io.TempDir;
 import twofold.design.Bound;
-import twofold.design.Design;
 import twofold.design.Lever;
 import twofold.design.Place;
 import twofold.design.Planes;
@@ -30,38 +25,16 @@ import twofold.design.Tolerance;
 import twofold.edit.AskEdits;
 import twofold.edit.Edit;
 import twofold.picture.Theme;
-import twofold.session.Shown;
 
 /** Requirements, levers and tolerances added, edited, moved and removed in a real window. */
 @Tag("headless-only")
-@SuppressWarnings("NullAway.Init") // set before each test
-class AskWindowTest {
+class AskWindowTest extends Staged {
     private static final int REQUIREMENTS = 1;
     private static final int LEVERS = 2;
     private static final int TOLERANCES = 3;
 
-    @TempDir
-    Path folder;
-
-    private Stagehand stage;
-
-    @BeforeEach
-    void open() throws Exception {
-        stage = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
-        stage.openSample("z-fold-rod.json");
-    }
-
-    @AfterEach
-    void close() throws Exception {
-        stage.close();
-    }
-
-    private Shown shown() throws Exception {
-        return Stagehand.fx(() -> stage.editor().session().shown());
-    }
-
-    private Design design() throws Exception {
-        return shown().cavity().orElseThrow().laid().design();
+    AskWindowTest() {
+        super("z-fold-rod.json");
     }
 
     private Requirement last() throws Exception {
@@ -78,11 +51,7 @@ class AskWindowTest {
     }
 
     private void select(String part) throws Exception {
-        Stagehand.fx(() -> {
-            stage.editor().session().select(List.of(part));
-            return true;
-        });
-        stage.settle();
+        selectAll(List.of(part));
     }
 
     /** Takes a way through a menu by its words. */

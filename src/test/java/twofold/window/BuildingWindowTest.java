@@ -11,11 +11,8 @@ import javafx.scene.Scene;
 import javafx.scene.control.Button;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.input.KeyCode;
-import org.junit.jupiter.api.AfterEach;
-import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.api.io.TempDir;
 import twofold.design.Design;
 import twofold.design.Entry;
 import twofold.design.Field;
@@ -26,46 +23,11 @@ import twofold.edit.CrystalCut;
 import twofold.edit.StartingShape;
 import twofold.file.DesignReader;
 import twofold.file.DesignWriter;
-import twofold.session.Shown;
 import twofold.window.bench.BenchPane;
 
 /** Cavities built from nothing in the window equal those that files hold. */
 @Tag("headless-only")
-@SuppressWarnings("NullAway.Init") // set before each test
-class BuildingWindowTest {
-    @TempDir
-    Path folder;
-
-    private Answers answers;
-    private Stagehand stage;
-
-    @BeforeEach
-    void open() throws Exception {
-        answers = new Answers();
-        stage = Stagehand.open(folder.resolve("settings.json"), 1280, 800, answers);
-    }
-
-    @AfterEach
-    void close() throws Exception {
-        stage.close();
-    }
-
-    private Shown shown() throws Exception {
-        return Stagehand.fx(() -> stage.editor().session().shown());
-    }
-
-    private Design design() throws Exception {
-        return shown().cavity().orElseThrow().laid().design();
-    }
-
-    private void select(List<String> parts) throws Exception {
-        Stagehand.fx(() -> {
-            stage.editor().session().select(parts);
-            return true;
-        });
-        stage.settle();
-    }
-
+class BuildingWindowTest extends Staged {
     @SuppressWarnings("unchecked") // the dialog's own boxes
     private void make(StartingShape shape, CrystalCut cut) throws Exception {
         Stagehand.later(() -> ((Button) stage.editor().lookup("#new")).fire());
@@ -117,7 +79,7 @@ class BuildingWindowTest {
     private void build(Design wanted, String... shapeNames) throws Exception {
         List<Mirror> mirrors = wanted.mirrors();
         for (int i = 0; i < mirrors.size(); i++) {
-            select(List.of(shapeNames[i]));
+            selectAll(List.of(shapeNames[i]));
             if (i == 0) {
                 stage.choose("choice-follows", "others stay");
             }
@@ -128,7 +90,7 @@ class BuildingWindowTest {
         for (int i = 0; i < wanted.parts().size(); i++) {
             Part part = wanted.parts().get(i);
             if (!(part instanceof Mirror)) {
-                select(List.of(wanted.parts().get(i - 1).name()));
+                selectAll(List.of(wanted.parts().get(i - 1).name()));
                 Stagehand.fx(() -> {
                     stage.node("bench", BenchPane.class).requestFocus();
                     return true;
@@ -138,7 +100,7 @@ class BuildingWindowTest {
                 become(part);
             }
         }
-        select(List.of());
+        selectAll(List.of());
         stage.enter("design-title", wanted.title());
         stage.enter("design-wavelength", Unit.NM.text(wanted.wavelength()));
         Stagehand.fx(() -> {

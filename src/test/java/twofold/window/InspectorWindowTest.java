@@ -15,11 +15,8 @@ import javafx.scene.control.TextInputControl;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.KeyCode;
-import org.junit.jupiter.api.AfterEach;
-import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.api.io.TempDir;
 import twofold.design.Along;
 import twofold.design.Crystal;
 import twofold.design.Design;
@@ -31,46 +28,19 @@ import twofold.design.Shape;
 import twofold.design.Unit;
 import twofold.file.DesignReader;
 import twofold.layout.Follow;
-import twofold.layout.Laid;
 import twofold.picture.Theme;
-import twofold.session.Shown;
 
 /** The fields of parts and of the design, typed and chosen in a real window. */
 @Tag("headless-only")
-@SuppressWarnings("NullAway.Init") // set before each test
-class InspectorWindowTest {
+class InspectorWindowTest extends Staged {
     /** Typed numbers are read exactly and rounded once. */
     private static final double EXACT = 0;
 
     /** Mirrors are moved to 1e-9 mm. */
     private static final double MOVED = 1e-12;
 
-    @TempDir
-    Path folder;
-
-    private Stagehand stage;
-
-    @BeforeEach
-    void open() throws Exception {
-        stage = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
-        stage.openSample("z-fold-rod.json");
-    }
-
-    @AfterEach
-    void close() throws Exception {
-        stage.close();
-    }
-
-    private Shown shown() throws Exception {
-        return Stagehand.fx(() -> stage.editor().session().shown());
-    }
-
-    private Laid laid() throws Exception {
-        return shown().cavity().orElseThrow().laid();
-    }
-
-    private Design design() throws Exception {
-        return laid().design();
+    InspectorWindowTest() {
+        super("z-fold-rod.json");
     }
 
     private <T extends Part> T part(String name, Class<T> type) throws Exception {
@@ -87,19 +57,11 @@ class InspectorWindowTest {
     }
 
     private void select(String part) throws Exception {
-        Stagehand.fx(() -> {
-            stage.editor().session().select(List.of(part));
-            return true;
-        });
-        stage.settle();
+        selectAll(List.of(part));
     }
 
     private void selectNothing() throws Exception {
-        Stagehand.fx(() -> {
-            stage.editor().session().select(Optional.empty());
-            return true;
-        });
-        stage.settle();
+        selectAll(List.of());
     }
 
     private TextInputControl field(String id) {
@@ -166,6 +128,15 @@ class InspectorWindowTest {
         assertThat(part("Rod", Crystal.class).length()).isCloseTo(6e-3, within(EXACT));
         stage.press(KeyCode.TAB);
         assertThat(text("field-length_mm")).as("rounded without the keyboard").isEqualTo("6.00");
+    }
+
+    @Test
+    void deleteOnALockTakesNoPartOffTheBeam() throws Exception {
+        select("Fold 1");
+        Design before = design();
+        focus(stage.node("lock-place", Node.class));
+        stage.press(KeyCode.DELETE);
+        assertThat(design()).isEqualTo(before);
     }
 
     @Test

@@ -10,46 +10,15 @@ import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.Label;
 import javafx.scene.input.KeyCode;
-import org.junit.jupiter.api.AfterEach;
-import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.api.io.TempDir;
 import twofold.design.Design;
 import twofold.design.Mirror;
 import twofold.file.DesignReader;
-import twofold.layout.Laid;
-import twofold.session.Shown;
 
 /** A whole build without a mouse: every step is a key pressed where the keyboard is. */
 @Tag("headless-only")
-@SuppressWarnings("NullAway.Init") // set before each test
-class KeyboardWindowTest {
-    @TempDir
-    Path folder;
-
-    private Answers answers;
-    private Stagehand stage;
-
-    @BeforeEach
-    void open() throws Exception {
-        answers = new Answers();
-        stage = Stagehand.open(folder.resolve("settings.json"), 1280, 800, answers);
-    }
-
-    @AfterEach
-    void close() throws Exception {
-        stage.close();
-    }
-
-    private Shown shown() throws Exception {
-        return Stagehand.fx(() -> stage.editor().session().shown());
-    }
-
-    private Laid laid() throws Exception {
-        return shown().cavity().orElseThrow().laid();
-    }
-
+class KeyboardWindowTest extends Staged {
     private String selected() throws Exception {
         return Stagehand.fx(
                 () -> stage.editor().session().selectedPart().map(p -> p.name()).orElse(""));

@@ -15,50 +15,25 @@ import javafx.scene.image.WritableImage;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
 import javafx.scene.paint.Color;
-import org.junit.jupiter.api.AfterEach;
-import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import twofold.edit.LeverEdits;
 import twofold.layout.Laid;
 import twofold.picture.Ink;
 import twofold.picture.Theme;
-import twofold.session.Shown;
 
 /** Sweeps and maps under a real mouse and real keys of the toolkit. */
 @Tag("headless-only")
-@SuppressWarnings("NullAway.Init") // set before each test
-class PlotsWindowTest {
+class PlotsWindowTest extends Staged {
     private static final int BEAM = 0;
     private static final int SWEEP = 1;
     private static final int MAP = 2;
     private static final String HINT = "Click a point to see that design.";
 
-    @TempDir
-    Path folder;
-
-    private Stagehand stage;
-
-    @BeforeEach
-    void open() throws Exception {
-        stage = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
-        stage.openSample("z-fold-rod.json");
-    }
-
-    @AfterEach
-    void close() throws Exception {
-        stage.close();
-    }
-
-    private Shown shown() throws Exception {
-        return Stagehand.fx(() -> stage.editor().session().shown());
-    }
-
-    private Laid laid() throws Exception {
-        return shown().cavity().orElseThrow().laid();
+    PlotsWindowTest() {
+        super("z-fold-rod.json");
     }
 
     /** The path from Fold 1 to Fold 2, mm. */

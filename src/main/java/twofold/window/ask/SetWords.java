@@ -1,7 +1,7 @@
 package twofold.window.ask;
 
-import java.util.Locale;
 import twofold.design.Field;
+import twofold.design.Names;
 
 /** Names of what levers and tolerances set. */
 final class SetWords {
@@ -9,7 +9,6 @@ final class SetWords {
 
     /** "Radius of curvature". */
     static String title(String set) {
-        String title = Field.title(set);
-        return title.substring(0, 1).toUpperCase(Locale.ROOT) + title.substring(1);
+        return Names.capital(Field.title(set));
     }
 }

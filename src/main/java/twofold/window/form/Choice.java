@@ -4,7 +4,6 @@ import java.util.List;
 import java.util.Objects;
 import java.util.function.Function;
 import javafx.scene.control.ChoiceBox;
-import javafx.util.StringConverter;
 import org.jspecify.annotations.Nullable;
 import twofold.design.Problem;
 
@@ -28,17 +27,7 @@ public final class Choice<T> extends ChoiceBox<T> {
      */
     public Choice(Function<T, String> words, Function<T, List<Problem>> take) {
         setMaxWidth(Double.MAX_VALUE);
-        setConverter(new StringConverter<>() {
-            @Override
-            public String toString(@Nullable T value) {
-                return value == null ? "" : words.apply(value);
-            }
-
-            @Override
-            public T fromString(String text) {
-                throw new UnsupportedOperationException("nothing is typed in a list of choices");
-            }
-        });
+        setConverter(new InWords<>(this::getItems, words));
         getSelectionModel().selectedItemProperty().addListener((o, was, is) -> {
             if (!isShowing && is != null && !is.equals(shown)) {
                 choose(is, take);

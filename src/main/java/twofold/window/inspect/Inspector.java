@@ -13,6 +13,8 @@ import javafx.scene.control.Label;
 import javafx.scene.control.Tooltip;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.ClipboardContent;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -96,6 +98,12 @@ public final class Inspector extends VBox {
         figures.setVisible(false);
         figures.setManaged(false);
         getChildren().addAll(title, fields, figures);
+        // A key that clears a field must not reach past a lock or a choice and take the part itself off the beam.
+        addEventHandler(KeyEvent.KEY_PRESSED, e -> {
+            if (e.getCode() == KeyCode.DELETE) {
+                e.consume();
+            }
+        });
     }
 
     /** Shows the selected part, or the design. */

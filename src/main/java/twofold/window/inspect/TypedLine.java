@@ -2,7 +2,6 @@ package twofold.window.inspect;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Function;
@@ -14,6 +13,7 @@ import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Region;
 import org.jspecify.annotations.Nullable;
 import twofold.design.Field;
+import twofold.design.Names;
 import twofold.edit.FieldEdits;
 import twofold.session.Session;
 import twofold.window.form.Reason;
@@ -93,11 +93,7 @@ final class TypedLine implements Line {
 
     /** What a field is called at the head of its row. */
     static String title(Field field) {
-        return capital(field.title());
-    }
-
-    private static String capital(String words) {
-        return words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
+        return Names.capital(field.title());
     }
 
     private static Text value(Inspected now, Field field) {
@@ -108,7 +104,7 @@ final class TypedLine implements Line {
     static String help(Field field) {
         String symbol = field.unit().symbol();
         boolean hasUnit = !symbol.isEmpty() && field.form() != Field.Form.MATRIX;
-        return capital(field.doc()) + ".\nMay be " + field.accepted()
+        return Names.capital(field.doc()) + ".\nMay be " + field.accepted()
                 + (hasUnit ? ", in " + symbol + " or with another unit behind it" : "") + "."
                 + (field.need() == Field.Need.OPTIONAL ? "\nAbsent: " + field.absent() : "");
     }

@@ -9,8 +9,7 @@ import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
-import javafx.util.StringConverter;
-import org.jspecify.annotations.Nullable;
+import twofold.window.form.InWords;
 
 /**
  * One of several things, picked from a menu with its name before it.
@@ -43,20 +42,7 @@ final class Pick<T> extends HBox {
         box.setMinWidth(0);
         box.setMaxWidth(Double.MAX_VALUE);
         setHgrow(box, Priority.ALWAYS);
-        box.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(@Nullable T item) {
-                return item == null ? "" : words.apply(item);
-            }
-
-            @Override
-            public @Nullable T fromString(String text) {
-                return box.getItems().stream()
-                        .filter(i -> words.apply(i).equals(text))
-                        .findFirst()
-                        .orElse(null);
-            }
-        });
+        box.setConverter(new InWords<>(box::getItems, words));
         box.valueProperty().addListener((o, was, is) -> {
             if (!isFilling) {
                 then.run();
