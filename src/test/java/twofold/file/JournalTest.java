@@ -254,7 +254,9 @@ class JournalTest {
 
     @Test
     void theFolderIsThePersonsAlone() throws IOException {
-        assumeTrue(root.getFileSystem().supportedFileAttributeViews().contains("posix"));
+        assumeTrue(
+                root.getFileSystem().supportedFileAttributeViews().contains("posix"),
+                "permissions of owner, group and others are of POSIX file systems");
         try (Journal journal = new Journal(folder)) {
             journal.keep(entry(1));
             assertThat(PosixFilePermissions.toString(Files.getPosixFilePermissions(folder)))

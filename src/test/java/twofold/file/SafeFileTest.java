@@ -95,7 +95,7 @@ class SafeFileTest {
 
     @Test
     void permissionsStay() throws IOException {
-        assumeTrue(isPosix());
+        assumeTrue(isPosix(), "permissions of owner, group and others are of POSIX file systems");
         Path file = folder.resolve("design.json");
         Files.write(file, OLD);
         Files.setPosixFilePermissions(file, PosixFilePermissions.fromString("rw-rw----"));
@@ -132,7 +132,9 @@ class SafeFileTest {
     void aWriteProtectedFileIsRefused() throws IOException {
         Path file = folder.resolve("design.json");
         Files.write(file, OLD);
-        assumeTrue(file.toFile().setReadOnly() && !Files.isWritable(file), "not for an administrator");
+        assumeTrue(
+                file.toFile().setReadOnly() && !Files.isWritable(file),
+                "an administrator can write a write-protected file, so that nothing is refused");
         assertThatThrownBy(() -> SafeFile.write(file, NEW)).hasMessage("it is write-protected");
         assertThat(file).hasBinaryContent(OLD);
     }
@@ -141,7 +143,7 @@ class SafeFileTest {
     void aFullDiskIsSaid() throws IOException {
         // The one device that is always full; elsewhere there is none to try with.
         Path full = Path.of("/dev/full");
-        assumeTrue(Files.exists(full));
+        assumeTrue(Files.exists(full), "a device that is always full is found on Linux alone");
         assertThatThrownBy(() -> SafeFile.write(full, NEW))
                 .isInstanceOf(IOException.class)
                 .hasMessage("No space left on device");

@@ -8,11 +8,14 @@ import java.util.List;
 import java.util.Optional;
 import javafx.scene.Node;
 import javafx.scene.Parent;
+import javafx.scene.Scene;
+import javafx.scene.control.Button;
 import javafx.scene.control.Control;
 import javafx.scene.control.Label;
 import javafx.scene.control.Labeled;
 import javafx.scene.control.MenuBar;
 import javafx.scene.control.ScrollBar;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.SplitPane;
 import javafx.scene.control.TabPane;
 import javafx.scene.image.WritableImage;
@@ -26,6 +29,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.EnumSource;
 import twofold.picture.Ink;
 import twofold.picture.Theme;
 
@@ -249,5 +253,45 @@ class AccessibleWindowTest {
             assertThat(onPaper).as("the drawings' paper in the theme %s", theme).isGreaterThan(inked);
             assertThat(inked).as("something is drawn").isGreaterThan(2000);
         }
+    }
+
+    @ParameterizedTest
+    @EnumSource
+    void theDialogForANewDesignIsNamedAndInTheTheme(Theme theme) throws Exception {
+        Stagehand opened = Stagehand.open(folder.resolve("settings.json"), 1280, 800);
+        stage = opened;
+        Stagehand.fx(() -> {
+            opened.editor().setTheme(theme);
+            return true;
+        });
+        Stagehand.later(() -> ((Button) opened.editor().lookup("#new")).fire());
+        Scene dialog = opened.dialog();
+        TabPane ways = (TabPane) dialog.lookup("#ways");
+        for (int way = 0; way < 2; way++) {
+            int chosen = way;
+            Stagehand.fx(() -> {
+                ways.getSelectionModel().select(chosen);
+                return true;
+            });
+            List<Node> all = new ArrayList<>();
+            WritableImage image = opened.picture(dialog, "new-" + way + "-" + theme.word());
+            Stagehand.fx(() -> {
+                walk(dialog.getRoot(), all);
+                return true;
+            });
+            assertThat(all.stream()
+                            .filter(n -> n instanceof Control && n.isFocusTraversable() && !(n instanceof ScrollBar))
+                            .filter(n -> !(n instanceof Label) && !(n instanceof ScrollPane)))
+                    .hasSizeGreaterThan(3)
+                    .allSatisfy(
+                            n -> assertThat(isNamed(n)).as("%s has a name", n).isTrue());
+            Color paper = Color.web(theme.css(Ink.PAPER));
+            int onPaper = 0;
+            for (int x = 20; x < 600; x += 4) {
+                onPaper += image.getPixelReader().getColor(x, 470).equals(paper) ? 1 : 0;
+            }
+            assertThat(onPaper).as("paper of the theme %s", theme).isGreaterThan(100);
+        }
+        opened.fire(dialog, "make");
     }
 }
